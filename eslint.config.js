@@ -53,7 +53,7 @@ function forbiddenZones(allowed, prefix) {
 const pureRooms = ['server/chemistry/**/*.ts', 'server/notebook/**/*.ts', 'server/checks/**/*.ts'];
 
 export default tseslint.config(
-  { ignores: ['dist', '.cache', 'node_modules', 'test/tidy/fixtures'] },
+  { ignores: ['dist', '.cache', 'node_modules'] },
   js.configs.recommended,
   ...tseslint.configs.strict,
   {
