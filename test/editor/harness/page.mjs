@@ -1,0 +1,56 @@
+// What a person does with a workbench page: open a file, look for a squiggle, rest the mouse on a word.
+import { join } from 'node:path';
+
+const patienceMs = 45_000;
+
+/** Opens one file of `folder` in a workbench and waits until its text is on the screen. */
+export async function openInWorkbench(browser, workbench, folder, file, payload = {}) {
+  const page = await browser.newPage({ viewport: { width: 1280, height: 900 } });
+  page.setDefaultTimeout(patienceMs);
+  const url = workbench.urlOf(folder, { openFile: workbench.uriOf(join(folder, file)), ...payload });
+  await page.goto(url);
+  await page.locator('.monaco-editor .view-line').first().waitFor();
+  return page;
+}
+
+/** The rectangle of the first place in the editor that shows `text`, in CSS pixels. */
+export async function placeOf(page, text) {
+  const found = await page.waitForFunction((wanted) => {
+    for (const line of document.querySelectorAll('.monaco-editor .view-line')) {
+      const walker = document.createTreeWalker(line, NodeFilter.SHOW_TEXT);
+      const pieces = [];
+      let whole = '';
+      for (let node = walker.nextNode(); node; node = walker.nextNode()) {
+        pieces.push({ node, start: whole.length });
+        // The editor shows blanks as non-breaking ones.
+        whole += node.data.replaceAll('\u00a0', ' ');
+      }
+      const at = whole.indexOf(wanted);
+      if (at === -1) continue;
+      const pieceAt = (offset) => pieces.findLast((piece) => piece.start <= offset);
+      const [first, last] = [pieceAt(at), pieceAt(at + wanted.length - 1)];
+      const range = document.createRange();
+      range.setStart(first.node, at - first.start);
+      range.setEnd(last.node, at + wanted.length - last.start);
+      const { x, y, width, height } = range.getBoundingClientRect();
+      return { x, y, width, height };
+    }
+    return undefined;
+  }, text);
+  return found.jsonValue();
+}
+
+/** Rests the mouse on a word, as a person would: not in one jump. */
+export async function rest(page, text) {
+  const { x, y, width, height } = await placeOf(page, text);
+  await page.mouse.move(x + width / 2 - 40, y + height / 2 + 30);
+  await page.mouse.move(x + width / 2, y + height / 2, { steps: 8 });
+}
+
+export const hover = '.monaco-hover:not(.hidden)';
+
+export async function leave(page) {
+  await page.keyboard.press('Escape');
+  await page.mouse.move(5, 5, { steps: 4 });
+  await page.locator(hover).waitFor({ state: 'hidden' });
+}
