@@ -85,6 +85,14 @@ export interface PolyhedralStereo {
 
 export type StereoElement = TetrahedralStereo | DoubleBondStereo | AxialStereo | PolyhedralStereo;
 
+/** A statement about space on an atom that cannot carry it, such as `@` on an atom with three neighbours. */
+export interface StrayStereo {
+  readonly atom: number;
+  /** What was written: `@`, `@@`, `@SP1` … */
+  readonly statement: string;
+  readonly range: TextRange;
+}
+
 export interface Molecule {
   readonly atoms: readonly Atom[];
   readonly bonds: readonly Bond[];
@@ -92,6 +100,8 @@ export interface Molecule {
   readonly neighbours: readonly (readonly Neighbour[])[];
   /** The arrangements that were stated; whatever is not here is open. */
   readonly stereo: readonly StereoElement[];
+  /** Statements that fit no arrangement at all; they change nothing, and a check says so. */
+  readonly stray?: readonly StrayStereo[];
 }
 
 const nowhere: TextRange = { start: 0, end: 0 };
@@ -102,6 +112,7 @@ export class MoleculeBuilder {
   readonly bonds: Bond[] = [];
   readonly neighbours: Neighbour[][] = [];
   readonly stereo: StereoElement[] = [];
+  readonly stray: StrayStereo[] = [];
 
   /** Adds an atom and returns its index. What is left out is 0, false, or an empty range. */
   addAtom(atomicNumber: number, more: Partial<Omit<Atom, 'atomicNumber'>> = {}): number {
