@@ -1,40 +1,54 @@
-// `node test/editor/run.mjs`: the built extension in a real VS Code in a real browser. Expects `dist/`.
-import { existsSync, mkdirSync } from 'node:fs';
-import { join } from 'node:path';
+// `node test/editor/run.mjs`: the built extension in a real VS Code in a real browser. Builds nothing but its own
+// tests: `dist/` must be there. Ends with `N passed, N failed`.
+import { existsSync } from 'node:fs';
+import { copyFile } from 'node:fs/promises';
+import { join, relative } from 'node:path';
 import { launchBrowser } from './harness/chromium.mjs';
 import { installEditor } from './harness/install.mjs';
+import { checkLooks } from './harness/looks.mjs';
 import { runMochaInBrowser } from './harness/mocha-run.mjs';
-import { cache, root } from './harness/paths.mjs';
-import { endAll } from './harness/processes.mjs';
+import { checkPackage } from './harness/package-run.mjs';
+import { root, screenshotFolder } from './harness/paths.mjs';
+import { endAll, within } from './harness/processes.mjs';
 import { bundleSuite } from './harness/suite-bundle.mjs';
-import { Workbench, workspaceCopy } from './harness/workbench.mjs';
+import { Tally } from './harness/tally.mjs';
+import { extensionFolder, Workbench, workspaceCopy } from './harness/workbench.mjs';
 
-const total = { passed: 0, failed: 0 };
-function add({ passed, failed }) {
-  total.passed += passed;
-  total.failed += failed;
-}
+const limitMs = 600_000;
+const notebook = join(root, 'examples', 'linden-row');
+const page = 'look.md';
+
+const tally = new Tally();
 
 async function everything() {
-  if (!existsSync(join(root, 'dist', 'client.cjs')))
-    throw new Error('dist/ is missing; run `npm run build`.');
-  mkdirSync(cache, { recursive: true });
+  for (const file of ['client.cjs', 'server.js']) {
+    if (!existsSync(join(root, 'dist', file))) throw new Error(`dist/${file} is missing: npm run build`);
+  }
   const editor = installEditor();
-  await bundleSuite();
-  const browser = await launchBrowser();
+  const [browser] = await Promise.all([launchBrowser(), bundleSuite()]);
+  const folder = workspaceCopy(notebook);
+  await copyFile(join(root, 'test', 'editor', 'fixtures', page), join(folder, page));
+
+  console.log(`Starting VS Code 1.100.3 in ${browser.browserType().name()} ${browser.version()} …`);
   const workbench = await Workbench.start(editor);
-  const t = Date.now();
-  add(await runMochaInBrowser(browser, workbench, workspaceCopy(join(root, 'test/editor/fixtures'))));
-  console.log(Date.now() - t);
+  const extension = extensionFolder();
+  const inside = await runMochaInBrowser(browser, workbench, extension, folder);
+  tally.passed += inside.passed;
+  tally.failed += inside.failed;
+  await checkLooks(tally, browser, workbench, extension, folder, page);
+  await workbench.stop();
+  await checkPackage(tally, browser, editor, folder, page);
+  console.log(`Screenshots are in ${relative(process.cwd(), screenshotFolder)}.`);
 }
 
+const begun = Date.now();
 try {
-  await everything();
+  await within(limitMs, 'The editor suite', everything());
 } catch (error) {
-  console.log(`✗ ${error.message}`);
-  total.failed += 1;
-} finally {
-  await endAll();
+  tally.failed += 1;
+  console.log(`  ✗ ${error.stack ?? error}`);
 }
-console.log(`${total.passed} passed, ${total.failed} failed`);
-process.exit(total.failed === 0 ? 0 : 1);
+await endAll();
+console.log(`The editor suite took ${((Date.now() - begun) / 1000).toFixed(0)} s.`);
+console.log(`${tally.passed} passed, ${tally.failed} failed`);
+process.exit(tally.failed === 0 ? 0 : 1);

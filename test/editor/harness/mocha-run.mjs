@@ -1,5 +1,5 @@
 // Runs the bundled suite inside the extension host of a workbench page and prints its lines.
-import { root, suiteFile } from './paths.mjs';
+import { suiteFile } from './paths.mjs';
 import { within } from './processes.mjs';
 
 /** What the suite puts before its own lines; see suite/run.ts. */
@@ -31,7 +31,7 @@ export class SuiteLog {
   }
 }
 
-export async function runMochaInBrowser(browser, workbench, folder) {
+export async function runMochaInBrowser(browser, workbench, extension, folder) {
   const page = await browser.newPage({ viewport: { width: 1280, height: 900 } });
   const log = new SuiteLog();
   const everything = [];
@@ -47,7 +47,7 @@ export async function runMochaInBrowser(browser, workbench, folder) {
   try {
     await page.goto(
       workbench.urlOf(folder, {
-        extensionDevelopmentPath: workbench.uriOf(root),
+        extensionDevelopmentPath: workbench.uriOf(extension),
         extensionTestsPath: workbench.uriOf(suiteFile),
         enableProposedApi: '',
       }),

@@ -1,4 +1,5 @@
 // What a person does with a workbench page: open a file, look for a squiggle, rest the mouse on a word.
+/* global document, NodeFilter -- functions given to the page run in the browser */
 import { join } from 'node:path';
 
 const patienceMs = 45_000;

@@ -1,9 +1,10 @@
 // The editor's server, and its workbench in a browser page.
-import { cpSync, mkdirSync, mkdtempSync, openSync, rmSync, writeFileSync } from 'node:fs';
+import { cpSync, mkdirSync, mkdtempSync, openSync, rmSync, symlinkSync, writeFileSync } from 'node:fs';
 import { createServer } from 'node:net';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { setTimeout as wait } from 'node:timers/promises';
+import { root } from './paths.mjs';
 import { end, output, start } from './processes.mjs';
 
 const host = '127.0.0.1';
@@ -52,6 +53,18 @@ export function scratchFolder(name) {
 export function workspaceCopy(source) {
   const folder = join(scratchFolder('workspace'), 'notebook');
   cpSync(source, folder, { recursive: true });
+  return folder;
+}
+
+/**
+ * The extension as the editor is to load it. Not the repository itself: the editor lies in its cache folder, and an
+ * editor that finds its own themes inside of the extension under development shows them whatever the settings say.
+ */
+export function extensionFolder() {
+  const folder = scratchFolder('extension');
+  for (const part of ['package.json', 'dist', 'syntaxes', 'client']) {
+    symlinkSync(join(root, part), join(folder, part));
+  }
   return folder;
 }
 
@@ -108,7 +121,7 @@ export class Workbench {
     throw new Error(`The editor's server did not start; see ${join(this.dataFolder, 'server.log')}`);
   }
 
-  /** The editor watches the file: a running page changes with it. */
+  /** Read once, when a page is opened. */
   writeSettings(settings) {
     const user = join(this.dataFolder, 'data', 'User');
     mkdirSync(user, { recursive: true });
@@ -127,6 +140,12 @@ export class Workbench {
   async stop() {
     await end(this.child.pid);
   }
+}
+
+/** The settings of one folder; a page that shows it follows them. */
+export function writeFolderSettings(folder, settings) {
+  mkdirSync(join(folder, '.vscode'), { recursive: true });
+  writeFileSync(join(folder, '.vscode', 'settings.json'), JSON.stringify(settings, null, 2));
 }
 
 /** Installs a packed extension the way a user does, into `extensionsFolder`. */

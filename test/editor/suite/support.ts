@@ -1,12 +1,13 @@
 /** What the tests in the editor share: pages written on the spot, and waiting for what the server says of them. */
 import assert from 'node:assert/strict';
 import {
-  commands,
   extensions,
   languages,
+  Range,
   Uri,
   window,
   workspace,
+  WorkspaceEdit,
   type Diagnostic,
   type TextDocument,
   type TextEditor,
@@ -31,6 +32,20 @@ export async function openPage(name: string, text: string): Promise<TextEditor> 
   const uri = Uri.joinPath(notebookFolder(), 'editor-suite', name);
   await workspace.fs.writeFile(uri, new TextEncoder().encode(text));
   return window.showTextDocument(await workspace.openTextDocument(uri));
+}
+
+/** A page with one block, in which the second carbon atom has five bonds. */
+export const fiveBonds = (label: string, lineEnd = '\n') =>
+  ['# Page', '', '```compound', `label: ${label}`, 'SMILES: CC(C)(C)(C)C', '```', ''].join(lineEnd);
+
+/** Edits as typing does: the file on the disk stays as it is. */
+export async function replace(document: TextDocument, wrong: string, right: string): Promise<void> {
+  const start = document.getText().indexOf(wrong);
+  assert.notEqual(start, -1, `${wrong} is not in ${document.uri.path}`);
+  const edit = new WorkspaceEdit();
+  const range = new Range(document.positionAt(start), document.positionAt(start + wrong.length));
+  edit.replace(document.uri, range, right);
+  assert.ok(await workspace.applyEdit(edit));
 }
 
 /** Asks again and again until there is an answer. */
@@ -68,9 +83,4 @@ export async function noFinding(document: TextDocument, code: string): Promise<v
   await eventually(`an end of ${code} in ${document.uri.path}`, () =>
     findingsIn(document).some((one) => codeOf(one) === code) ? undefined : true,
   );
-}
-
-export async function closeEverything(): Promise<void> {
-  await commands.executeCommand('workbench.action.revertAndCloseActiveEditor');
-  await commands.executeCommand('workbench.action.closeAllEditors');
 }
