@@ -111,7 +111,9 @@ function messageFor(molecule: Molecule, index: number, total: number, usual: rea
   const limit =
     atomicNumber === 7 && charge === 0 ? [3] : isHalogen(atomicNumber) && charge === 0 ? [1] : usual;
   const hydrogenPart =
-    hydrogens === 0 ? '' : `, ${hydrogens === 1 ? 'one of them' : `${numberWords[hydrogens] ?? hydrogens} of them`} to hydrogen`;
+    hydrogens === 0
+      ? ''
+      : `, ${hydrogens === 1 ? 'one of them' : `${numberWords[hydrogens] ?? hydrogens} of them`} to hydrogen`;
   const allowed = limit.map((count) => numberWords[count] ?? count).join(' or ');
   return `This ${name}${sign} has ${counted(bonds)}${hydrogenPart}; ${name}${sign} forms ${allowed}. ${advice(atomicNumber, charge, bonds)}`;
 }

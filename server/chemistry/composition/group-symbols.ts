@@ -1,0 +1,66 @@
+/**
+ * Symbols that line formulas use for groups and ligands, each with the atoms it stands for. Common practice of
+ * organic chemistry; most are in the lists of abbreviations that journals print for their authors.
+ */
+export const groupSymbols: Readonly<Record<string, string>> = {
+  Me: 'CH3',
+  Et: 'C2H5',
+  Pr: 'C3H7',
+  nPr: 'C3H7',
+  'n-Pr': 'C3H7',
+  iPr: 'C3H7',
+  'i-Pr': 'C3H7',
+  cPr: 'C3H5',
+  Bu: 'C4H9',
+  nBu: 'C4H9',
+  'n-Bu': 'C4H9',
+  iBu: 'C4H9',
+  'i-Bu': 'C4H9',
+  sBu: 'C4H9',
+  's-Bu': 'C4H9',
+  tBu: 'C4H9',
+  't-Bu': 'C4H9',
+  Cy: 'C6H11',
+  Cp: 'C5H5',
+  'Cp*': 'C10H15',
+  Ph: 'C6H5',
+  Bn: 'C7H7',
+  Mes: 'C9H11',
+  Tr: 'C19H15',
+  Ac: 'C2H3O',
+  Bz: 'C7H5O',
+  Piv: 'C5H9O',
+  Boc: 'C5H9O2',
+  Cbz: 'C8H7O2',
+  Fmoc: 'C15H11O2',
+  Alloc: 'C4H5O2',
+  Ms: 'CH3SO2',
+  Ts: 'C7H7SO2',
+  Tf: 'CF3SO2',
+  Ns: 'C6H4NSO4',
+  PMB: 'C8H9O',
+  MOM: 'C2H5O',
+  THP: 'C5H9O',
+  TMS: 'C3H9Si',
+  TES: 'C6H15Si',
+  TBS: 'C6H15Si',
+  TBDMS: 'C6H15Si',
+  TIPS: 'C9H21Si',
+  TBDPS: 'C16H19Si',
+  acac: 'C5H7O2',
+  cod: 'C8H12',
+  dba: 'C17H14O',
+  dppf: 'C34H28FeP2',
+  dppe: 'C26H24P2',
+  dppp: 'C27H26P2',
+  py: 'C5H5N',
+  bpy: 'C10H8N2',
+  phen: 'C12H8N2',
+  tfa: 'C2F3O2',
+};
+
+/**
+ * Symbols that are elements too. Actinium and tennessine do not occur in a synthetic notebook, so Ac and Ts are always
+ * the groups; praseodymium does (`Pr(NO3)3`), so Pr is the group only in the company of hydrogen, carbon or a group.
+ */
+export const groupUnlessAlone: ReadonlySet<string> = new Set(['Pr']);
