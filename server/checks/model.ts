@@ -1,8 +1,9 @@
 /** Entries joined with their chemistry, built once for each block and read by every check. */
 import type { Composition } from '../chemistry/composition/composition.ts';
-import type { UnderstoodName } from '../chemistry/nomenclature/reading.ts';
+import type { NameReading, UnderstoodName } from '../chemistry/nomenclature/reading.ts';
+import { compositionOf } from '../chemistry/structure/composition-of.ts';
 import type { Molecule } from '../chemistry/structure/molecule.ts';
-import type { CompoundEntry, Entry, ReactionEntry } from '../notebook/model.ts';
+import type { CompoundEntry, Entry, IsomerStatement, ReactionEntry } from '../notebook/model.ts';
 import type { Settings } from './settings.ts';
 
 /** What the compound block says of its identity, each statement read on its own. */
@@ -15,10 +16,14 @@ export interface CompoundModel {
   /** Canonical SMILES of `structure`. */
   readonly structureSmiles: string | undefined;
   readonly structureComposition: Composition | undefined;
+  /** What reading the name gave, or undefined when there is no name. */
+  readonly nameReading: NameReading | undefined;
   /** From `name`, when it was understood. */
   readonly name: UnderstoodName | undefined;
   /** From `formula`, when it could be read. */
   readonly formula: Composition | undefined;
+  /** How many isomers the entry says it holds; `single` when it does not say. */
+  readonly isomers: IsomerStatement['kind'];
 }
 
 export interface ReactionModel {
@@ -31,5 +36,28 @@ export type EntryModel = CompoundModel | ReactionModel;
 
 /** All entries under one notebook root; files by their path relative to it, `/` between folders. */
 export interface NotebookModel {
-  readonly files: ReadonlyMap<string, readonly Entry[]>;
+  readonly files: ReadonlyMap<string, readonly EntryModel[]>;
+  readonly settings: Settings;
+}
+
+/** Joins an entry with its chemistry. Never throws. */
+export function modelOf(entry: Entry, settings: Settings): EntryModel {
+  return entry.kind === 'reaction' ? { kind: 'reaction', entry, settings } : compoundModel(entry, settings);
+}
+
+function compoundModel(entry: CompoundEntry, settings: Settings): CompoundModel {
+  const structure = entry.smiles?.read.value;
+  const nameReading = entry.name?.read.value;
+  return {
+    kind: 'compound',
+    entry,
+    settings,
+    structure,
+    structureSmiles: undefined,
+    structureComposition: structure && compositionOf(structure),
+    nameReading,
+    name: nameReading?.kind === 'understood' ? nameReading : undefined,
+    formula: entry.formula?.read.value,
+    isomers: entry.isomers?.read.value?.kind ?? 'single',
+  };
 }
