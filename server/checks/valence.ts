@@ -1,0 +1,43 @@
+/** An atom with more bonds than its element can form, in the SMILES or in what the name would mean. */
+import { valenceProblems } from '../chemistry/structure/valence.ts';
+import type { Check } from './finding.ts';
+import { fixInDocument, inDocument } from './shared/values.ts';
+
+export const check: Check = {
+  id: 'valence',
+  group: 'identity',
+  severity: 'error',
+  summary: 'An atom with more bonds than its element can form.',
+  why: 'Such a compound cannot exist, so something was mistyped, and formula and molar mass are wrong with it.',
+  action: 'Look at the underlined atom: a substituent too many, a bond order too high, or a charge left out.',
+  source:
+    'OpenSMILES specification 1.0 (2016), usual valences; IUPAC 2013 recommendations, P-14.1 (bonding numbers).',
+  examples: {
+    bad: [
+      '```compound\nlabel: 1\nSMILES: CC(C)(C)(C)O\n```',
+      '```compound\nlabel: 2\nSMILES: CN(C)(C)C\n```',
+    ],
+    good: [
+      '```compound\nlabel: 1\nSMILES: CC(C)(C)O\n```',
+      '```compound\nlabel: 2\nSMILES: C[N+](C)(C)C.[I-]\n```',
+      '```compound\nlabel: 3\nSMILES: CS(C)(=O)=O\n```',
+    ],
+  },
+  run(model, report) {
+    if (model.kind !== 'compound') return;
+    const { smiles, name } = model.entry;
+    if (smiles !== undefined && model.structure !== undefined) {
+      for (const problem of valenceProblems(model.structure)) {
+        report({ range: inDocument(smiles, problem.range), message: problem.message });
+      }
+    }
+    for (const remark of model.name?.remarks ?? []) {
+      if (remark.kind !== 'valence' || name === undefined) continue;
+      report({
+        range: inDocument(name, remark.range),
+        message: remark.message,
+        fixes: (remark.fixes ?? []).map((fix) => fixInDocument(name, fix)),
+      });
+    }
+  },
+};
