@@ -49,3 +49,6 @@ export const reactionKeys = [
 export type CompoundKey = (typeof compoundKeys)[number];
 export type ReactionKey = (typeof reactionKeys)[number];
 export type FieldKey = CompoundKey | ReactionKey;
+
+/** Keys that may stand in a block any number of times. */
+export const repeatableKeys: ReadonlySet<FieldKey> = new Set<FieldKey>(['allow', 'notes', 'synonyms']);
