@@ -25,11 +25,12 @@ export function maximumMatching(
   const size = adjacency.length;
   const partner = new Array<number>(size).fill(-1);
   matchLeaves(adjacency, partner, optional);
-  let steps = 0;
+  const counter = { steps: 0 };
   for (let root = 0; root < size; root++) {
     if (partner[root] !== -1 || optional?.[root]) continue;
-    steps += augmentFrom(adjacency, partner, root);
-    if (steps > stepLimit) return { partner, complete: false };
+    const path = augmentingPath(adjacency, partner, root, undefined, counter);
+    if (path !== undefined) flip(partner, path);
+    if (counter.steps > stepLimit) return { partner, complete: false };
   }
   return { partner, complete: true };
 }
@@ -61,25 +62,34 @@ function matchLeaves(
   }
 }
 
-/** Looks for an augmenting path from `root`, contracting blossoms, and flips it. Returns the steps it took. */
-function augmentFrom(adjacency: readonly (readonly number[])[], partner: number[], root: number): number {
+/**
+ * Looks for an augmenting path from the free vertex `root` to another one, contracting blossoms. Returns its vertices,
+ * `root` first, or undefined. Vertices in `without` are treated as if they were not there.
+ */
+export function augmentingPath(
+  adjacency: readonly (readonly number[])[],
+  partner: readonly number[],
+  root: number,
+  without?: ReadonlySet<number>,
+  counter: { steps: number } = { steps: 0 },
+): number[] | undefined {
   const size = adjacency.length;
   const base = Array.from({ length: size }, (_, vertex) => vertex);
   const parent = new Array<number>(size).fill(-1);
   const reached = new Uint8Array(size);
   const queue = [root];
   reached[root] = 1;
-  let steps = size;
+  counter.steps += size;
 
   const commonBase = (first: number, second: number): number => {
     const seen = new Set<number>();
     for (let vertex = base[first]!; ; vertex = base[parent[partner[vertex]!]!]!) {
       seen.add(vertex);
-      steps++;
+      counter.steps++;
       if (partner[vertex] === -1) break;
     }
     for (let vertex = base[second]!; ; vertex = base[parent[partner[vertex]!]!]!) {
-      steps++;
+      counter.steps++;
       if (seen.has(vertex)) return vertex;
     }
   };
@@ -91,15 +101,15 @@ function augmentFrom(adjacency: readonly (readonly number[])[], partner: number[
       parent[vertex] = below;
       below = partner[vertex]!;
       vertex = parent[below]!;
-      steps++;
+      counter.steps++;
     }
   };
 
   for (let head = 0; head < queue.length; head++) {
     const vertex = queue[head]!;
     for (const next of adjacency[vertex]!) {
-      steps++;
-      if (base[vertex] === base[next] || partner[vertex] === next) continue;
+      counter.steps++;
+      if (without?.has(next) || base[vertex] === base[next] || partner[vertex] === next) continue;
       if (next === root || (partner[next] !== -1 && parent[partner[next]!] !== -1)) {
         const stem = commonBase(vertex, next);
         const blossom = new Set<number>();
@@ -113,28 +123,32 @@ function augmentFrom(adjacency: readonly (readonly number[])[], partner: number[
             queue.push(inner);
           }
         }
-        steps += size;
+        counter.steps += size;
       } else if (parent[next] === -1) {
         parent[next] = vertex;
-        if (partner[next] === -1) {
-          flip(partner, parent, next);
-          return steps;
-        }
+        if (partner[next] === -1) return pathTo(next, parent, partner);
         reached[partner[next]!] = 1;
         queue.push(partner[next]!);
       }
     }
   }
-  return steps;
+  return undefined;
 }
 
-function flip(partner: number[], parent: readonly number[], end: number): void {
-  let vertex = end;
-  while (vertex !== -1) {
+function pathTo(end: number, parent: readonly number[], partner: readonly number[]): number[] {
+  const path: number[] = [];
+  for (let vertex = end; vertex !== -1;) {
     const before = parent[vertex]!;
-    const next = partner[before]!;
-    partner[vertex] = before;
-    partner[before] = vertex;
-    vertex = next;
+    path.push(vertex, before);
+    vertex = partner[before]!;
+  }
+  return path.reverse();
+}
+
+/** Turns the bonds along a path round: those that were not matched are now. */
+function flip(partner: number[], path: readonly number[]): void {
+  for (let step = 0; step + 1 < path.length; step += 2) {
+    partner[path[step]!] = path[step + 1]!;
+    partner[path[step + 1]!] = path[step]!;
   }
 }

@@ -1,0 +1,101 @@
+/**
+ * A connected part of a structure reduced to what decides sameness: coloured atoms, coloured bonds, and the stated
+ * arrangements. The canonical labelling works on this.
+ */
+import { resonantBonds } from './resonance.ts';
+import type { Molecule, StereoElement } from './molecule.ts';
+
+export interface CanonicalGraph {
+  /** Atoms of the molecule, by vertex. */
+  readonly atoms: readonly number[];
+  /** Initial colour of each vertex; equal colours mean that nothing local tells the atoms apart. */
+  readonly colours: readonly number[];
+  /** Neighbouring vertices with the kind of the bond: its order, or 5 for a resonant one. */
+  readonly links: readonly (readonly { readonly vertex: number; readonly kind: number }[])[];
+  /** With atom indices replaced by vertices. */
+  readonly stereo: readonly StereoElement[];
+}
+
+export const RESONANT = 5;
+
+export interface SamenessOptions {
+  /** Stated arrangements count. Default true. */
+  readonly stereo?: boolean;
+  /** Isotope labels count. Default true. */
+  readonly isotopes?: boolean;
+}
+
+/** The kind of every bond: its order, or RESONANT. */
+export function bondKinds(molecule: Molecule): number[] {
+  const resonant = resonantBonds(molecule);
+  return molecule.bonds.map((bond, index) => (resonant[index] ? RESONANT : bond.order));
+}
+
+/** `members` are the atoms of one connected part; `kinds` as bondKinds gives them. */
+export function canonicalGraph(
+  molecule: Molecule,
+  members: readonly number[],
+  kinds: readonly number[],
+  options: SamenessOptions = {},
+): CanonicalGraph {
+  const whole = members.length === molecule.atoms.length;
+  const vertexOf = new Map<number, number>();
+  if (!whole) members.forEach((atom, vertex) => vertexOf.set(atom, vertex));
+  const vertex = (atom: number) => (whole || atom < 0 ? atom : vertexOf.get(atom)!);
+  const colours = members.map((index) => {
+    const atom = molecule.atoms[index]!;
+    const isotope = options.isotopes === false ? 0 : atom.isotope;
+    // Every member is small: the packing is exact well within 53 bits.
+    return (
+      (((atom.atomicNumber * 512 + isotope) * 64 + (atom.charge + 32)) * 32 + Math.min(atom.hydrogens, 31)) *
+        64 +
+      Math.min(molecule.neighbours[index]!.length, 63)
+    );
+  });
+  const links = members.map((index) =>
+    molecule.neighbours[index]!.map(({ atom, bond }) => ({ vertex: vertex(atom), kind: kinds[bond]! })),
+  );
+  const stereo =
+    options.stereo === false
+      ? []
+      : molecule.stereo
+          .map((element) => renumbered(element, vertex, vertexOf, whole))
+          .filter((element) => element !== undefined);
+  return { atoms: members, colours, links, stereo };
+}
+
+function renumbered(
+  element: StereoElement,
+  vertex: (atom: number) => number,
+  vertexOf: ReadonlyMap<number, number>,
+  whole: boolean,
+): StereoElement | undefined {
+  const place = 'centre' in element ? element.centre : element.ends[0];
+  if (!whole && !vertexOf.has(place)) return undefined;
+  switch (element.kind) {
+    case 'tetrahedral': {
+      const [a, b, c, d] = element.ligands;
+      return {
+        ...element,
+        centre: vertex(element.centre),
+        ligands: [vertex(a), vertex(b), vertex(c), vertex(d)],
+      };
+    }
+    case 'double-bond':
+      return {
+        ...element,
+        ends: [vertex(element.ends[0]), vertex(element.ends[1])],
+        ligands: [vertex(element.ligands[0]), vertex(element.ligands[1])],
+      };
+    case 'axis': {
+      const [a, b, c, d] = element.ligands;
+      return {
+        ...element,
+        ends: [vertex(element.ends[0]), vertex(element.ends[1])],
+        ligands: [vertex(a), vertex(b), vertex(c), vertex(d)],
+      };
+    }
+    default:
+      return { ...element, centre: vertex(element.centre), ligands: element.ligands.map(vertex) };
+  }
+}
