@@ -2,6 +2,8 @@
 import { hillFormula } from '../chemistry/composition/format-formula.ts';
 import { degreeOfUnsaturation, impossibility } from '../chemistry/composition/unsaturation.ts';
 import type { Check } from './finding.ts';
+import { agreeing } from './shared/differences.ts';
+import { witnesses } from './shared/witnesses.ts';
 
 export const check: Check = {
   id: 'formula-impossible',
@@ -20,14 +22,16 @@ export const check: Check = {
   },
   run(model, report) {
     if (model.kind !== 'compound' || model.formula === undefined) return;
-    // A radical drawn on purpose, such as TEMPO, has that formula.
-    if (model.structure !== undefined && model.structureComposition !== undefined) {
-      if (impossibility(model.structureComposition) !== undefined) return;
-    }
-    const reason = impossibility(model.formula);
+    // A radical drawn on purpose, such as TEMPO, has that formula, and so has an ion whose charge was left out.
+    const { formula } = model;
+    if (
+      witnesses(model).some(({ what, composition }) => what !== 'formula' && agreeing(formula, composition))
+    )
+      return;
+    const reason = impossibility(formula);
     if (reason === undefined) return;
-    const written = hillFormula(model.formula);
-    const unsaturation = degreeOfUnsaturation(model.formula);
+    const written = hillFormula(formula);
+    const unsaturation = degreeOfUnsaturation(formula);
     report({
       range: model.entry.formula!.text.range,
       message:

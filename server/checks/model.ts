@@ -3,8 +3,10 @@ import type { Composition } from '../chemistry/composition/composition.ts';
 import type { NameReading, UnderstoodName } from '../chemistry/nomenclature/reading.ts';
 import { compositionOf } from '../chemistry/structure/composition-of.ts';
 import type { Molecule } from '../chemistry/structure/molecule.ts';
-import type { CompoundEntry, Entry, IsomerStatement, ReactionEntry } from '../notebook/model.ts';
+import { readSmiles } from '../chemistry/structure/read-smiles.ts';
+import type { CompoundEntry, Entry, EntryValue, IsomerStatement, ReactionEntry } from '../notebook/model.ts';
 import type { Settings } from './settings.ts';
+import { canonicalSmiles } from '../chemistry/structure/canonical-smiles.ts';
 
 /** What the compound block says of its identity, each statement read on its own. */
 export interface CompoundModel {
@@ -47,17 +49,35 @@ export function modelOf(entry: Entry, settings: Settings): EntryModel {
 
 function compoundModel(entry: CompoundEntry, settings: Settings): CompoundModel {
   const structure = entry.smiles?.read.value;
-  const nameReading = entry.name?.read.value;
+  const nameReading = entry.name && understoodWith(settings, entry.name);
+  let key: string | undefined;
   return {
     kind: 'compound',
     entry,
     settings,
     structure,
-    structureSmiles: undefined,
+    // The canonical form is dear, and most entries never ask for it.
+    get structureSmiles() {
+      return structure && (key ??= canonicalSmiles(structure));
+    },
     structureComposition: structure && compositionOf(structure),
     nameReading,
     name: nameReading?.kind === 'understood' ? nameReading : undefined,
     formula: entry.formula?.read.value,
     isomers: entry.isomers?.read.value?.kind ?? 'single',
+  };
+}
+
+/** What the name engine read; a name that it does not know may be one of the laboratory's own words. */
+function understoodWith(settings: Settings, name: EntryValue<NameReading>): NameReading | undefined {
+  const reading = name.read.value;
+  const word = name.text.text;
+  if (reading?.kind !== 'unknown' || !Object.hasOwn(settings.vocabulary, word)) return reading;
+  const molecule = readSmiles(settings.vocabulary[word]!).value;
+  if (molecule === undefined) return reading;
+  return {
+    kind: 'understood',
+    readings: [{ name: word, molecule, stereoisomers: [] }],
+    remarks: [],
   };
 }

@@ -1,7 +1,8 @@
 /** An atom with more bonds than its element can form, in the SMILES or in what the name would mean. */
 import { valenceProblems } from '../chemistry/structure/valence.ts';
 import type { Check } from './finding.ts';
-import { fixInDocument, inDocument } from './shared/values.ts';
+import { reportRemarks } from './shared/name-remarks.ts';
+import { inDocument } from './shared/values.ts';
 
 export const check: Check = {
   id: 'valence',
@@ -23,21 +24,14 @@ export const check: Check = {
       '```compound\nlabel: 3\nSMILES: CS(C)(=O)=O\n```',
     ],
   },
-  run(model, report) {
+  run(model, report, toolkit) {
     if (model.kind !== 'compound') return;
-    const { smiles, name } = model.entry;
+    const { smiles } = model.entry;
     if (smiles !== undefined && model.structure !== undefined) {
       for (const problem of valenceProblems(model.structure)) {
         report({ range: inDocument(smiles, problem.range), message: problem.message });
       }
     }
-    for (const remark of model.name?.remarks ?? []) {
-      if (remark.kind !== 'valence' || name === undefined) continue;
-      report({
-        range: inDocument(name, remark.range),
-        message: remark.message,
-        fixes: (remark.fixes ?? []).map((fix) => fixInDocument(name, fix)),
-      });
-    }
+    reportRemarks('valence')(model, report, toolkit);
   },
 };
