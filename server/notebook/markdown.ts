@@ -1,7 +1,7 @@
 /** From a Markdown document to its `compound` and `reaction` blocks. All else in the document is left alone. */
-import { findFences } from './fences.ts';
+import { findFences, type Fence } from './fences.ts';
 import { firstInfoWord } from './info-string.ts';
-import type { Block, BlockKind } from './model.ts';
+import type { Block, BlockKind, BlockLayout } from './model.ts';
 
 /** Where a block can begin at all; `&` begins a character reference, which may stand for a letter. */
 const opening = /(?:`{3}|~{3})[ \t]*(?:compound|reaction|&)/;
@@ -20,6 +20,7 @@ export function findBlocks(text: string): Block[] {
       lines: fence.lines,
       text: fence.lines.map((line) => line.text).join('\n'),
       closed: fence.closed,
+      layout: layoutOf(text, fence),
     });
   }
   return blocks;
@@ -27,4 +28,22 @@ export function findBlocks(text: string): Block[] {
 
 function isBlockKind(word: string): word is BlockKind {
   return word === 'compound' || word === 'reaction';
+}
+
+function layoutOf(text: string, fence: Fence): BlockLayout {
+  // A blank line may stand there without the marks of its containers.
+  const line = fence.lines.find((each) => each.text.trim() !== '');
+  const linePrefix =
+    line === undefined
+      ? text.slice(lineStartOf(text, fence.start), fence.start).replace(/[^\s>]/g, ' ')
+      : text.slice(lineStartOf(text, line.offset), line.offset);
+  const { infoEnd } = fence;
+  const lineBreak = /^(?:\r\n?|\n)/.exec(text.slice(infoEnd, infoEnd + 2))?.[0] ?? '\n';
+  return { linePrefix, lineBreak, openingLength: infoEnd - fence.start };
+}
+
+function lineStartOf(text: string, offset: number): number {
+  let at = offset;
+  while (at > 0 && !'\n\r'.includes(text[at - 1]!)) at--;
+  return at === 0 && text.charCodeAt(0) === 0xfeff ? 1 : at;
 }

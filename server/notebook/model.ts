@@ -27,6 +27,16 @@ export interface ContentLine {
   readonly offset: number;
 }
 
+/** How a line is added to a block so that it stays in its list, quote and file. */
+export interface BlockLayout {
+  /** What begins each line of the block: quote marks and the indentation of lists and of the fence. */
+  readonly linePrefix: string;
+  /** `\n`, `\r\n` or `\r`. */
+  readonly lineBreak: string;
+  /** Characters from the opening fence to the end of its line. */
+  readonly openingLength: number;
+}
+
 /** A fenced code block whose info string begins with `compound` or `reaction`. */
 export interface Block {
   readonly kind: BlockKind;
@@ -39,6 +49,8 @@ export interface Block {
   readonly text: string;
   /** False when the document ended before the fence was closed. */
   readonly closed: boolean;
+  /** Of a block that stands in a document. */
+  readonly layout?: BlockLayout;
 }
 
 /** One `key: value` of a block. */
