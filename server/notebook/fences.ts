@@ -75,6 +75,8 @@ class FenceScanner {
   /** Indices of the quotes among `containers`. */
   private readonly quotes: number[] = [];
   private leaf: Leaf = noLeaf;
+  /** The character that last stood in the way of a thematic break: a line of list markers is scanned once. */
+  private obstacle = { for: 0, at: -1 };
 
   constructor(text: string) {
     this.text = text;
@@ -286,11 +288,17 @@ class FenceScanner {
   private isThematicBreak(first: number): boolean {
     if (first !== hyphen && first !== asterisk && first !== underscore) return false;
     const { cursor, text } = this;
+    const { obstacle } = this;
+    if (obstacle.for === first && obstacle.at >= cursor.nonSpace && obstacle.at < cursor.end) return false;
     let count = 0;
     for (let at = cursor.nonSpace; at < cursor.end; at++) {
       const here = text.charCodeAt(at);
-      if (here === first) count++;
-      else if (!isSpaceOrTab(here)) return false;
+      if (here === first) {
+        count++;
+      } else if (!isSpaceOrTab(here)) {
+        this.obstacle = { for: first, at };
+        return false;
+      }
     }
     return count >= 3;
   }

@@ -1,0 +1,126 @@
+import { describe, expect, it } from 'vitest';
+import { findBlocks } from '../../../server/notebook/markdown.ts';
+import { marked, withMarks } from './marked.ts';
+
+/** Where the lines of all blocks lie. */
+function lineMarks(text: string): string {
+  return withMarks(
+    text,
+    findBlocks(text).flatMap(({ lines }) =>
+      lines.map(({ text: line, offset }) => ({ start: offset, end: offset + line.length })),
+    ),
+  );
+}
+
+describe('which fences are blocks', () => {
+  it.each([
+    ['```compound\n```', 'compound'],
+    ['~~~ reaction\n~~~', 'reaction'],
+    ['``` \t compound of the day\n```', 'compound'],
+    ['~~~compound `x`\n~~~', 'compound'],
+    ['```&#99;ompound\n```', 'compound'],
+    ['```&#x63;ompound&Tab;x\n```', 'compound'],
+    ['   ```compound\n```', 'compound'],
+    ['- ```compound\n  ```', 'compound'],
+    ['> 1. ~~~reaction\n>    ~~~', 'reaction'],
+  ])('%j', (text, kind) => {
+    expect(findBlocks(text).map((block) => block.kind)).toEqual([kind]);
+  });
+
+  it.each([
+    '```compounds\n```',
+    '```Compound\n```',
+    '```js compound\n```',
+    '```\\compound\n```',
+    '```\\&#99;ompound\n```',
+    '``compound\n``',
+    '    ```compound\n    ```',
+    '<div>\n```compound\n```\n</div>',
+    '<!--\n```compound\n```\n-->',
+    '````\n```compound\n```\n````',
+    '```compound`\n```',
+    '~~~js\n```compound\nlabel: 1\n```\n~~~',
+  ])('none in %j', (text) => {
+    expect(findBlocks(text)).toEqual([]);
+  });
+});
+
+describe('where a block lies', () => {
+  it.each([
+    'text\n\n⟦~~~ ⟦compound⟧ x\nlabel: 1\n~~~⟧  \n',
+    '> ⟦```⟦compound⟧\n> label: 1\n> ```⟧\n',
+    '⟦```⟦compound⟧\nlabel: 1\n`````⟧',
+    '⟦```⟦compound⟧\nlabel: 1⟧\n',
+    '⟦```⟦compound⟧⟧',
+    '- ⟦```⟦reaction⟧\n  scheme: 1 -> 2\n⟧\ntext',
+  ])('%j', (source) => {
+    const inner = marked(source.replace(/^([^⟦]*)⟦([^]*)⟧([^⟧]*)$/, '$1$2$3'));
+    const outer = marked(source.replace(/^([^⟦]*⟦[^⟦]*)⟦([^⟧]*)⟧/, '$1$2'));
+    const [block] = findBlocks(outer.text);
+    expect(block?.range).toEqual(outer.ranges[0]);
+    expect(block?.kindRange).toEqual(inner.ranges[0]);
+  });
+
+  it.each([
+    '```compound\n⟦label: 1⟧\n⟦⟧\n⟦  x⟧\n```\n',
+    '```compound\r\n⟦label: 1⟧\r\n⟦name: anisole⟧\r\n```\r\n',
+    '```compound\r⟦label: 1⟧\r⟦name: anisole⟧\r```\r',
+    '\ufeff```compound\n⟦label: 1⟧\n```',
+    '  ```compound\n  ⟦label: 1⟧\n ⟦name: x⟧\n  ⟦  y⟧\n  ```',
+    '> ```compound\n>⟦label: 1⟧\n> ⟦name: x⟧\n>   ⟦  y⟧\n> ```'.replace('>   ⟦  y', '> ⟦    y'),
+    '1. text\n\n   ```compound\n   ⟦label: 1⟧\n⟦⟧\n     ⟦name: x⟧\n   ```'.replace(
+      '     ⟦name',
+      '   ⟦  name',
+    ),
+    // The tab after the quote mark is a space and two columns of indentation.
+    '> ```compound\n>⟦\tlabel: 1⟧\n> ```',
+    '-\t```compound\n\t⟦label: 1⟧\n\t```',
+    '- ```compound\n⟦\tlabel: 1⟧\n  ```',
+    '```compound\n⟦a\u0000b: 😀⟧\n⟦e\u0301: x⟧\n```',
+  ])('lines of %j', (source) => {
+    expect(lineMarks(marked(source).text)).toBe(source);
+  });
+});
+
+describe('how a block ends', () => {
+  it.each([
+    ['```compound\nlabel: 1', false],
+    ['```compound\nlabel: 1\n~~~\n', false],
+    ['````compound\nlabel: 1\n```\n', false],
+    ['> ```compound\n> label: 1\n\n```', false],
+    ['```compound\nlabel: 1\n``` x\n', false],
+    ['```compound\nlabel: 1\n```', true],
+    ['```compound\nlabel: 1\n   `````  \n', true],
+  ])('%j', (text, closed) => {
+    expect(findBlocks(text)[0]?.closed).toBe(closed);
+  });
+});
+
+describe('how a line is added', () => {
+  it.each([
+    ['```compound\nlabel: 1\n```', '', '\n'],
+    ['> > ```compound\r\n> > label: 1\r\n> > ```', '> > ', '\r\n'],
+    ['1. ```compound\n   label: 1\n   ```', '   ', '\n'],
+    ['> - ```compound\n>   ```', '>   ', '\n'],
+    ['  ```compound\r  ```', '  ', '\r'],
+    ['\ufeff```compound', '', '\n'],
+    ['> ```compound\n>\n> label: 1\n> ```', '> ', '\n'],
+  ])('%j', (text, linePrefix, lineBreak) => {
+    expect(findBlocks(text)[0]?.layout).toMatchObject({ linePrefix, lineBreak });
+  });
+});
+
+it('takes deep and long documents', () => {
+  const depth = 20_000;
+  for (const text of [
+    '> '.repeat(depth),
+    `${'- '.repeat(depth)}x\n${'\n'.repeat(depth)}`,
+    `${'> '.repeat(depth)}\n${'> '.repeat(depth)}`,
+    '[a]: /u\n'.repeat(depth),
+    '['.repeat(depth) + '\n===\n',
+    `<a${' b'.repeat(depth)}\n`,
+    '1) '.repeat(depth),
+  ]) {
+    expect(findBlocks(`${text}\n\n\n\`\`\`compound\nlabel: 1\n`).length).toBeLessThan(2);
+  }
+});
