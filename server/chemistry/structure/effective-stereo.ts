@@ -131,6 +131,7 @@ function hasSymmetry(
   const ownColours = [...new Set(graph.colours)].sort((first, second) => first - second);
   const colourOf = new Map(ownColours.map((colour, index) => [colour, index]));
   const fixed = [place!, ...molecule.stereo.flatMap(placesOf)];
+  if (from.some((ligand, index) => ligand !== to[index] && fixed.includes(ligand))) return false;
   const marked = (atoms: readonly number[]) => {
     const colours = graph.colours.map((colour) => colourOf.get(colour)!);
     [...fixed, ...atoms].forEach((atom, index) => {
