@@ -4,6 +4,7 @@
  * check's business. One pass over the characters, then the delocalised rings, the implied hydrogens and the
  * arrangement in space; no recursion, so the length of a text is not limited by the stack.
  */
+import { elementWithSymbol } from '../composition/elements.ts';
 import { problemAt, range, type Problem, type Read } from '../text.ts';
 import { type Atom, type Bond, type BondOrder, type Molecule, MoleculeBuilder } from './molecule.ts';
 import { readBracketAtom } from './read-bracket-atom.ts';
@@ -188,6 +189,9 @@ function readGraph(text: string, start: number, end: number, draft: SmilesDraft)
         return problemAt(at, at + 1, 'A branch needs an atom before it; move the parenthesis behind an atom.')
           .problem;
       }
+      if (branches.at(-1)?.atomsBefore === builder.atoms.length) {
+        return problemAt(at, at + 1, 'A branch begins with an atom; delete one pair of parentheses.').problem;
+      }
       if (symbol !== undefined) {
         return problemAt(
           symbol.at,
@@ -257,10 +261,14 @@ function unexpected(text: string, at: number, end: number): Problem {
   if (shown === ']')
     return problemAt(at, at + 1, 'This bracket closes an atom that was never opened.').problem;
   if (/^[A-Za-z]$/.test(shown)) {
-    const two = /^[A-Z][a-z]/.exec(text.slice(at, at + 2))?.[0] ?? shown;
+    // The capital before it may have been read as an atom of its own: Na, Si.
+    const before =
+      /^[A-Z][a-z]$/.test(text.slice(at - 1, at + 1)) && elementWithSymbol(text.slice(at - 1, at + 1));
+    const start = before ? at - 1 : at;
+    const two = /^[A-Z][a-z]/.exec(text.slice(start, start + 2))?.[0] ?? shown;
     return problemAt(
-      at,
-      at + two.length,
+      start,
+      start + two.length,
       `“${two}” cannot stand here without brackets; only B, C, N, O, P, S, F, Cl, Br, I and their aromatic lower-case forms can. Write it as a bracket atom, such as [${two}].`,
     ).problem;
   }
