@@ -3,7 +3,7 @@ import type { TextRange } from '../chemistry/text.ts';
 import type { EntryValue } from '../notebook/model.ts';
 import type { Check } from './finding.ts';
 import type { CompoundModel } from './model.ts';
-import { definiteStructure, leavesStereoOpenOnPurpose } from './shared/identity.ts';
+import { definiteStructure, factsAsDrawn, leavesStereoOpenOnPurpose } from './shared/identity.ts';
 import {
   areMirrorImages,
   firstDifference,
@@ -45,6 +45,12 @@ export const check: Check = {
     if (computed === undefined || typeof facts === 'string') return;
     const kind = firstDifference(recorded, computed);
     if (kind === undefined || (kind === 'stereo' && isByConvention(model, recorded, computed))) return;
+    if (kind === 'stereo') {
+      const asDrawn = factsAsDrawn(structure, toolkit);
+      if (asDrawn === 'pending') return;
+      const drawn = asDrawn === 'unavailable' ? undefined : readInchi(asDrawn.inchi);
+      if (drawn !== undefined && firstDifference(recorded, drawn) === undefined) return;
+    }
     const place = rangeOf(recorded, kind);
     const onlyOpen = kind === 'stereo' && (isOpen(recorded) || isOpen(computed));
     report({

@@ -1,8 +1,19 @@
 /** Recorded InChIKey against the structure. */
+import { canonicalSmiles } from '../chemistry/structure/canonical-smiles.ts';
+import { enumerateStereoisomers } from '../chemistry/structure/stereoisomers.ts';
+import type { ToolkitFactsOf } from './facts.ts';
 import type { Check } from './finding.ts';
-import { definiteStructure, leavesStereoOpenOnPurpose } from './shared/identity.ts';
+import {
+  definiteStructure,
+  factsAsDrawn,
+  leavesStereoOpenOnPurpose,
+  type DefiniteStructure,
+} from './shared/identity.ts';
 import { mirrorImageSmiles } from './shared/mirror-image.ts';
 import { inDocument, replacement } from './shared/values.ts';
+
+/** Stereoisomers whose keys are looked up. */
+const mostAsked = 16;
 
 /** Hash of the layers that are not there: neither stereo nor isotopes. */
 const noStereo = 'UHFFFAOY';
@@ -60,15 +71,20 @@ export const check: Check = {
       });
       return;
     }
+    const asDrawn = factsAsDrawn(structure, toolkit);
+    if (asDrawn === 'pending' || (asDrawn !== 'unavailable' && asDrawn.inchiKey === recorded)) return;
     const mirror = toolkit(mirrorImageSmiles(structure.molecule));
     if (mirror === 'pending') return;
     const isMirror = mirror !== 'unavailable' && mirror.inchiKey === recorded;
-    const open = stated.stereo === noStereo || computed.stereo === noStereo;
+    const isPossible =
+      computed.stereo === noStereo ? isOfOneStereoisomer(recorded, structure, toolkit) : false;
+    if (isPossible === 'pending') return;
+    const open = stated.stereo === noStereo || isPossible;
     if ((open || isMirror) && leavesStereoOpenOnPurpose(model)) return;
     report({
       range: part(15, 8),
       ...(open ? { severity: 'warning' as const } : {}),
-      message: `The skeleton is right; ${stereoDifference(stated.stereo, computed.stereo, isMirror, structure.from)} ${lookedUp}`,
+      message: `The skeleton is right; ${stereoDifference(stated.stereo, isPossible, isMirror, structure.from)} ${lookedUp}`,
       fixes,
     });
   },
@@ -81,9 +97,22 @@ function partsOf(key: string) {
     : { skeleton: match[1]!, stereo: match[2]!, standard: match[3] === 'S', protonation: match[4]! };
 }
 
-function stereoDifference(stated: string, computed: string, isMirror: boolean, from: string): string {
+/** Whether the key is that of a stereoisomer which the structure leaves open; true when they are too many to ask. */
+function isOfOneStereoisomer(
+  key: string,
+  { molecule }: DefiniteStructure,
+  toolkit: ToolkitFactsOf,
+): boolean | 'pending' {
+  const { isomers, count } = enumerateStereoisomers(molecule, mostAsked);
+  if (count === undefined || count > isomers.length) return true;
+  const facts = isomers.map((isomer) => toolkit(canonicalSmiles(isomer)));
+  if (facts.includes('pending')) return 'pending';
+  return facts.some((each) => typeof each !== 'string' && each.inchiKey === key);
+}
+
+function stereoDifference(stated: string, isPossible: boolean, isMirror: boolean, from: string): string {
   if (isMirror) return `this key is that of the mirror image of the ${from}.`;
   if (stated === noStereo) return `this key states no stereo, the ${from} does.`;
-  if (computed === noStereo) return `this key states stereo or isotopes which the ${from} leaves open.`;
-  return `stereo or isotopes are other than those of the ${from}.`;
+  if (isPossible) return `this key is that of one stereoisomer, and the ${from} leaves open which.`;
+  return `this key is of no stereoisomer or labelled form that the ${from} allows.`;
 }

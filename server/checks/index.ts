@@ -21,6 +21,9 @@ import { check as nameStructureMismatch } from './name-structure-mismatch.ts';
 import { check as nameUnknown } from './name-unknown.ts';
 import { check as repeatedField } from './repeated-field.ts';
 import { check as smilesSyntax } from './smiles-syntax.ts';
+import { check as stereoMeaningless } from './stereo-meaningless.ts';
+import { check as stereoMismatch } from './stereo-mismatch.ts';
+import { check as stereoUnspecified } from './stereo-unspecified.ts';
 import { check as unknownField } from './unknown-field.ts';
 import { check as valence } from './valence.ts';
 
@@ -46,6 +49,9 @@ export const checks: readonly Check[] = [
   nameAmbiguous,
   nameImproper,
   nameStructureMismatch,
+  stereoUnspecified,
+  stereoMismatch,
+  stereoMeaningless,
   formulaOnly,
   labelRepeated,
 ];

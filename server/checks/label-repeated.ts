@@ -21,10 +21,7 @@ export const check: Check = {
     const files = [...notebook.files.keys()].sort();
     for (const file of files) {
       if (notebook.settings.labelScope === 'file') first = new Map();
-      const models = [...notebook.files.get(file)!].sort(
-        (a, b) => a.entry.block.range.start - b.entry.block.range.start,
-      );
-      for (const { entry } of models) {
+      for (const { entry } of notebook.files.get(file)!) {
         const label = entry.label?.read.value;
         if (label === undefined || label === '') continue;
         const { range } = entry.label!.text;

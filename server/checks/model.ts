@@ -4,6 +4,7 @@ import type { NameReading, UnderstoodName } from '../chemistry/nomenclature/read
 import { compositionOf } from '../chemistry/structure/composition-of.ts';
 import type { Molecule } from '../chemistry/structure/molecule.ts';
 import { readSmiles } from '../chemistry/structure/read-smiles.ts';
+import { enumerateStereoisomers, type StereoisomerList } from '../chemistry/structure/stereoisomers.ts';
 import type { CompoundEntry, Entry, EntryValue, IsomerStatement, ReactionEntry } from '../notebook/model.ts';
 import type { Settings } from './settings.ts';
 import { canonicalSmiles } from '../chemistry/structure/canonical-smiles.ts';
@@ -18,6 +19,8 @@ export interface CompoundModel {
   /** Canonical SMILES of `structure`. */
   readonly structureSmiles: string | undefined;
   readonly structureComposition: Composition | undefined;
+  /** The stereoisomers that `structure` leaves possible; ranges and numbering are those of its normal spelling. */
+  readonly stereo: StereoisomerList | undefined;
   /** What reading the name gave, or undefined when there is no name. */
   readonly nameReading: NameReading | undefined;
   /** From `name`, when it was understood. */
@@ -36,11 +39,17 @@ export interface ReactionModel {
 
 export type EntryModel = CompoundModel | ReactionModel;
 
-/** All entries under one notebook root; files by their path relative to it, `/` between folders. */
+/**
+ * All entries under one notebook root; files by their path relative to it, `/` between folders. The entries of a file
+ * stand in its order.
+ */
 export interface NotebookModel {
   readonly files: ReadonlyMap<string, readonly EntryModel[]>;
   readonly settings: Settings;
 }
+
+/** Stereoisomers listed for one structure; their number is known beyond that. */
+const mostStereoisomers = 32;
 
 /** Joins an entry with its chemistry. Never throws. */
 export function modelOf(entry: Entry, settings: Settings): EntryModel {
@@ -51,16 +60,20 @@ function compoundModel(entry: CompoundEntry, settings: Settings): CompoundModel 
   const structure = entry.smiles?.read.value;
   const nameReading = entry.name && understoodWith(settings, entry.name);
   let key: string | undefined;
+  let stereo: StereoisomerList | undefined;
   return {
     kind: 'compound',
     entry,
     settings,
     structure,
-    // The canonical form is dear, and most entries never ask for it.
+    // The canonical form and the stereoisomers are dear, and most entries never ask for them.
     get structureSmiles() {
       return structure && (key ??= canonicalSmiles(structure));
     },
     structureComposition: structure && compositionOf(structure),
+    get stereo() {
+      return structure && (stereo ??= enumerateStereoisomers(structure, mostStereoisomers));
+    },
     nameReading,
     name: nameReading?.kind === 'understood' ? nameReading : undefined,
     formula: entry.formula?.read.value,
