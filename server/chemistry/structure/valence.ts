@@ -49,6 +49,7 @@ function countBonds(molecule: Molecule, index: number): number | undefined {
     const other = molecule.atoms[neighbour.atom]!.atomicNumber;
     // A ligand may give a metal its lone pair without a charge being written for it.
     if (order === 0 || isMetal(other)) return undefined;
+    if (other === 1 && molecule.neighbours[neighbour.atom]!.length > 1) return undefined;
     if (other === 5) borons++;
     bonds += order;
   }
