@@ -4,7 +4,21 @@
  * that, so it is not looked at.
  */
 import { endsAtBlankLine, htmlBlockEnds, htmlBlockStart, type HtmlBlockKind } from './html-block.ts';
-import { isSpaceOrTab, LineCursor } from './line-cursor.ts';
+import { LineCursor } from './line-cursor.ts';
+import {
+  backtick,
+  endOfRun,
+  greaterThan,
+  hash,
+  isBlank,
+  isHeading,
+  isUnderline,
+  lessThan,
+  lineFeed,
+  listMarkerLength,
+  thematicBreakObstacle,
+  tilde,
+} from './line-starts.ts';
 import type { ContentLine } from './model.ts';
 import { isReferenceDefinitions } from './reference-definitions.ts';
 
@@ -46,21 +60,6 @@ type Leaf =
 
 const noLeaf: Leaf = { kind: 'none' };
 const indentedCode: Leaf = { kind: 'indented' };
-
-const code = (character: string) => character.charCodeAt(0);
-const greaterThan = code('>');
-const lessThan = code('<');
-const hash = code('#');
-const backtick = code('`');
-const tilde = code('~');
-const hyphen = code('-');
-const asterisk = code('*');
-const plus = code('+');
-const underscore = code('_');
-const equals = code('=');
-const zero = code('0');
-const nine = code('9');
-const lineFeed = 0x0a;
 
 /** All fenced code blocks, in the order of the text. */
 export function findFences(text: string): readonly Fence[] {
@@ -171,8 +170,8 @@ class FenceScanner {
     const { cursor, text } = this;
     const fenceCode = text.charCodeAt(fence.start);
     if (cursor.indent <= 3 && text.charCodeAt(cursor.nonSpace) === fenceCode) {
-      const runEnd = this.endOfRun(cursor.nonSpace, fenceCode);
-      if (runEnd - cursor.nonSpace >= fence.infoStart - fence.start && this.isBlankFrom(runEnd)) {
+      const runEnd = endOfRun(text, cursor.nonSpace, cursor.end, fenceCode);
+      if (runEnd - cursor.nonSpace >= fence.infoStart - fence.start && isBlank(text, runEnd, cursor.end)) {
         this.finishFence(fence, runEnd, true);
         this.leaf = noLeaf;
         return;
@@ -219,7 +218,7 @@ class FenceScanner {
         this.skipQuoteMark();
         continue;
       }
-      if (first === hash && this.isHeading()) {
+      if (first === hash && isHeading(text, cursor)) {
         begin(noLeaf);
         return true;
       }
@@ -237,7 +236,7 @@ class FenceScanner {
         begin(htmlBlockEnds(html, rest) ? noLeaf : { kind: 'html', html });
         return true;
       }
-      if (inParagraph && this.isSetextUnderline(first)) {
+      if (inParagraph && this.isSetextUnderline()) {
         begin(noLeaf);
         return true;
       }
@@ -245,7 +244,7 @@ class FenceScanner {
         begin(noLeaf);
         return true;
       }
-      const marker = this.listMarkerLength(first, inParagraph);
+      const marker = listMarkerLength(text, cursor, inParagraph);
       if (marker === 0) return leaveText(mayBeLazy);
       const indent = cursor.indent;
       cursor.skipMarker(marker);
@@ -261,78 +260,30 @@ class FenceScanner {
     this.cursor.skipColumns(1);
   }
 
-  private isHeading(): boolean {
-    const { cursor, text } = this;
-    const after = this.endOfRun(cursor.nonSpace, hash);
-    return after - cursor.nonSpace <= 6 && (after === cursor.end || isSpaceOrTab(text.charCodeAt(after)));
-  }
-
   private openFence(fenceCode: number): OpenFence | undefined {
     const { cursor, text } = this;
     const start = cursor.nonSpace;
-    const infoStart = this.endOfRun(start, fenceCode);
+    const infoStart = endOfRun(text, start, cursor.end, fenceCode);
     if (infoStart - start < 3) return undefined;
     if (fenceCode === backtick && text.slice(infoStart, cursor.end).includes('`')) return undefined;
     return { start, infoStart, infoEnd: cursor.end, lines: [], indent: cursor.indent };
   }
 
-  private isSetextUnderline(first: number): boolean {
+  private isSetextUnderline(): boolean {
     const { cursor, text, leaf } = this;
-    if (first !== equals && first !== hyphen) return false;
-    if (!this.isBlankFrom(this.endOfRun(cursor.nonSpace, first))) return false;
+    if (!isUnderline(text, cursor)) return false;
     if (leaf.kind !== 'paragraph' || text[leaf.start] !== '[') return true;
     // Link reference definitions are no paragraph, so there is nothing to make a heading of.
     return !isReferenceDefinitions(this.paragraphText(leaf.start));
   }
 
   private isThematicBreak(first: number): boolean {
-    if (first !== hyphen && first !== asterisk && first !== underscore) return false;
-    const { cursor, text } = this;
-    const { obstacle } = this;
+    const { obstacle, cursor } = this;
     if (obstacle.for === first && obstacle.at >= cursor.nonSpace && obstacle.at < cursor.end) return false;
-    let count = 0;
-    for (let at = cursor.nonSpace; at < cursor.end; at++) {
-      const here = text.charCodeAt(at);
-      if (here === first) {
-        count++;
-      } else if (!isSpaceOrTab(here)) {
-        this.obstacle = { for: first, at };
-        return false;
-      }
-    }
-    return count >= 3;
-  }
-
-  /** How many characters the list marker has that stands here, or 0. */
-  private listMarkerLength(first: number, inParagraph: boolean): number {
-    const { cursor, text } = this;
-    const start = cursor.nonSpace;
-    let end = start;
-    if (first === hyphen || first === asterisk || first === plus) {
-      end = start + 1;
-    } else if (first >= zero && first <= nine) {
-      while (end - start < 10 && text.charCodeAt(end) >= zero && text.charCodeAt(end) <= nine) end++;
-      if (end - start > 9 || (text[end] !== '.' && text[end] !== ')')) return 0;
-      if (inParagraph && Number(text.slice(start, end)) !== 1) return 0;
-      end++;
-    } else {
-      return 0;
-    }
-    if (end < cursor.end && !isSpaceOrTab(text.charCodeAt(end))) return 0;
-    if (inParagraph && this.isBlankFrom(end)) return 0;
-    return end - start;
-  }
-
-  private endOfRun(start: number, runCode: number): number {
-    let at = start;
-    while (at < this.cursor.end && this.text.charCodeAt(at) === runCode) at++;
-    return at;
-  }
-
-  private isBlankFrom(start: number): boolean {
-    let at = start;
-    while (at < this.cursor.end && isSpaceOrTab(this.text.charCodeAt(at))) at++;
-    return at === this.cursor.end;
+    const at = thematicBreakObstacle(this.text, cursor);
+    if (at === undefined) return true;
+    this.obstacle = { for: first, at };
+    return false;
   }
 
   /** The open paragraph without the marks of its containers, up to the line before this one. */

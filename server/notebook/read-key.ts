@@ -6,10 +6,14 @@ import type { BlockKind } from './model.ts';
 
 /** Case, white space, full stops, hyphens and the position of small digits make no difference. */
 export function normalizedKey(keyText: string): string {
-  return keyText
-    .normalize('NFKC')
+  return compatible(keyText)
     .toLowerCase()
     .replace(/[\s.\-‐‑–_]/g, '');
+}
+
+/** Compatibility forms are costly to look for, and plain text has none. */
+function compatible(text: string): string {
+  return /^[ -~]*$/.test(text) ? text : text.normalize('NFKC');
 }
 
 function spellings(
@@ -20,7 +24,8 @@ function spellings(
   for (const key of keys) {
     for (const alias of aliases[key] ?? []) known.set(alias, key);
   }
-  for (const key of keys) known.set(normalizedKey(key), key);
+  // As written in the list of keys it is found without normalizing.
+  for (const key of keys) known.set(normalizedKey(key), key).set(key, key);
   return known;
 }
 
@@ -37,6 +42,8 @@ const refractionKey = /^n(?:\d{2}d|d\d{2})(?:°?c)?$/;
 export function readKey(kind: BlockKind, keyText: string): FieldKey | undefined {
   // A key is a word or two; only long prose gets here otherwise.
   if (keyText.length > 80) return undefined;
+  const asListed = spellingsOf[kind].get(keyText);
+  if (asListed !== undefined) return asListed;
   const normalized = normalizedKey(keyText);
   const known = spellingsOf[kind].get(normalized);
   if (known !== undefined) return known;
@@ -56,7 +63,7 @@ export function nearestKey(kind: BlockKind, keyText: string): FieldKey | undefin
   for (const [spelling, key] of spellingsOf[kind]) {
     // Short aliases are near to anything.
     if (spelling.length < 3 && normalizedKey(key) !== spelling) continue;
-    const distance = leven(normalized, spelling);
+    const distance = leven(normalized, spelling, { maxDistance: bestDistance });
     if (distance < bestDistance) {
       best = key;
       bestDistance = distance;

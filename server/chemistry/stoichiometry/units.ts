@@ -70,7 +70,10 @@ export function normalizedUnit(text: string): string {
 
 /** The unit that a text spells, of one of the kinds; undefined when it spells none. */
 export function unitOf(text: string, kinds: readonly UnitKind[]): Unit | undefined {
-  const spelling = normalizedUnit(text);
+  return unitSpelt(text, kinds) ?? unitSpelt(normalizedUnit(text), kinds);
+}
+
+function unitSpelt(spelling: string, kinds: readonly UnitKind[]): Unit | undefined {
   for (const kind of kinds) {
     for (const unit of units[kind]) {
       if (unit.spellings.includes(spelling)) return unit;
