@@ -1,142 +1,110 @@
 /**
- * Keys for rules 3, 4 and 5 (P-92.4 to P-92.6), which compare the stereodescriptors inside the branches. A centre far
- * from the root is described as it stands in the digraph, with its ligands ranked there (auxiliary descriptors,
- * P-92.1.4.4), outermost first.
+ * Auxiliary descriptors (P-92.1.4.4): the letters of units inside the branches, each described as it stands in the
+ * digraph, with its ligands ranked there. Units in farther spheres are described first, and only they count.
  */
-import { isOddPermutation } from '../canonical-stereo.ts';
 import {
-  IMPLICIT_LIGAND,
+  bondBetween,
+  type AxialStereo,
   type DoubleBondStereo,
   type Molecule,
   type TetrahedralStereo,
 } from '../molecule.ts';
-import { type NodeKey, Ranker } from './rank.ts';
-import { type CipTree, type TreeNode } from './tree.ts';
+import type { Ranker, Ranking } from './rank.ts';
+import { type DescriptorLetter, fullRanker, type LetterAt } from './rules.ts';
+import type { Branch, CipTree, TreeNode } from './tree.ts';
+import { centreLetter, endsLetter } from './unit-letter.ts';
 
-type Letter = 'R' | 'S' | 'r' | 's' | 'Z' | 'E';
+export class AuxiliaryLetters {
+  private readonly centres = new Map<number, TetrahedralStereo>();
+  private readonly bonds = new Map<number, (DoubleBondStereo | AxialStereo)[]>();
+  private readonly letters = new Map<TreeNode, DescriptorLetter | undefined>();
+  /** By the sphere of the unit that is being described. */
+  private readonly rankers = new Map<number, Ranker>();
 
-const baseKeys: readonly NodeKey[] = [
-  (node) => node.atomicNumber,
-  (node) => (node.duplicate ? 1000 - node.originSphere : 0),
-  (node) => node.mass,
-];
-
-/** Place of rule 4b among the keys that `auxiliaryKeys` returns. */
-export const likeRule = 2;
-
-/** Empty when nothing is stated that could tell branches apart. */
-export function auxiliaryKeys(molecule: Molecule, tree: CipTree): NodeKey[] {
-  if (molecule.stereo.length === 0) return [];
-  const centres = new Map<number, TetrahedralStereo>();
-  const bonds = new Map<number, DoubleBondStereo>();
-  for (const element of molecule.stereo) {
-    if (element.kind === 'tetrahedral') centres.set(element.centre, element);
-    else if (element.kind === 'double-bond') {
-      bonds.set(element.ends[0], element);
-      bonds.set(element.ends[1], element);
+  constructor(
+    private readonly molecule: Molecule,
+    private readonly tree: CipTree,
+    private readonly constitutional: Ranker,
+  ) {
+    for (const element of molecule.stereo) {
+      if (element.kind === 'tetrahedral') this.centres.set(element.centre, element);
+      else if (element.kind === 'double-bond' || element.kind === 'axis') {
+        for (const end of element.ends) {
+          const list = this.bonds.get(end);
+          if (list === undefined) this.bonds.set(end, [element]);
+          else list.push(element);
+        }
+      }
     }
   }
-  centres.delete(tree.root.atom);
-  const letters = new Map<TreeNode, Letter | undefined>();
-  const letterAt = (node: TreeNode): Letter | undefined => {
-    if (node.duplicate || node.atom < 0 || node === tree.root) return undefined;
-    if (letters.has(node)) return letters.get(node);
-    // A centre is described from outside in: while it is being worked out it counts as undescribed.
-    letters.set(node, undefined);
-    const keys = [...baseKeys, ...stereoKeys(letterAt)];
-    const centre = centres.get(node.atom);
-    const bond = bonds.get(node.atom);
-    const letter =
-      centre !== undefined
-        ? centreLetter(tree, keys, node, centre)
-        : bond !== undefined
-          ? bondLetter(tree, keys, node, bond)
-          : undefined;
-    letters.set(node, letter);
+
+  /** By the constitution, and where that leaves ties, by what is known of the spheres beyond `sphere`. */
+  rank(branches: readonly Branch[], sphere: number): Ranking {
+    const ranking = this.constitutional.rank(branches);
+    if (!ranking.tied || this.molecule.stereo.length === 0) return ranking;
+    return this.rankerBeyond(sphere).rank(branches);
+  }
+
+  rankerBeyond(sphere: number): Ranker {
+    let ranker = this.rankers.get(sphere);
+    if (ranker === undefined) {
+      const letterAt: LetterAt = (node) => (node.sphere > sphere ? this.letterAt(node) : undefined);
+      this.rankers.set(sphere, (ranker = fullRanker(this.constitutional, letterAt)));
+    }
+    return ranker;
+  }
+
+  private letterAt(node: TreeNode): DescriptorLetter | undefined {
+    if (node.duplicate !== false || node.atom < 0 || node === this.tree.root) return undefined;
+    if (this.letters.has(node)) return this.letters.get(node);
+    const letter = this.describe(node);
+    this.letters.set(node, letter);
     return letter;
-  };
-  return stereoKeys(letterAt);
-}
-
-function stereoKeys(letterAt: (node: TreeNode) => Letter | undefined): NodeKey[] {
-  const keyed =
-    (values: Partial<Record<Letter, number>>): NodeKey =>
-    (node) =>
-      values[letterAt(node) as Letter] ?? 0;
-  return [
-    // Rule 3: Z before E.
-    keyed({ Z: 2, E: 1 }),
-    // Rule 4a: chiral before pseudoasymmetric before nothing.
-    keyed({ R: 2, S: 2, r: 1, s: 1 }),
-    // Rule 4b: like pairs before unlike ones, each centre against the first chiral one above it or at its rank.
-    likeKey(letterAt),
-    // Rule 4c: r before s.
-    keyed({ r: 2, s: 1 }),
-    // Rule 5: R before S.
-    keyed({ R: 2, S: 1 }),
-  ];
-}
-
-/** 2 for a centre with the same letter as the nearest chiral centre above it, 1 for one with the other letter. */
-function likeKey(letterAt: (node: TreeNode) => Letter | undefined): NodeKey {
-  return (node) => {
-    const letter = letterAt(node);
-    if (letter !== 'R' && letter !== 'S') return 0;
-    for (let above = node.parent; above !== undefined; above = above.parent) {
-      const other = letterAt(above);
-      if (other === 'R' || other === 'S') return other === letter ? 2 : 1;
-    }
-    return 0;
-  };
-}
-
-function centreLetter(
-  tree: CipTree,
-  keys: readonly NodeKey[],
-  node: TreeNode,
-  element: TetrahedralStereo,
-): Letter | undefined {
-  const around = tree.around(node, undefined).filter((other) => !isMultipleBondDuplicate(other, node));
-  const { order, decidedBy, tied } = new Ranker(tree, keys).rankBranches(around, node);
-  if (tied || decidedBy === baseKeys.length + likeRule) return undefined;
-  const ligands = order.map((other) => (other.atom < 0 ? IMPLICIT_LIGAND : other.atom));
-  if (ligands.length < 4) ligands.push(IMPLICIT_LIGAND);
-  const clockwise =
-    element.clockwise !== isOddPermutation(ligands.map((ligand) => element.ligands.indexOf(ligand)));
-  const letter = clockwise ? 'R' : 'S';
-  return decidedBy === keys.length - 1 ? (letter.toLowerCase() as 'r' | 's') : letter;
-}
-
-/** Only at the end nearer to the root, so that each double bond counts once. */
-function bondLetter(
-  tree: CipTree,
-  keys: readonly NodeKey[],
-  node: TreeNode,
-  element: DoubleBondStereo,
-): Letter | undefined {
-  const far = element.ends[0] === node.atom ? element.ends[1] : element.ends[0];
-  const farNode = tree.childrenOf(node).find((child) => child.atom === far && !child.duplicate);
-  if (farNode === undefined) return undefined;
-  const ranker = new Ranker(tree, keys);
-  let together = element.sameSide;
-  for (const [end, inward] of [
-    [node, farNode],
-    [farNode, node],
-  ] as const) {
-    const ligands = tree.around(end, inward).filter((other) => !isMultipleBondDuplicate(other, end));
-    const { order, tied } = ranker.rankBranches(ligands, end);
-    const stated = element.ligands[element.ends[0] === end.atom ? 0 : 1];
-    if (tied || order.length === 0) return undefined;
-    if (order[0]!.atom !== stated) together = !together;
   }
-  return together ? 'Z' : 'E';
+
+  private describe(node: TreeNode): DescriptorLetter | undefined {
+    const centre = this.centres.get(node.atom);
+    if (centre !== undefined) {
+      const ranking = this.rank(ligandBranches(this.tree, node), node.sphere);
+      return ranking.tied ? undefined : centreLetter(centre, ranking);
+    }
+    for (const element of this.bonds.get(node.atom) ?? []) {
+      const far = this.farEnd(node, element);
+      if (far === undefined) continue;
+      const near = ligandBranches(this.tree, node).filter((branch) => branch.node !== far.first);
+      const beyond = ligandBranches(this.tree, far.node).filter((branch) => branch.node !== far.node.parent);
+      const [one, other] = [this.rank(near, node.sphere), this.rank(beyond, node.sphere)];
+      if (one.tied || other.tied) return undefined;
+      return endsLetter(element, element.ends[0] === node.atom ? [one, other] : [other, one]);
+    }
+    return undefined;
+  }
+
+  /** The other end, down the double bonds: a unit is described at the end that is nearer to the root, once. */
+  private farEnd(
+    node: TreeNode,
+    { ends }: DoubleBondStereo | AxialStereo,
+  ): { readonly first: TreeNode; readonly node: TreeNode } | undefined {
+    const goal = ends[0] === node.atom ? ends[1] : ends[0];
+    let first: TreeNode | undefined;
+    for (let at = node; ;) {
+      const next = this.tree
+        .childrenOf(at)
+        .find(
+          (child) =>
+            child.duplicate === false &&
+            child.atom >= 0 &&
+            bondBetween(this.molecule, at.atom, child.atom)!.order === 2,
+        );
+      if (next === undefined) return undefined;
+      first ??= next;
+      if (next.atom === goal) return { first, node: next };
+      at = next;
+    }
+  }
 }
 
-/** A duplicate that stands for the second bond to a neighbour, not for a ring closure to another atom. */
-function isMultipleBondDuplicate(other: TreeNode, hub: TreeNode): boolean {
-  return (
-    other.duplicate &&
-    (hub.parent?.atom === other.atom ||
-      (hub.children ?? []).some((child) => !child.duplicate && child.atom === other.atom))
-  );
+/** The branches that are ligands: duplicates for the second bond of a double bond are none. */
+export function ligandBranches(tree: CipTree, node: TreeNode): Branch[] {
+  return tree.branchesAt(node).filter((branch) => branch.node.duplicate !== 'bond');
 }

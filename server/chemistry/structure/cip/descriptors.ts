@@ -1,16 +1,18 @@
 /**
  * Stereodescriptors of a structure: R, S (P-91.2, P-92), r, s for pseudoasymmetric centres (P-93.5), E, Z (P-93.4.2), and
  * M, P for axes (P-93.5.2). A unit whose ranking meets the bound of the search, or whose ligands rank alike, gets none.
+ *
+ * Not covered: the spreading of charge over Kekulé forms in ionic rings (P-92.1.4.3), and polyhedral centres.
  */
-import { bondKinds, canonicalGraph } from '../canonical-graph.ts';
-import { individualized, initialColouring } from '../canonical-refine.ts';
-import { isOddPermutation } from '../canonical-stereo.ts';
-import { IMPLICIT_LIGAND, type Molecule, type StereoElement } from '../molecule.ts';
-import { auxiliaryKeys, likeRule } from './auxiliary.ts';
-import { type NodeKey, Ranker } from './rank.ts';
-import { CipTree, type TreeNode, TreeTooLarge } from './tree.ts';
+import { bondKinds } from '../canonical-graph.ts';
+import type { Molecule, StereoElement, TetrahedralStereo } from '../molecule.ts';
+import { AuxiliaryLetters, ligandBranches } from './auxiliary.ts';
+import { Ranker, type Ranking } from './rank.ts';
+import { constitutionalRanker, type DescriptorLetter } from './rules.ts';
+import { type Branch, CipTree, TreeTooLarge } from './tree.ts';
+import { centreLetter, endsLetter } from './unit-letter.ts';
 
-export type DescriptorLetter = 'R' | 'S' | 'r' | 's' | 'E' | 'Z' | 'M' | 'P';
+export type { DescriptorLetter } from './rules.ts';
 
 export interface Descriptor {
   readonly element: StereoElement;
@@ -18,15 +20,9 @@ export interface Descriptor {
   readonly letter: DescriptorLetter | undefined;
 }
 
-/** Rule 1a: atomic number. Rule 1b: a duplicate of an atom nearer to the root is higher. Rule 2: mass number. */
-export const constitutionalKeys: readonly NodeKey[] = [
-  (node) => node.atomicNumber,
-  (node) => (node.duplicate ? 1000 - node.originSphere : 0),
-  (node) => node.mass,
-];
-
 /** A descriptor for each stated element, in the order of `molecule.stereo`. Polyhedral classes get none. */
 export function cipDescriptors(molecule: Molecule): Descriptor[] {
+  if (molecule.stereo.length === 0) return [];
   const kinds = bondKinds(molecule);
   return molecule.stereo.map((element) => ({ element, letter: letterOf(molecule, element, kinds) }));
 }
@@ -39,33 +35,13 @@ export function letterOf(
 ): DescriptorLetter | undefined {
   try {
     switch (element.kind) {
-      case 'tetrahedral': {
-        const ranked = rankedLigands(molecule, element.centre, element.ligands, undefined, kinds);
-        if (ranked === undefined) return undefined;
-        const clockwise =
-          element.clockwise !==
-          isOddPermutation(ranked.order.map((ligand) => element.ligands.indexOf(ligand)));
-        // Seen from the highest, the others clockwise: seen with the lowest behind, 1 → 2 → 3 runs the same way.
-        const letter = clockwise ? 'R' : 'S';
-        return ranked.reflectionInvariant ? (letter.toLowerCase() as 'r' | 's') : letter;
-      }
-      case 'double-bond': {
-        const higher = ([0, 1] as const).map((side) => higherLigand(molecule, element.ends, side, kinds));
-        if (higher[0] === undefined || higher[1] === undefined) return undefined;
-        const turns = ([0, 1] as const).filter((side) => higher[side] !== element.ligands[side]).length;
-        return element.sameSide === (turns % 2 === 0) ? 'Z' : 'E';
-      }
+      case 'tetrahedral':
+        return letterOfCentre(molecule, element, kinds);
+      case 'double-bond':
       case 'axis': {
-        const ordered: number[] = [];
-        for (const side of [0, 1] as const) {
-          const ligands = element.ligands.slice(side * 2, side * 2 + 2);
-          const higher = higherLigand(molecule, element.ends, side, kinds);
-          if (higher === undefined) return undefined;
-          ordered.push(...(ligands[0] === higher ? ligands : [ligands[1]!, ligands[0]!]));
-        }
-        const turned = (ordered[0] !== element.ligands[0]) !== (ordered[2] !== element.ligands[2]);
-        // Near pair first (P-92.1.2.2.1): a, b, c, d clockwise from a is Ra, and Ra is M (P-93.5.2.3).
-        return element.clockwise !== turned ? 'M' : 'P';
+        const first = rankingAtEnd(molecule, element.ends[0], kinds);
+        const second = first && rankingAtEnd(molecule, element.ends[1], kinds);
+        return first && second && endsLetter(element, [first, second]);
       }
       default:
         return undefined;
@@ -76,72 +52,63 @@ export function letterOf(
   }
 }
 
-/** Ligands from the highest to the lowest, or undefined when two of them rank alike. */
-function rankedLigands(
+function letterOfCentre(
   molecule: Molecule,
-  centre: number,
-  ligands: readonly number[],
-  inward: number | undefined,
+  element: TetrahedralStereo,
   kinds: readonly number[],
-): { order: number[]; reflectionInvariant: boolean } | undefined {
-  const tree = new CipTree(molecule, centre, kinds);
-  const branches = tree
-    .childrenOf(tree.root)
-    .filter(
-      (node) => !node.duplicate && node.atom !== inward && (node.atom < 0 || ligands.includes(node.atom)),
-    );
-  const alike = constitutionallyAlike(molecule, centre, kinds);
-  const firstRule = (first: TreeNode, second: TreeNode) =>
-    first.atom >= 0 && second.atom >= 0 && alike(first.atom, second.atom) ? constitutionalKeys.length : 0;
-  let ranking = new Ranker(tree, constitutionalKeys, firstRule).rankBranches(branches, tree.root);
-  let reflectionInvariant = false;
-  if (ranking.tied) {
-    const keys = auxiliaryKeys(molecule, tree);
-    if (keys.length === 0) return undefined;
-    const all = [...constitutionalKeys, ...keys];
-    ranking = new Ranker(tree, all, firstRule).rankBranches(branches, tree.root);
-    // Rule 4b is applied in a simplified form here, good enough to see that it decides, not how.
-    if (ranking.tied || ranking.decidedBy === constitutionalKeys.length + likeRule) return undefined;
-    // Rule 5 alone changes under reflection, so what it decides does not.
-    reflectionInvariant = ranking.decidedBy === all.length - 1;
-  }
-  const order = ranking.order.map((node: TreeNode) => (node.atom < 0 ? IMPLICIT_LIGAND : node.atom));
-  // A lone pair is the lowest of all (P-92.1.4.1).
-  if (order.length < ligands.length) order.push(IMPLICIT_LIGAND);
-  return { order, reflectionInvariant };
+): DescriptorLetter | undefined {
+  const tree = new CipTree(molecule, element.centre, kinds);
+  const letters = new AuxiliaryLetters(molecule, tree, constitutionalRanker(tree));
+  const branches = ligandBranches(tree, tree.root).filter(
+    ({ node }) => node.atom < 0 || element.ligands.includes(node.atom),
+  );
+  const ranking = letters.rank(branches, 0);
+  return ranking.tied
+    ? letterByReference(letters.rankerBeyond(0), element, ranking)
+    : centreLetter(element, ranking);
 }
 
 /**
- * Whether two ligands of a centre cannot be told apart by rules 1 and 2, because refinement with the centre set apart
- * leaves them in one class. Spares exploring the whole digraph only to learn that nothing differs.
+ * Centres whose alike ligands are told apart by what they are linked to, as in chiral spiro compounds (P-93.5.3.1): one
+ * of the alike ligands is taken as higher, and any choice must lead to the same letter.
  */
-function constitutionallyAlike(
-  molecule: Molecule,
-  centre: number,
-  kinds: readonly number[],
-): (first: number, second: number) => boolean {
-  let classes: Int32Array | undefined;
-  return (first, second) => {
-    if (classes === undefined) {
-      const members = molecule.atoms.map((_, index) => index);
-      const graph = canonicalGraph(molecule, members, kinds, { stereo: false });
-      const counter = { steps: 0 };
-      classes = individualized(graph, initialColouring(graph, counter), centre, counter).colours;
-    }
-    return classes[first] === classes[second];
-  };
+function letterByReference(
+  ranker: Ranker,
+  element: TetrahedralStereo,
+  { order, decidedBy }: Ranking,
+  chosen = 0,
+): DescriptorLetter | undefined {
+  // Two alike hydrogens, or a third choice, can tell nothing.
+  if (chosen === 2 || order.some(({ node }, index) => index > 0 && node.atom < 0)) return undefined;
+  const start = decidedBy.indexOf(-1);
+  let end = start + 1;
+  while (decidedBy[end] === -1) end++;
+  const letters = new Set<DescriptorLetter | undefined>();
+  for (const { node } of order.slice(start, end + 1)) {
+    const referred = new Ranker(ranker.tree, [(other) => (other.atom === node.atom ? 1 : 0)], ranker);
+    const ranking = referred.rank(order);
+    letters.add(
+      ranking.tied
+        ? letterByReference(referred, element, ranking, chosen + 1)
+        : centreLetter(element, ranking),
+    );
+  }
+  return letters.size === 1 ? [...letters][0] : undefined;
 }
 
-/** The higher ligand at one end of a double bond, cumulene or axis; −1 for a hydrogen. */
-function higherLigand(
-  molecule: Molecule,
-  ends: readonly [number, number],
-  side: 0 | 1,
-  kinds: readonly number[],
-): number | undefined {
-  const end = ends[side];
-  const inward = molecule.neighbours[end]!.find(({ bond }) => molecule.bonds[bond]!.order === 2)?.atom;
-  const ligands = molecule.neighbours[end]!.filter(({ atom }) => atom !== inward).map(({ atom }) => atom);
-  if (ligands.length === 1) return molecule.atoms[end]!.hydrogens > 1 ? undefined : ligands[0];
-  return rankedLigands(molecule, end, ligands, inward, kinds)?.order[0];
+/** The ligands at one end of a double bond, cumulene or axis, or undefined when they rank alike. */
+function rankingAtEnd(molecule: Molecule, end: number, kinds: readonly number[]): Ranking | undefined {
+  const tree = new CipTree(molecule, end, kinds);
+  const branches = ligandBranches(tree, tree.root).filter(
+    ({ node }) => !isDoublyBound(molecule, end, node.atom),
+  );
+  const letters = new AuxiliaryLetters(molecule, tree, constitutionalRanker(tree));
+  const ranking = letters.rank(branches satisfies Branch[], 0);
+  return ranking.tied || branches.length === 0 ? undefined : ranking;
+}
+
+function isDoublyBound(molecule: Molecule, end: number, ligand: number): boolean {
+  return molecule.neighbours[end]!.some(
+    ({ atom, bond }) => atom === ligand && molecule.bonds[bond]!.order === 2,
+  );
 }

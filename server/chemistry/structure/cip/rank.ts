@@ -1,89 +1,122 @@
 /**
- * Ranks the branches at a node by the sequence rules (P-92.1.4 to P-92.6). Each rule is tried on whole branches, sphere
- * by sphere, before the next one; sets of atoms in a sphere are compared in the order of the branches they hang on.
+ * Ranks branches by the sequence rules (P-92.1.4 to P-92.6). Each rule is tried on whole branches, sphere by sphere,
+ * before the next one; sets of atoms in a sphere are compared in the order of the branches they hang on.
  */
-import type { CipTree, TreeNode } from './tree.ts';
+import type { Branch, CipTree, TreeNode } from './tree.ts';
 
-/** The rules that compare one number at each node, in their order. */
+/** A rule that compares one number at each node; at least 0, the higher the earlier. */
 export type NodeKey = (node: TreeNode) => number;
+
+/** A rule that compares two branches as wholes; positive when the first one ranks higher. */
+export interface BranchRule {
+  compare(first: Branch, second: Branch): number;
+}
 
 export interface Ranking {
   /** Branches, highest first. */
-  readonly order: readonly TreeNode[];
-  /** The last rule that was needed, as an index into the keys; −1 when fewer than two branches. */
-  readonly decidedBy: number;
-  /** Two branches stayed equal under all rules. */
+  readonly order: readonly Branch[];
+  /** For each neighbouring pair of `order` the index of the rule that decided, or −1 where none did. */
+  readonly decidedBy: readonly number[];
   readonly tied: boolean;
 }
 
 /** Closes each set of atoms, so that a smaller set ranks below a larger one that begins alike. */
 const endOfSet = -1;
 
-export class Ranker {
-  constructor(
-    private readonly tree: CipTree,
-    private readonly keys: readonly NodeKey[],
-    /** The first rule that can tell two branches at the root apart; 0 when nothing is known of them. */
-    private readonly firstRule: (first: TreeNode, second: TreeNode) => number = () => 0,
-  ) {}
+const isKey = (rule: NodeKey | BranchRule): rule is NodeKey => typeof rule === 'function';
 
-  /** The branches around `node`, `from` aside. */
-  rank(node: TreeNode, from: TreeNode | undefined): Ranking {
-    return this.rankBranches(this.tree.around(node, from), node);
+export class Ranker {
+  /** Rules of `below` come first. */
+  readonly ruleCount: number;
+  private readonly firstOwn: number;
+  private readonly profiles = new Map<Branch, number[][][]>();
+
+  constructor(
+    readonly tree: CipTree,
+    private readonly rules: readonly (NodeKey | BranchRule)[],
+    private readonly below?: Ranker,
+  ) {
+    this.firstOwn = below?.ruleCount ?? 0;
+    this.ruleCount = this.firstOwn + rules.length;
   }
 
-  /** `hub` is the node that the branches hang on. */
-  rankBranches(branches: readonly TreeNode[], hub: TreeNode): Ranking {
-    let decidedBy = -1;
-    let tied = false;
-    const order = [...branches].sort((first, second) => {
-      const result = this.compare(first, second, hub);
-      decidedBy = Math.max(decidedBy, result.rule);
-      if (result.sign === 0) tied = true;
-      return -result.sign;
+  rank(branches: readonly Branch[]): Ranking {
+    const order = [...branches].sort((first, second) => -this.compare(first, second).sign);
+    const decidedBy = order.slice(1).map((branch, index) => {
+      const { sign, rule } = this.compare(order[index]!, branch);
+      return sign === 0 ? -1 : rule;
     });
-    return { order, decidedBy, tied };
+    return { order, decidedBy, tied: decidedBy.includes(-1) };
   }
 
   /** Positive when the first branch ranks higher. */
-  compare(first: TreeNode, second: TreeNode, hub: TreeNode): { sign: number; rule: number } {
-    for (let rule = this.firstRule(first, second); rule < this.keys.length; rule++) {
-      for (let depth = 0; ; depth++) {
-        const one = this.sphere(first, hub, rule, depth);
-        const other = this.sphere(second, hub, rule, depth);
-        const sign = compareLists(one, other);
-        if (sign !== 0) return { sign, rule };
-        if (one.length === 0) break;
-      }
+  compare(first: Branch, second: Branch): { sign: number; rule: number } {
+    for (let rule = 0; rule < this.ruleCount; rule++) {
+      const sign = this.compareBy(rule, first, second);
+      if (sign !== 0) return { sign, rule };
     }
-    return { sign: 0, rule: this.keys.length - 1 };
+    return { sign: 0, rule: -1 };
   }
 
-  /** Values of one rule in one sphere of a branch, sets in the order of the branches they hang on. */
-  private sphere(branch: TreeNode, from: TreeNode, rule: number, depth: number): number[] {
+  /** One rule on all spheres of both branches. */
+  private compareBy(rule: number, first: Branch, second: Branch): number {
+    if (first === second) return 0;
+    const own = this.ownRule(rule);
+    if (own !== undefined && !isKey(own)) return own.compare(first, second);
+    if (own === undefined && this.below !== undefined) return this.below.compareBy(rule, first, second);
+    for (let depth = 0; ; depth++) {
+      const one = this.profile(first, rule, depth);
+      const sign = compareLists(one, this.profile(second, rule, depth));
+      if (sign !== 0 || one.length === 0) return sign;
+    }
+  }
+
+  private comparesNodes(rule: number): boolean {
+    const own = this.ownRule(rule);
+    return own === undefined ? this.below!.comparesNodes(rule) : isKey(own);
+  }
+
+  private ownRule(rule: number): NodeKey | BranchRule | undefined {
+    return this.rules[rule - this.firstOwn];
+  }
+
+  /**
+   * The values of one key in one sphere of a branch, sets in the order of the branches that they hang on, each closed by
+   * −1; empty when the branch ends before.
+   */
+  profile(branch: Branch, rule: number, depth: number): readonly number[] {
+    if (rule < this.firstOwn) return this.below!.profile(branch, rule, depth);
+    let ofBranch = this.profiles.get(branch);
+    if (ofBranch === undefined) this.profiles.set(branch, (ofBranch = []));
+    const ofRule = (ofBranch[rule] ??= []);
+    return (ofRule[depth] ??= this.profileOf(branch, rule, depth));
+  }
+
+  private profileOf(branch: Branch, rule: number, depth: number): number[] {
+    const key = this.ownRule(rule) as NodeKey;
     this.tree.step();
-    if (depth === 0) return [this.keys[rule]!(branch)];
-    const onward = this.sorted(this.tree.around(branch, from), branch, rule, depth - 1);
-    if (depth === 1) return onward.length === 0 ? [] : [...onward.map(this.keys[rule]!), endOfSet];
-    return onward.flatMap((node) => this.sphere(node, branch, rule, depth - 1));
+    if (depth === 0) return [key(branch.node)];
+    const onward = this.sorted(this.tree.onward(branch), rule, depth - 1);
+    if (depth === 1) return [...onward.map(({ node }) => key(node)), endOfSet];
+    const values: number[] = [];
+    for (const next of onward) for (const value of this.profile(next, rule, depth - 1)) values.push(value);
+    this.tree.step(values.length >> 3);
+    return values;
   }
 
-  /** Sorted by the rules so far, looking no deeper than the spheres that are being compared. */
-  private sorted(branches: readonly TreeNode[], hub: TreeNode, rule: number, depth: number): TreeNode[] {
-    if (branches.length < 2) return [...branches];
-    const lists = new Map<TreeNode, number[][][]>();
-    const listOf = (node: TreeNode, ofRule: number, at: number): number[] => {
-      let byRule = lists.get(node);
-      if (byRule === undefined) lists.set(node, (byRule = []));
-      return ((byRule[ofRule] ??= [])[at] ??= this.sphere(node, hub, ofRule, at));
-    };
+  /** By all rules before this one, then by this one as far as the spheres that are being compared. */
+  private sorted(branches: readonly Branch[], rule: number, depth: number): readonly Branch[] {
+    if (branches.length < 2) return branches;
     return [...branches].sort((first, second) => {
-      for (let ofRule = 0; ofRule <= rule; ofRule++) {
-        // Earlier rules have been exhausted on these branches; the current one is known down to this sphere.
-        for (let at = 0; at <= depth; at++) {
-          const sign = compareLists(listOf(first, ofRule, at), listOf(second, ofRule, at));
-          if (sign !== 0) return -sign;
-        }
+      for (let earlier = 0; earlier < rule; earlier++) {
+        // Rules about whole branches count at the root only.
+        if (!this.comparesNodes(earlier)) continue;
+        const sign = this.compareBy(earlier, first, second);
+        if (sign !== 0) return -sign;
+      }
+      for (let at = 0; at <= depth; at++) {
+        const sign = compareLists(this.profile(first, rule, at), this.profile(second, rule, at));
+        if (sign !== 0) return -sign;
       }
       return 0;
     });

@@ -8,52 +8,65 @@ import { bondKinds, RESONANT } from '../canonical-graph.ts';
 import type { Molecule } from '../molecule.ts';
 
 /** Nodes made and looked at after which a ranking is given up. */
-const stepLimit = 60_000;
+const stepLimit = 100_000;
 
 export interface TreeNode {
   /** The atom of the molecule, also for a duplicate of it; −1 for an implied hydrogen. */
   readonly atom: number;
   readonly parent: TreeNode | undefined;
-  readonly duplicate: boolean;
+  /** Why there is a duplicate here: a multiple bond, or a ring that closes. */
+  readonly duplicate: false | 'bond' | 'ring';
   /** Bonds from the root. */
   readonly sphere: number;
-  /** For a duplicate: the sphere of the atom it stands for; the sphere above for one of a multiple bond. */
+  /** For a duplicate: the sphere of the atom it stands for. */
   readonly originSphere: number;
   /** Atomic number; the mean over its Kekulé forms for a duplicate in a delocalised ring (P-92.1.4.3.2). */
   readonly atomicNumber: number;
   /** Mass number, or the standard atomic weight where no isotope is stated. */
   readonly mass: number;
   children: readonly TreeNode[] | undefined;
+  down: Branch | undefined;
+  up: Branch | undefined;
+}
+
+/** What hangs on `from` in the direction of `node`; upwards when `node` is the parent of `from`. */
+export interface Branch {
+  readonly node: TreeNode;
+  readonly from: TreeNode;
+  onward: readonly Branch[] | undefined;
 }
 
 /** Thrown inside the ranking only, and caught there: the tree has grown beyond its bound. */
 export class TreeTooLarge extends Error {}
 
 export class CipTree {
-  private readonly kinds: readonly number[];
   private steps = 0;
   readonly root: TreeNode;
 
   constructor(
     private readonly molecule: Molecule,
     root: number,
-    kinds?: readonly number[],
+    private readonly kinds: readonly number[] = bondKinds(molecule),
   ) {
-    this.kinds = kinds ?? bondKinds(molecule);
     this.root = this.node(root, undefined, false, 0);
   }
 
-  /** The nodes one bond away, `from` aside; upwards from a node as well as downwards. */
-  around(node: TreeNode, from: TreeNode | undefined): readonly TreeNode[] {
-    const below = this.childrenOf(node);
-    if (node.parent === undefined)
-      return from === undefined ? below : below.filter((child) => child !== from);
-    return from === node.parent ? below : [node.parent, ...below.filter((child) => child !== from)];
+  /** All branches at a node: to its children, and back towards the root. */
+  branchesAt(node: TreeNode): Branch[] {
+    const below = this.childrenOf(node).map((child) => downTo(child, node));
+    return node.parent === undefined ? below : [upFrom(node, node.parent), ...below];
   }
 
-  /** Counts one step of a search over this tree. */
-  step(): void {
-    if (++this.steps > stepLimit) throw new TreeTooLarge();
+  /** The branches that a branch divides into. */
+  onward(branch: Branch): readonly Branch[] {
+    branch.onward ??= this.branchesAt(branch.node).filter((other) => other.node !== branch.from);
+    return branch.onward;
+  }
+
+  /** Counts the work of a search over this tree. */
+  step(count = 1): void {
+    this.steps += count;
+    if (this.steps > stepLimit) throw new TreeTooLarge();
   }
 
   childrenOf(node: TreeNode): readonly TreeNode[] {
@@ -62,7 +75,7 @@ export class CipTree {
   }
 
   private expand(node: TreeNode): TreeNode[] {
-    if (node.duplicate || node.atom < 0) return [];
+    if (node.duplicate !== false || node.atom < 0) return [];
     const children: TreeNode[] = [];
     const resonant: number[] = [];
     for (const { atom, bond } of this.molecule.neighbours[node.atom]!) {
@@ -73,18 +86,18 @@ export class CipTree {
         children.push(
           above === undefined
             ? this.node(atom, node, false, node.sphere + 1)
-            : this.node(atom, node, true, above.sphere),
+            : this.node(atom, node, 'ring', above.sphere),
         );
       }
       if (this.kinds[bond] === RESONANT) resonant.push(atom);
       else
         for (let extra = 1; extra < order; extra++)
-          children.push(this.node(atom, node, true, isParent ? node.parent!.sphere : node.sphere + 1));
+          children.push(this.node(atom, node, 'bond', isParent ? node.parent.sphere : node.sphere + 1));
     }
     if (resonant.length > 0) {
       const mean =
         resonant.reduce((sum, atom) => sum + this.molecule.atoms[atom]!.atomicNumber, 0) / resonant.length;
-      children.push(this.node(resonant[0]!, node, true, node.sphere + 1, mean));
+      children.push(this.node(resonant[0]!, node, 'bond', node.sphere + 1, mean));
     }
     for (let count = this.molecule.atoms[node.atom]!.hydrogens; count > 0; count--)
       children.push(this.node(-1, node, false, 0));
@@ -94,7 +107,7 @@ export class CipTree {
   private node(
     atom: number,
     parent: TreeNode | undefined,
-    duplicate: boolean,
+    duplicate: TreeNode['duplicate'],
     originSphere: number,
     mean?: number,
   ): TreeNode {
@@ -109,10 +122,22 @@ export class CipTree {
       sphere: parent === undefined ? 0 : parent.sphere + 1,
       originSphere,
       atomicNumber,
-      mass: duplicate || of === undefined || of.isotope === 0 ? weight : of.isotope,
+      mass: duplicate !== false || of === undefined || of.isotope === 0 ? weight : of.isotope,
       children: undefined,
+      down: undefined,
+      up: undefined,
     };
   }
+}
+
+function downTo(child: TreeNode, parent: TreeNode): Branch {
+  child.down ??= { node: child, from: parent, onward: undefined };
+  return child.down;
+}
+
+function upFrom(child: TreeNode, parent: TreeNode): Branch {
+  child.up ??= { node: parent, from: child, onward: undefined };
+  return child.up;
 }
 
 function ancestorWithAtom(node: TreeNode, atom: number): TreeNode | undefined {
