@@ -1,0 +1,161 @@
+/** Settles a reading's arrangement in space from the descriptors of its name, and lists what they leave open. */
+import { assignDescriptors } from '../structure/assign-descriptors.ts';
+import { cipDescriptors } from '../structure/cip/descriptors.ts';
+import type { Molecule, StereoElement } from '../structure/molecule.ts';
+import { enumerateStereoisomers, type StereoisomerList } from '../structure/stereoisomers.ts';
+import type { Draft } from './build/draft.ts';
+import { relativeFilter } from './relative.ts';
+import type { NameRemark, Reading } from './reading.ts';
+import type { StereoWord } from './tree.ts';
+import type { PreparedName } from './words/prepared.ts';
+
+type Letter = Parameters<typeof assignDescriptors>[1][number]['letter'];
+const letters = new Set<string>(['R', 'S', 'r', 's', 'E', 'Z', 'M', 'P']);
+
+export interface Arranged {
+  readonly reading: Reading;
+  readonly remarks: readonly NameRemark[];
+}
+
+export function arrangedReading(
+  name: string,
+  molecule: Molecule,
+  draft: Draft | undefined,
+  prepared: PreparedName,
+  limits: { readonly stereoisomers?: number },
+): Arranged {
+  const remarks: NameRemark[] = [];
+  const cap = limits.stereoisomers ?? 32;
+  const remark = (word: StereoWord, message: string) => {
+    const start = prepared.origin[word.range.start] ?? 0;
+    const end = prepared.origin[word.range.end] ?? start;
+    remarks.push({
+      kind: 'stereo-meaningless',
+      range: { start: Math.min(start, end), end: Math.max(start, end) },
+      message,
+    });
+  };
+  let settled = molecule;
+  let racemic = false;
+  const relative: { word: StereoWord; atoms: readonly number[] }[] = [];
+  if (draft && draft.wanted.length + draft.loose.length > 0) {
+    const wanted = draft.wanted.filter(({ word }) => letters.has(word.letter));
+    for (const { atom, word } of draft.wanted)
+      if (!letters.has(word.letter)) relative.push({ word, atoms: [atom] });
+    for (const { atoms, word } of draft.loose) {
+      if (word.letter === 'rac' || word.letter === 'rel') racemic = true;
+      else if (!letters.has(word.letter)) relative.push({ word, atoms });
+      else {
+        const atom = onlyPlace(molecule, atoms, word.letter);
+        if (atom === undefined)
+          remark(
+            word,
+            `${word.letter} has no locant, and there is not exactly one place that it can be about.`,
+          );
+        else wanted.push({ atom, word });
+      }
+    }
+    const asked = wanted.map(({ atom, word }) => ({ atom, letter: word.letter as Letter }));
+    const { molecule: assigned, refused } = assignDescriptors(molecule, asked);
+    settled = assigned;
+    for (const { index, reason } of refused)
+      remark(wanted[index]!.word, refusal(wanted[index]!.word, reason));
+  }
+  const list = enumerateStereoisomers(settled, Math.max(cap, 64));
+  let isomers = list.isomers;
+  let count = list.count;
+  for (const { word, atoms } of relative) {
+    const filter = relativeFilter(list, word.letter, atoms);
+    if (!filter)
+      remark(word, `“${word.letter}” says nothing about this structure, which has no two such arrangements.`);
+    else {
+      isomers = isomers.filter(filter);
+      count = isomers.length;
+    }
+  }
+  const bare = isomers.length === 1 && relative.length > 0 ? isomers[0]! : list.molecule;
+  if (racemic && isomers.length === 1) {
+    const mirror = mirrored(isomers[0]!);
+    return { reading: openReading(name, molecule, [isomers[0]!, mirror], 2, cap, draft), remarks };
+  }
+  const open = isomers.length > 1 || (count ?? 2) > 1 ? isomers : [];
+  return { reading: openReading(name, bare, open, count, cap, draft), remarks };
+}
+
+function openReading(
+  name: string,
+  molecule: Molecule,
+  open: readonly Molecule[],
+  count: number | undefined,
+  cap: number,
+  draft: Draft | undefined,
+): Reading {
+  const stereoisomers = open
+    .slice(0, cap)
+    .map((isomer) => ({ name: describedName(name, isomer, molecule, draft), molecule: isomer }));
+  const total = count ?? open.length;
+  return {
+    name,
+    molecule,
+    stereoisomers,
+    ...(total > stereoisomers.length && open.length > 0 ? { stereoisomerCount: total } : {}),
+  };
+}
+
+/** The name with the descriptors of what it left open in front (P-91.2): `(2R)-butan-2-ol`. */
+function describedName(name: string, isomer: Molecule, before: Molecule, draft: Draft | undefined): string {
+  const stated = new Set(before.stereo.map((element) => elementAtoms(element).join(' ')));
+  const words: { text: string; number: number }[] = [];
+  for (const { element, letter } of cipDescriptors(isomer)) {
+    const atoms = elementAtoms(element);
+    if (letter === undefined || stated.has(atoms.join(' '))) continue;
+    const locants = atoms.flatMap((atom) => draft?.named.get(atom)?.locant ?? []);
+    locants.sort((first, second) => Number.parseInt(first, 10) - Number.parseInt(second, 10));
+    words.push({ text: `${locants[0] ?? ''}${letter}`, number: Number.parseInt(locants[0] ?? '0', 10) });
+  }
+  if (words.length === 0) return name;
+  words.sort((first, second) => first.number - second.number);
+  return `(${words.map((word) => word.text).join(',')})-${name}`;
+}
+
+function elementAtoms(element: StereoElement): readonly number[] {
+  return 'ends' in element ? element.ends : [element.centre];
+}
+
+function mirrored(molecule: Molecule): Molecule {
+  return {
+    ...molecule,
+    stereo: molecule.stereo.map((element) =>
+      element.kind === 'tetrahedral' || element.kind === 'axis'
+        ? { ...element, clockwise: !element.clockwise }
+        : element,
+    ),
+  };
+}
+
+/** The single place of a unit, or of the whole, that a descriptor without locant can be about. */
+function onlyPlace(molecule: Molecule, atoms: readonly number[], letter: string): number | undefined {
+  const list: StereoisomerList = enumerateStereoisomers(molecule, 64);
+  const places = list.units.flatMap(({ candidate }) => {
+    const isBond = candidate.kind === 'double-bond';
+    if (isBond !== (letter === 'E' || letter === 'Z')) return [];
+    return [candidate.kind === 'tetrahedral' ? [candidate.centre] : [...candidate.ends]];
+  });
+  const inUnit = places.filter((ends) => ends.some((atom) => atoms.includes(atom)));
+  const chosen = inUnit.length > 0 ? inUnit : places;
+  return chosen.length === 1 ? chosen[0]![0] : undefined;
+}
+
+function refusal(word: StereoWord, reason: string): string {
+  const place = word.locant === undefined ? 'there' : `at position ${word.locant}`;
+  switch (reason) {
+    case 'no stereogenic unit':
+      return `${word.letter} ${place} says nothing: that atom is no stereocentre and no end of a stereogenic double bond.`;
+    case 'ligands alike':
+      return `${word.letter} ${place} says nothing: two of the groups there are the same.`;
+    case 'impossible':
+      return `No arrangement ${place} has the descriptor ${word.letter} together with the others given.`;
+    default:
+      return `${word.letter} ${place} does not settle the arrangement.`;
+  }
+}

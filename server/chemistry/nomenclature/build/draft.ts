@@ -1,0 +1,132 @@
+/** A structure while it is put together from a tree: atoms with the valence that they fill, and open questions. */
+import { usualValences } from '../../structure/valence-model.ts';
+import type { TextRange } from '../../text.ts';
+import type { Locant, StereoWord } from '../tree.ts';
+import type { StereoElement } from '../../structure/molecule.ts';
+import type { SkeletonGraph } from './skeleton.ts';
+
+export interface DraftAtom {
+  atomicNumber: number;
+  charge: number;
+  isotope: number;
+  /** Bonds and hydrogens that the atom has in the end. */
+  capacity: number;
+  mancude: boolean;
+  saturated: boolean;
+  range: TextRange;
+}
+
+/** Text to be written into the name where it left something open. */
+export interface Insertion {
+  readonly at: number;
+  readonly text: string;
+}
+
+/** A chain whose name holds only while no longer chain can be found; see `proper-chain.ts`. */
+export interface ChainClaim {
+  readonly atoms: readonly number[];
+  /** Atoms of the chain that carry the principal group or free valence. */
+  readonly principal: readonly number[];
+  /** The places on it were chosen here, not given by the name. */
+  readonly open: boolean;
+  readonly range: TextRange;
+}
+
+export class Draft {
+  readonly atoms: DraftAtom[] = [];
+  readonly bonds: { from: number; to: number; order: number }[] = [];
+  readonly neighbours: { atom: number; bond: number }[][] = [];
+  readonly stereo: StereoElement[] = [];
+  readonly insertions: Insertion[] = [];
+  readonly wanted: { atom: number; word: StereoWord }[] = [];
+  readonly loose: { atoms: readonly number[]; word: StereoWord }[] = [];
+  readonly chains: ChainClaim[] = [];
+  /** Usual indicated hydrogen, used when nothing else settles the double bonds. */
+  readonly usualHydrogen: number[] = [];
+  /** For atoms of a parent: its locant, and where the parent's name begins. */
+  readonly named = new Map<number, { locant: Locant; parentAt: number }>();
+  /** Bonds that belong to the skeletons of mancude rings, as pairs of atoms, the lower first. */
+  readonly ringBonds = new Set<string>();
+  cost = 0;
+  failure: { range: TextRange; message: string } | undefined;
+
+  fail(range: TextRange, message: string): undefined {
+    this.failure ??= { range, message };
+    return undefined;
+  }
+
+  bond(from: number, to: number, order: number): void {
+    const bond = this.bonds.push({ from, to, order }) - 1;
+    this.neighbours[from]!.push({ atom: to, bond });
+    this.neighbours[to]!.push({ atom: from, bond });
+  }
+
+  orderSum(atom: number): number {
+    let sum = 0;
+    for (const { bond } of this.neighbours[atom]!) sum += this.bonds[bond]!.order;
+    return sum;
+  }
+
+  /** Valence not yet used; a double bond to come in a mancude ring is not counted as used. */
+  free(atom: number): number {
+    return this.atoms[atom]!.capacity - this.orderSum(atom);
+  }
+
+  /** As `free`, but an atom of a mancude ring keeps what its double bond needs, unless it must be saturated. */
+  freeBesideRing(atom: number): number {
+    const own = this.atoms[atom]!;
+    const spare = this.free(atom);
+    return own.mancude && !own.saturated ? spare - 1 : spare;
+  }
+
+  /** Adds a skeleton; the answer lists the new atoms in its order. */
+  addSkeleton(skeleton: SkeletonGraph, range: TextRange): number[] {
+    const added = skeleton.atoms.map((atom) => {
+      this.neighbours.push([]);
+      const { atomicNumber, charge, isotope, mancude } = atom;
+      return (
+        this.atoms.push({ atomicNumber, charge, isotope, mancude, capacity: 0, saturated: false, range }) - 1
+      );
+    });
+    for (const bond of skeleton.bonds) {
+      const [from, to] = [added[bond.from]!, added[bond.to]!];
+      this.bond(from, to, bond.order);
+      if (
+        skeleton.atoms[bond.from]!.mancude &&
+        skeleton.atoms[bond.to]!.mancude &&
+        bond.delocalised !== false
+      ) {
+        this.ringBonds.add(`${String(Math.min(from, to))} ${String(Math.max(from, to))}`);
+      }
+    }
+    skeleton.atoms.forEach((atom, index) => {
+      this.settleCapacity(added[index]!, atom.hydrogens);
+    });
+    for (const index of skeleton.indicated) this.usualHydrogen.push(added[index]!);
+    for (const element of skeleton.stereo) this.stereo.push(moved(element, added));
+    return added;
+  }
+
+  settleCapacity(atom: number, hydrogens?: number): void {
+    const own = this.atoms[atom]!;
+    const used = this.orderSum(atom);
+    own.capacity =
+      hydrogens === undefined
+        ? (usualValences(own.atomicNumber, own.charge)?.find((usual) => usual >= used) ?? used)
+        : used + hydrogens;
+  }
+}
+
+function moved(element: StereoElement, atoms: readonly number[]): StereoElement {
+  const to = (atom: number) => (atom < 0 ? atom : atoms[atom]!);
+  const map = <T extends readonly number[]>(list: T) => list.map(to) as unknown as T;
+  switch (element.kind) {
+    case 'tetrahedral':
+      return { ...element, centre: to(element.centre), ligands: map(element.ligands) };
+    case 'double-bond':
+    case 'axis':
+      return { ...element, ends: map(element.ends), ligands: map(element.ligands as never) };
+    default:
+      return { ...element, centre: to(element.centre), ligands: map(element.ligands) };
+  }
+}

@@ -1,0 +1,108 @@
+/** Parent hydrides as graphs with numbered atoms, before anything is put on them. */
+import { readSmiles } from '../../structure/read-smiles.ts';
+import type { StereoElement } from '../../structure/molecule.ts';
+
+export interface SkeletonAtom {
+  readonly atomicNumber: number;
+  readonly charge: number;
+  readonly isotope: number;
+  /** Every locant by which the atom can be called; none for atoms without a number. */
+  readonly locants: readonly string[];
+  /** Belongs to a ring with the most non-cumulative double bonds possible; those bonds are set at the end. */
+  readonly mancude: boolean;
+  /** Hydrogens that are fixed, for atoms written in brackets. */
+  readonly hydrogens?: number;
+}
+
+export interface SkeletonGraph {
+  readonly kind: 'chain' | 'ring' | 'fixed';
+  readonly atoms: readonly SkeletonAtom[];
+  /** `delocalised` false: a single bond between mancude rings. */
+  readonly bonds: readonly { from: number; to: number; order: number; delocalised?: boolean }[];
+  /** Atoms saturated when the name says nothing else (the usual tautomer, as 1H in indole). */
+  readonly indicated: readonly number[];
+  readonly stereo: readonly StereoElement[];
+  /** Written in front of the parent's name to tell it from its siblings: `o-`, `m-`, `p-`. */
+  readonly mark?: string;
+}
+
+const carbon = (locants: readonly string[]): SkeletonAtom => ({
+  atomicNumber: 6,
+  charge: 0,
+  isotope: 0,
+  locants,
+  mancude: false,
+});
+
+/** An unbranched chain of carbon, numbered from one end (P-21.2.1). */
+export function chain(length: number): SkeletonGraph {
+  return {
+    kind: 'chain',
+    atoms: Array.from({ length }, (_, index) => carbon([String(index + 1)])),
+    bonds: Array.from({ length: length - 1 }, (_, index) => ({ from: index, to: index + 1, order: 1 })),
+    indicated: [],
+    stereo: [],
+  };
+}
+
+/** A saturated ring of carbon (P-22.1.1). */
+export function ring(size: number): SkeletonGraph {
+  const open = chain(size);
+  return { ...open, kind: 'ring', bonds: [...open.bonds, { from: 0, to: size - 1, order: 1 }] };
+}
+
+/**
+ * A skeleton from the vocabulary. `locants` lists, in SMILES order, the locants of each atom (several joined by `/`,
+ * `-` for none). Lower-case atoms are mancude; with `mancude` true all ring atoms written that can bear a double bond
+ * are. `indicated` are the locants of the usual indicated hydrogen.
+ */
+export function skeletonFromSmiles(
+  smiles: string,
+  locants = '',
+  mancude = false,
+  indicated = '',
+): SkeletonGraph | undefined {
+  const molecule = readSmiles(smiles).value;
+  if (!molecule) return undefined;
+  const labels = locants === '' ? [] : locants.split(' ');
+  const saturated = indicated === '' ? [] : indicated.split(' ');
+  const atoms = molecule.atoms.map((atom, index): SkeletonAtom => {
+    const own = labels[index] === undefined || labels[index] === '-' ? [] : labels[index].split('/');
+    const canBear =
+      atom.atomicNumber !== 8 &&
+      atom.atomicNumber !== 16 &&
+      atom.atomicNumber !== 34 &&
+      atom.atomicNumber !== 52;
+    const inRing = molecule.neighbours[index]!.length > 1;
+    const isMancude = (atom.aromatic || (mancude && inRing)) && (canBear || atom.charge > 0);
+    return {
+      atomicNumber: atom.atomicNumber,
+      charge: atom.charge,
+      isotope: atom.isotope,
+      locants: own,
+      mancude: isMancude,
+      ...(smiles[atom.range.start] === '[' && !isMancude ? { hydrogens: atom.hydrogens } : {}),
+    };
+  });
+  return {
+    kind: 'fixed',
+    atoms,
+    bonds: molecule.bonds.map((bond) => ({
+      from: bond.from,
+      to: bond.to,
+      order:
+        atoms[bond.from]!.mancude && atoms[bond.to]!.mancude && (bond.aromatic || mancude) ? 1 : bond.order,
+      delocalised: bond.aromatic || mancude,
+    })),
+    indicated: atoms.flatMap((atom, index) =>
+      (molecule.atoms[index]!.aromatic &&
+        atom.atomicNumber !== 6 &&
+        molecule.atoms[index]!.hydrogens > 0 &&
+        atom.mancude) ||
+      atom.locants.some((own) => saturated.includes(own))
+        ? [index]
+        : [],
+    ),
+    stereo: molecule.stereo,
+  };
+}

@@ -1,0 +1,116 @@
+/** Hangs substituents on the places of a unit; where a name gives no locant, every place that could be meant. */
+import type { Locant, Substitution, Unit } from '../tree.ts';
+import { noSuchPlace, type BuiltUnit, type UnitBuilder } from './built-unit.ts';
+import type { Choices } from './choices.ts';
+import type { Draft } from './draft.ts';
+import { fifthBond } from './endings.ts';
+
+export function placeSubstitution(
+  substitution: Substitution,
+  unit: Unit,
+  built: BuiltUnit,
+  draft: Draft,
+  choices: Choices,
+  build: UnitBuilder,
+): boolean {
+  const { places } = built;
+  const hosts: number[] = [];
+  const given = meantLocants(substitution, built, draft);
+  for (const locant of given ?? []) {
+    const atom = locant === '→' ? places.atoms[unit.linkAt ?? 0] : places.at(locant);
+    if (atom === undefined) {
+      draft.fail(substitution.range, noSuchPlace(locant));
+      return false;
+    }
+    hosts.push(atom);
+  }
+  if (given) places.fresh = false;
+  const chosen: Locant[] = [];
+  let offered = 0;
+  let from = 0;
+  for (let index = 0; index < substitution.count; index++) {
+    const before = draft.atoms.length;
+    const child = build(substitution.unit, draft, choices);
+    const [free, ...others] = child?.free ?? [];
+    if (!child || !free || others.length > 0) {
+      draft.fail(substitution.range, 'This group has no single free valence with which it could be bound.');
+      return false;
+    }
+    let host = hosts[index];
+    if (!given) {
+      // Like groups are not told apart: each goes to the same place as the one before it, or further on.
+      const order = [...places.named()];
+      const options = openPlaces(built, draft, before, free).filter((atom) => order.indexOf(atom) >= from);
+      if (options.length === 0) {
+        draft.fail(substitution.range, 'There is no place left on the parent for this group.');
+        return false;
+      }
+      offered = Math.max(offered, options.length);
+      host = options[places.fresh ? 0 : choices.pick(options.length)]!;
+      from = order.indexOf(host);
+      chosen.push(places.locantOf(host)!);
+      places.fresh = false;
+    }
+    if (host === undefined || draft.free(host) < free.order) {
+      draft.fail(substitution.range, fifthBond(built, host ?? 0));
+      return false;
+    }
+    draft.bond(host, free.atom, free.order);
+  }
+  if (!given && (offered > 1 || substitution.count > 1) && places.atoms.length > 1) {
+    draft.insertions.push({ at: substitution.at, text: `${chosen.join(',')}-` });
+    places.opened = true;
+  }
+  return true;
+}
+
+/** `o`, `m`, `p` mean 2, 3, 4 beside what is at 1 (P-14.3.1, older usage); on a bare ring the first group takes 1. */
+function meantLocants(
+  substitution: Substitution,
+  built: BuiltUnit,
+  draft: Draft,
+): readonly Locant[] | undefined {
+  const { places } = built;
+  const locants = substitution.locants;
+  if (!locants) {
+    if (places.awaiting === undefined || substitution.count !== 1) return undefined;
+    const locant = places.awaiting;
+    places.awaiting = undefined;
+    return [locant];
+  }
+  const letter = locants[0]!;
+  if (!/^[omp]$/.test(letter) || locants.length > 1) return locants;
+  const meant = { o: '2', m: '3', p: '4' }[letter]!;
+  const first = places.at('1');
+  if (first === undefined || places.at('6') === undefined || places.at('7') !== undefined) return locants;
+  const inside = places.atoms.includes(first) && draft.neighbours[first]!.length === 2;
+  const bare = inside && !built.free.some(({ atom }) => atom === first);
+  if (!bare) return substitution.count === 1 ? [meant] : [letter];
+  if (substitution.count === 2) return ['1', meant];
+  places.awaiting = meant;
+  return ['1'];
+}
+
+/** Places that a group without locant can mean. Nitrogen takes only carbon groups unasked. */
+function openPlaces(
+  built: BuiltUnit,
+  draft: Draft,
+  before: number,
+  free: { atom: number; order: number },
+): number[] {
+  const { places } = built;
+  const carbon = draft.atoms[free.atom]!.atomicNumber === 6;
+  return [...places.named()].filter((atom) => {
+    if (atom >= before || places.spent.has(atom)) return false;
+    // Greek locants mark side chains (toluene, acetophenone), which a bare prefix does not mean.
+    if (/^[α-ω]/.test(places.locantOf(atom)!)) return false;
+    const element = draft.atoms[atom]!.atomicNumber;
+    if (element === 8 || (element === 16 && places.atoms.length > 1)) return false;
+    if (element === 7 && !carbon && places.atoms.length > 1) return false;
+    const usual =
+      draft.usualHydrogen.includes(atom) && draft.atoms[atom]!.mancude && !draft.atoms[atom]!.saturated;
+    const valence = built.free.filter((one) => one.atom === atom).reduce((sum, one) => sum + one.order, 0);
+    const spare = (usual ? draft.free(atom) : draft.freeBesideRing(atom)) - valence;
+    return spare >= free.order;
+  });
+}

@@ -1,0 +1,95 @@
+/** Double and triple bonds named by `ene` and `yne` (P-31.1.4.2.4). */
+import type { Locant, Unit } from '../tree.ts';
+import { noSuchPlace } from './built-unit.ts';
+import type { Choices } from './choices.ts';
+import type { Draft } from './draft.ts';
+import type { Places } from './places.ts';
+
+export function placeUnsaturations(unit: Unit, places: Places, draft: Draft, choices: Choices): boolean {
+  for (const { order, count, locants, at, range } of unit.unsaturations) {
+    if (locants) {
+      for (const locant of locants) {
+        const from = places.at(locant);
+        const to = from === undefined ? undefined : next(places, locant);
+        if (from === undefined || to === undefined) {
+          draft.fail(range, noSuchPlace(locant));
+          return false;
+        }
+        if (!raise(draft, from, to, order)) {
+          draft.fail(
+            range,
+            `A multiple bond at position ${locant} leaves an atom with too many bonds. Check the locants.`,
+          );
+          return false;
+        }
+      }
+      places.fresh = false;
+      continue;
+    }
+    if (places.atoms.length === 2 && count === 1) {
+      if (!raise(draft, places.atoms[0]!, places.atoms[1]!, order)) return false;
+      continue;
+    }
+    const chosen: Locant[] = [];
+    let from = 0;
+    for (let index = 0; index < count; index++) {
+      // On a bare ring the first double bond is at position 1.
+      const options = bondsOf(places, draft, order).filter(
+        (bond) => bond.position >= from && !cumulated(draft, bond.from, bond.to),
+      );
+      const only = places.alike && unit.endings.length === 0 && places.fresh ? options.slice(0, 1) : options;
+      if (only.length === 0) return false;
+      const bond = only[choices.pick(only.length)]!;
+      raise(draft, bond.from, bond.to, order);
+      places.fresh = false;
+      from = bond.position + 1;
+      chosen.push(places.locantOf(bond.from)!);
+    }
+    draft.insertions.push({ at, text: `${count > 1 ? '' : ''}-${chosen.join(',')}-` });
+    places.opened ||= count > 1 || !(places.alike && unit.endings.length === 0);
+  }
+  return true;
+}
+
+/** The atom that follows in the numbering and is bound to this one; from the last of a ring back to 1. */
+function next(places: Places, locant: Locant): number | undefined {
+  const index = places.atoms.indexOf(places.at(locant)!);
+  const bound = (other: number) =>
+    places.skeleton.bonds.some(
+      (bond) => (bond.from === index && bond.to === other) || (bond.to === index && bond.from === other),
+    );
+  const following = places.at(String(Number.parseInt(locant, 10) + 1));
+  const other = following === undefined ? -1 : places.atoms.indexOf(following);
+  if (other >= 0 && bound(other)) return following;
+  return places.skeleton.kind === 'ring' && index === places.atoms.length - 1 && bound(0)
+    ? places.atoms[0]
+    : undefined;
+}
+
+function raise(draft: Draft, from: number, to: number, order: number): boolean {
+  const bond = draft.neighbours[from]!.find((one) => one.atom === to)?.bond;
+  if (bond === undefined || draft.bonds[bond]!.order !== 1) return false;
+  if (draft.free(from) < order - 1 || draft.free(to) < order - 1) return false;
+  draft.bonds[bond]!.order = order;
+  return true;
+}
+
+function bondsOf(
+  places: Places,
+  draft: Draft,
+  order: number,
+): { from: number; to: number; position: number }[] {
+  const found: { from: number; to: number; position: number }[] = [];
+  places.atoms.forEach((from, position) => {
+    const locant = places.locantOf(from);
+    const to = locant === undefined ? undefined : next(places, locant);
+    if (to === undefined || draft.free(from) < order - 1 || draft.free(to) < order - 1) return;
+    const bond = draft.neighbours[from]!.find((one) => one.atom === to)!.bond;
+    if (draft.bonds[bond]!.order === 1) found.push({ from, to, position });
+  });
+  return found;
+}
+
+function cumulated(draft: Draft, from: number, to: number): boolean {
+  return [from, to].some((atom) => draft.neighbours[atom]!.some(({ bond }) => draft.bonds[bond]!.order > 1));
+}

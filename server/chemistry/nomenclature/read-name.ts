@@ -1,0 +1,109 @@
+/**
+ * Reads chemical names: what a name can mean, or where it stops being understood. Follows the IUPAC Recommendations
+ * 2013 (Favre, Powell: Nomenclature of Organic Chemistry) and the usage of 1979 and 1993 still met in notebooks.
+ */
+import type { NameReading, NameRemark, Reading } from './reading.ts';
+import { completedName, meaningsOf } from './readings.ts';
+import { createCommonNames, type CommonNames } from './common-names.ts';
+import { arrangedReading } from './arrange.ts';
+import { unknownName } from './unknown.ts';
+import { ItemReader } from './words/items.ts';
+import { createLexicon, type Lexicon } from './words/lexicon.ts';
+import { prepareName, type PreparedName } from './words/prepared.ts';
+import { sentences } from './words/sentence.ts';
+
+export interface NameLimits {
+  /** Readings listed at most; 32 unless told. */
+  readonly readings?: number;
+  /** Stereoisomers listed for each reading at most; 32 unless told. */
+  readonly stereoisomers?: number;
+  /** Steps of reading and structures built; 4000 unless told. */
+  readonly steps?: number;
+}
+
+export interface NameReader {
+  /** Every structure that the name can mean. Any string is valid input; effort is bounded by counted steps. */
+  readName(text: string, limits?: NameLimits): NameReading;
+  /** Words that the reader knows, for completion. */
+  vocabularyWords(): readonly string[];
+}
+
+const shared: { reader?: NameReader } = {};
+
+/** Reads a name with a reader made at the first call and kept. */
+export function readName(text: string, limits: NameLimits = {}): NameReading {
+  return (shared.reader ??= createNameReader()).readName(text, limits);
+}
+
+/** Words of the vocabulary, sorted, for completion. */
+export function vocabularyWords(): readonly string[] {
+  return (shared.reader ??= createNameReader()).vocabularyWords();
+}
+
+/** Names longer than this are not read. */
+const longestName = 1500;
+
+/** A reader with its vocabulary indexed (a few milliseconds); keep it, and use it again. */
+export function createNameReader(): NameReader {
+  const lexicon = createLexicon();
+  const common = createCommonNames();
+  return {
+    readName: (text, limits = {}) => read(text, limits, lexicon, common),
+    vocabularyWords: () => [...new Set([...common.names, ...lexicon.list])].sort(),
+  };
+}
+
+function read(text: string, limits: NameLimits, lexicon: Lexicon, common: CommonNames): NameReading {
+  const tooLong = text.length > longestName;
+  const prepared = prepareName(tooLong ? '' : text);
+  if (prepared.text === '') {
+    const message = tooLong ? 'This name is too long to be read.' : 'There is no name here.';
+    return { kind: 'unknown', stoppedAt: 0, range: { start: 0, end: text.length }, message, suggestions: [] };
+  }
+  const known = common.lookUp(prepared.lower);
+  if (known) {
+    return known.kind === 'mixture'
+      ? { kind: 'mixture', message: known.message, components: [] }
+      : {
+          kind: 'understood',
+          readings: [arrangedReading(text, known.molecule, undefined, prepared, limits).reading],
+          remarks: [],
+        };
+  }
+  const reader = new ItemReader(prepared, lexicon, limits.steps ?? 4000);
+  const found = sentences(reader);
+  const { meanings, complete, failure } = meaningsOf(found, limits.steps ?? 4000);
+  if (meanings.length === 0)
+    return unknownName(text, prepared, reader, failure, [...lexicon.list, ...common.names]);
+  const cap = limits.readings ?? 32;
+  const remarks = new Map<string, NameRemark>();
+  const readings = meanings.slice(0, cap).map((meaning): Reading => {
+    const name = meanings.length === 1 ? text : completed(text, prepared, meaning.insertions);
+    const arranged = arrangedReading(name, meaning.molecule, meaning.draft, prepared, limits);
+    for (const remark of arranged.remarks)
+      remarks.set(`${String(remark.range.start)} ${remark.message}`, remark);
+    return arranged.reading;
+  });
+  return {
+    kind: 'understood',
+    readings,
+    remarks: [...remarks.values()],
+    ...(meanings.length > cap ? { count: meanings.length } : complete ? {} : { count: meanings.length }),
+  };
+}
+
+/** Insertions are written into the prepared text, unless it differs from what was typed only by its length. */
+function completed(
+  text: string,
+  prepared: PreparedName,
+  insertions: Parameters<typeof completedName>[1],
+): string {
+  const inOrder = prepared.origin.every(
+    (place, index) => index === 0 || place >= prepared.origin[index - 1]!,
+  );
+  if (!inOrder) return completedName(prepared.text, insertions);
+  return completedName(
+    text,
+    insertions.map((one) => ({ ...one, at: prepared.origin[one.at] ?? text.length })),
+  );
+}

@@ -1,0 +1,61 @@
+/** What is said of a name that was not understood: where reading stopped, and which known words are near. */
+import leven from 'leven';
+import type { TextRange } from '../text.ts';
+import type { UnknownName } from './reading.ts';
+import type { ItemReader } from './words/items.ts';
+import type { PreparedName } from './words/prepared.ts';
+
+const wordCharacter = /[\p{L}]/u;
+
+export function unknownName(
+  original: string,
+  prepared: PreparedName,
+  reader: ItemReader,
+  failure: { range: TextRange; message: string } | undefined,
+  vocabulary: readonly string[],
+): UnknownName {
+  const place = (offset: number) =>
+    Math.min(prepared.origin[Math.min(offset, prepared.text.length)] ?? original.length, original.length);
+  if (failure) {
+    const range = ordered(place(failure.range.start), place(failure.range.end));
+    return { kind: 'unknown', stoppedAt: range.start, range, message: failure.message, suggestions: [] };
+  }
+  const stopped = Math.min(reader.furthest, prepared.text.length);
+  let start = stopped;
+  while (start < prepared.text.length && !wordCharacter.test(prepared.text[start]!)) start++;
+  if (start === prepared.text.length) start = stopped;
+  let end = start;
+  while (end < prepared.text.length && wordCharacter.test(prepared.text[end]!)) end++;
+  const word = prepared.lower.slice(start, end);
+  const range = ordered(place(start), place(end));
+  const message = reader.exhausted
+    ? 'This name can be cut in so many ways that reading it was given up.'
+    : word === ''
+      ? 'The name ends before it names a compound. Something is missing at its end.'
+      : `“${original.slice(range.start, range.end)}” is not understood here. Check the spelling, or give the structure as SMILES.`;
+  return {
+    kind: 'unknown',
+    stoppedAt: place(stopped),
+    range,
+    message,
+    suggestions: nearest(word, vocabulary),
+  };
+}
+
+function ordered(start: number, end: number): TextRange {
+  return { start: Math.min(start, end), end: Math.max(start, end) };
+}
+
+/** The three nearest words, at most two letters in five apart. */
+function nearest(word: string, vocabulary: readonly string[]): string[] {
+  if (word.length < 4 || word.length > 40) return [];
+  const limit = Math.max(1, Math.floor(word.length * 0.34));
+  const scored: { known: string; distance: number }[] = [];
+  for (const known of vocabulary) {
+    if (Math.abs(known.length - word.length) > limit) continue;
+    const distance = leven(word, known);
+    if (distance <= limit && distance > 0) scored.push({ known, distance });
+  }
+  scored.sort((a, b) => a.distance - b.distance || (a.known < b.known ? -1 : 1));
+  return [...new Set(scored.map((one) => one.known))].slice(0, 3);
+}

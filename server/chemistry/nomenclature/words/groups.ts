@@ -1,0 +1,254 @@
+/** Words that stand for one group or one parent: every way in which one can begin at a place of the name. */
+import { chain, ring, type SkeletonGraph } from '../build/skeleton.ts';
+import type { Ending, SuffixEntry, Unit } from '../tree.ts';
+import { acylWithYl } from '../vocabulary/acids.ts';
+import { alkoxySkeleton, wordsAt, type Lexicon, type Word } from './lexicon.ts';
+import { ringNameAt } from './ring-names.ts';
+import { chainTailsAt, endingsAt, type Tail } from './tails.ts';
+import { descriptorAt } from './von-baeyer.ts';
+
+export interface Group {
+  readonly unit: Unit;
+  readonly role: 'radical' | 'parent';
+  readonly end: number;
+  /** A stem with which an unbranched alkyl group begins, so that `n-` before it means `normal`. */
+  readonly normal?: boolean;
+}
+
+const bare = (skeletons: readonly SkeletonGraph[], start: number, end: number): Unit => ({
+  skeletons,
+  replacements: [],
+  unsaturations: [],
+  endings: [],
+  hydro: [],
+  indicated: [],
+  stereo: [],
+  groupings: [],
+  range: { start, end },
+  parentAt: start,
+});
+
+/** Groups and parents that begin at the offset, brackets excepted. */
+export function groupsAt(text: string, lower: string, offset: number, lexicon: Lexicon): Group[] {
+  const found: Group[] = [];
+  for (const word of wordsAt(lexicon.words, lower, offset)) {
+    found.push(...groupsOf(word.value, text, lower, offset, word.end, lexicon));
+  }
+  if (lower.startsWith('cyclo', offset)) {
+    for (const word of wordsAt(lexicon.words, lower, offset + 5)) {
+      if (word.value.kind !== 'alkane' || word.value.size < 3) continue;
+      const skeletons = [ring(word.value.size)];
+      found.push(...withTails(skeletons, offset, chainTailsAt(text, lower, word.end, lexicon)));
+      if (lower.startsWith('oxy', word.end)) found.push(cycloalkoxy(skeletons, offset, word.end + 3));
+    }
+  }
+  const descriptor = descriptorAt(lower, offset);
+  if (descriptor) {
+    for (const word of wordsAt(lexicon.words, lower, descriptor.end)) {
+      const skeleton = word.value.kind === 'alkane' ? descriptor.skeleton(word.value.size) : undefined;
+      if (skeleton)
+        found.push(...withTails([skeleton], offset, chainTailsAt(text, lower, word.end, lexicon)));
+    }
+  }
+  for (const name of ringNameAt(text, lower, offset, lexicon)) {
+    found.push(...ringForms(() => name.skeletons, text, lower, offset, name.end, lexicon));
+  }
+  return found;
+}
+
+function groupsOf(
+  word: Word,
+  text: string,
+  lower: string,
+  start: number,
+  end: number,
+  lexicon: Lexicon,
+): Group[] {
+  switch (word.kind) {
+    case 'alkane': {
+      const groups = withTails([chain(word.size)], start, chainTailsAt(text, lower, end, lexicon)).map(
+        (group) => ({
+          ...group,
+          normal: true,
+        }),
+      );
+      if (lower.startsWith('oxy', end)) {
+        const unit = {
+          ...bare([alkoxySkeleton(word.size)], start, end + 3),
+          attach: { atom: 0, order: 1 as const },
+        };
+        groups.push({ unit, role: 'radical', end: end + 3, normal: true });
+      }
+      return groups;
+    }
+    case 'radical': {
+      const unit: Unit = {
+        ...bare(word.skeletons(), start, end),
+        attach: { atom: 0, order: word.order },
+        ...(word.linkAt === undefined ? {} : { linkAt: word.linkAt }),
+        ...(word.needsLink === true ? { needsLink: true } : {}),
+      };
+      return [{ unit, role: 'radical', end }];
+    }
+    case 'contracted': {
+      const yl: Ending = { suffix: freeValence, count: 1, at: start, range: { start, end } };
+      return [{ unit: { ...bare(word.skeletons(), start, end), endings: [yl] }, role: 'radical', end }];
+    }
+    case 'branched':
+      return branchedForms(word.skeletons, word.oxy, text, lower, start, end, lexicon);
+    case 'ring':
+    case 'parent':
+      return ringForms(word.skeletons, text, lower, start, end, lexicon);
+    case 'acid':
+      return acidForms(word, lower, start, end);
+    default:
+      return [];
+  }
+}
+
+const freeValence: SuffixEntry = { name: 'yl', kind: 'free', group: '1' };
+
+function withTails(skeletons: readonly SkeletonGraph[], start: number, tails: readonly Tail[]): Group[] {
+  return tails.map((tail) => ({
+    unit: { ...bare(skeletons, start, tail.end), unsaturations: tail.unsaturations, endings: tail.endings },
+    role: isRadical(tail.endings) ? 'radical' : 'parent',
+    end: tail.end,
+  }));
+}
+
+function isRadical(endings: readonly Ending[]): boolean {
+  return endings.some((ending) => ending.suffix.kind === 'free' || ending.suffix.radical === true);
+}
+
+function cycloalkoxy(skeletons: readonly SkeletonGraph[], start: number, end: number): Group {
+  const made = skeletons.map((skeleton): SkeletonGraph => ({
+    ...skeleton,
+    atoms: [...skeleton.atoms, { atomicNumber: 8, charge: 0, isotope: 0, locants: [], mancude: false }],
+    bonds: [...skeleton.bonds, { from: 0, to: skeleton.atoms.length, order: 1 }],
+  }));
+  const atom = made[0]!.atoms.length - 1;
+  return { unit: { ...bare(made, start, end), attach: { atom, order: 1 } }, role: 'radical', end };
+}
+
+/** `pyridine`, `pyridin-2-yl`, `pyridine-3-carboxylic acid`; the final e is elided before a vowel. */
+function ringForms(
+  skeletons: () => readonly SkeletonGraph[],
+  text: string,
+  lower: string,
+  start: number,
+  end: number,
+  lexicon: Lexicon,
+): Group[] {
+  const plainEnd = lower[end] === 'e' ? end + 1 : end;
+  const made = skeletons();
+  if (made.length === 0) return [];
+  const groups: Group[] = [{ unit: bare(made, start, plainEnd), role: 'parent', end: plainEnd }];
+  if (plainEnd !== end) groups.push({ unit: bare(made, start, end), role: 'parent', end });
+  groups.push(...withTails(made, start, endingsAt(text, lower, end, lexicon)));
+  return groups;
+}
+
+/** `isopropyl`, `tert-butoxy`, `isobutanol`, `isobutane`: whatever follows sits on the place of the free valence. */
+function branchedForms(
+  skeletons: () => readonly SkeletonGraph[],
+  oxy: () => readonly SkeletonGraph[],
+  text: string,
+  lower: string,
+  start: number,
+  end: number,
+  lexicon: Lexicon,
+): Group[] {
+  const found: Group[] = [];
+  const made = skeletons();
+  if (lower.startsWith('yl', end) && !lower.startsWith('ylid', end)) {
+    found.push({
+      unit: { ...bare(made, start, end + 2), attach: { atom: 0, order: 1 } },
+      role: 'radical',
+      end: end + 2,
+    });
+  }
+  if (lower.startsWith('oxy', end)) {
+    found.push({
+      unit: { ...bare(oxy(), start, end + 3), attach: { atom: 0, order: 1 } },
+      role: 'radical',
+      end: end + 3,
+    });
+  }
+  const stem = lower.slice(start, end);
+  const saturated = lower.startsWith('an', end) ? end + 2 : end;
+  if (lower.startsWith('ane', end) && /^(?:iso|neo)/.test(stem)) {
+    found.push({ unit: bare(made, start, end + 3), role: 'parent', end: end + 3 });
+  }
+  for (const tail of endingsAt(text, lower, saturated, lexicon)) {
+    const ending = tail.endings[0]!;
+    if (ending.suffix.kind !== 'on' || ending.locants || ending.count > 1) continue;
+    if (saturated === end && ending.suffix.name !== 'amine') continue;
+    if (!['ol', 'thiol', 'amine'].includes(ending.suffix.name)) continue;
+    // The group goes to the first atom of the skeleton: written as a locant that only that atom has.
+    const marked = made.map((skeleton) => ({
+      ...skeleton,
+      atoms: skeleton.atoms.map((atom, index) =>
+        index === 0 ? { ...atom, locants: [...atom.locants, '*'] } : atom,
+      ),
+    }));
+    const fixed: Ending = { ...ending, locants: ['*'] };
+    found.push({
+      unit: { ...bare(marked, start, tail.end), endings: [fixed] },
+      role: 'parent',
+      end: tail.end,
+    });
+  }
+  return found;
+}
+
+const atCarbon = (name: string, group: string, more: Partial<SuffixEntry> = {}): SuffixEntry => ({
+  name,
+  kind: 'at',
+  group,
+  ...more,
+});
+const acidEndings: readonly (readonly [text: string, suffix: SuffixEntry])[] = [
+  ['ic acid', atCarbon('oic acid', '=O O', { locants: '- O' })],
+  ['oic acid', atCarbon('oic acid', '=O O', { locants: '- O' })],
+  ['ate', atCarbon('oate', '=O [O-]', { anion: true })],
+  ['oate', atCarbon('oate', '=O [O-]', { anion: true })],
+  ['ic anhydride', atCarbon('anhydride', '=O [O-]', { anion: true })],
+  ['oic anhydride', atCarbon('anhydride', '=O [O-]', { anion: true })],
+  ['oyl', atCarbon('oyl', '=O', { radical: true })],
+  ['yl', atCarbon('oyl', '=O', { radical: true })],
+];
+const otherEndings: readonly (readonly [text: string, suffix: SuffixEntry])[] = [
+  ['amide', atCarbon('amide', '=O N', { locants: '- N' })],
+  ['hydroxamic acid', atCarbon('hydroxamic acid', '=O NO', { locants: '- N O' })],
+  ['ohydroxamic acid', atCarbon('hydroxamic acid', '=O NO', { locants: '- N O' })],
+  ['onitrile', atCarbon('nitrile', '#N')],
+  ['aldehyde', atCarbon('al', '=O')],
+  ['ohydrazide', atCarbon('hydrazide', '=O NN', { locants: "- N N'" })],
+  ['amidine', atCarbon('imidamide', '=N N', { locants: "N' N" })],
+];
+
+/** Everything made from an acid with a retained name. */
+function acidForms(
+  word: Extract<Word, { kind: 'acid' }>,
+  lower: string,
+  start: number,
+  end: number,
+): Group[] {
+  const found: Group[] = [];
+  const places = word.line[4].split(' ');
+  for (const [ending, suffix] of word.form === 'acid' ? acidEndings : otherEndings) {
+    if (!lower.startsWith(ending, end)) continue;
+    if (ending === 'yl' && !acylWithYl.has(word.line[0])) continue;
+    const last = end + ending.length;
+    const one: Ending = {
+      suffix,
+      count: places.length,
+      locants: places,
+      at: end,
+      range: { start: end, end: last },
+    };
+    const role = suffix.radical === true ? 'radical' : 'parent';
+    found.push({ unit: { ...bare(word.skeletons(), start, last), endings: [one] }, role, end: last });
+  }
+  return found;
+}

@@ -1,0 +1,36 @@
+/** The pieces of a row: one substituent, or one prefix that changes the parent. */
+import type { Locant, StereoWord, Unit } from '../tree.ts';
+
+export interface GroupItem {
+  readonly kind: 'group';
+  readonly locants?: readonly Locant[];
+  readonly count: number;
+  /** `bis`, or a bracket follows: the multiplier belongs to a compound substituent. */
+  readonly unit: Unit;
+  readonly role: 'radical' | 'parent';
+  /** Nothing, not even a hyphen, stands between the item before and this one. */
+  readonly joins: boolean;
+  readonly bracketed: boolean;
+  readonly start: number;
+  readonly end: number;
+}
+
+export type Item =
+  | GroupItem
+  | { readonly kind: 'stereo'; readonly words: readonly StereoWord[]; readonly start: number }
+  | { readonly kind: 'indicated'; readonly locants: readonly Locant[]; readonly start: number }
+  | {
+      readonly kind: 'hydro';
+      readonly locants?: readonly Locant[];
+      readonly count: number;
+      readonly start: number;
+      readonly end: number;
+    }
+  | {
+      readonly kind: 'replacement';
+      readonly locants?: readonly Locant[];
+      readonly count: number;
+      readonly atomicNumber: number;
+      readonly start: number;
+      readonly end: number;
+    };

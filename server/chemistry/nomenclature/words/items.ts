@@ -1,0 +1,186 @@
+/**
+ * A stretch of name without spaces as a row of items: substituents with locants and multiplying affixes, and at its end
+ * a parent or a radical. Every way of cutting it is found once per place (a chart), and steps are counted.
+ */
+import type { Locant, Unit } from '../tree.ts';
+import type { Item } from './item.ts';
+import { groupsAt } from './groups.ts';
+import { wordsAt, type Lexicon } from './lexicon.ts';
+import { indicatedAt, locantsAt, stereoAt } from './locants.ts';
+import type { PreparedName } from './prepared.ts';
+import { structured } from './structure.ts';
+
+export interface Row {
+  readonly items: readonly Item[];
+  readonly end: number;
+}
+
+/** What a stretch means: a unit, and how many of it (`diethyl` is two radicals). */
+export interface Stretch {
+  readonly unit: Unit;
+  readonly count: number;
+  readonly role: 'radical' | 'parent';
+  readonly end: number;
+}
+
+const rowCap = 24;
+const boundary = /[\s()[\];:,·*.+/]|$/y;
+
+export class ItemReader {
+  readonly #rows = new Map<number, readonly Row[]>();
+  readonly #open = new Set<number>();
+  /** The furthest place to which every letter was understood. */
+  furthest = 0;
+  steps = 0;
+
+  readonly name: PreparedName;
+  readonly lexicon: Lexicon;
+  readonly stepLimit: number;
+
+  constructor(name: PreparedName, lexicon: Lexicon, stepLimit: number) {
+    this.name = name;
+    this.lexicon = lexicon;
+    this.stepLimit = stepLimit;
+  }
+
+  get exhausted(): boolean {
+    return this.steps > this.stepLimit;
+  }
+
+  /** All stretches that begin at the offset. */
+  stretchesAt(offset: number): Stretch[] {
+    const found: Stretch[] = [];
+    for (const row of this.rowsAt(offset)) {
+      const made = structured(row.items, this.name);
+      if (made) found.push({ ...made, end: row.end });
+      if (found.length >= rowCap) break;
+    }
+    return found;
+  }
+
+  rowsAt(offset: number): readonly Row[] {
+    const known = this.#rows.get(offset);
+    if (known) return known;
+    if (this.#open.has(offset) || this.exhausted || this.#open.size > 120) return [];
+    this.#open.add(offset);
+    const rows: Row[] = [];
+    for (const head of this.#itemsAt(offset)) {
+      this.steps++;
+      if (rows.length >= rowCap || this.exhausted) break;
+      if (head.item.kind === 'group') {
+        this.furthest = Math.max(this.furthest, head.end);
+        boundary.lastIndex = head.end;
+        if (boundary.test(this.name.text)) rows.push({ items: [head.item], end: head.end });
+        if (head.item.role === 'parent') continue;
+      }
+      const next = this.name.text[head.end] === '-' ? head.end + 1 : head.end;
+      if (next >= this.name.text.length) continue;
+      for (const rest of this.rowsAt(next)) {
+        if (rows.length >= rowCap) break;
+        const first = rest.items[0]!;
+        if (head.item.kind === 'replacement' && first.kind === 'stereo') continue;
+        const items =
+          first.kind === 'group' && next !== head.end
+            ? [{ ...first, joins: false }, ...rest.items.slice(1)]
+            : rest.items;
+        rows.push({ items: [head.item, ...items], end: rest.end });
+      }
+    }
+    this.#open.delete(offset);
+    this.#rows.set(offset, rows);
+    return rows;
+  }
+
+  *#itemsAt(offset: number): Generator<{ item: Item; end: number }> {
+    const { text } = this.name;
+    const stereo = stereoAt(text, offset);
+    if (stereo) yield { item: { kind: 'stereo', words: stereo.value, start: offset }, end: stereo.end };
+    const hydrogen = indicatedAt(text, offset);
+    if (hydrogen)
+      yield { item: { kind: 'indicated', locants: hydrogen.value, start: offset }, end: hydrogen.end };
+    const locants = locantsAt(text, offset);
+    if (locants) yield* this.#countedAt(offset, locants.end, locants.value);
+    yield* this.#countedAt(offset, offset, undefined);
+  }
+
+  *#countedAt(
+    start: number,
+    from: number,
+    locants: readonly Locant[] | undefined,
+  ): Generator<{ item: Item; end: number }> {
+    const { lower } = this.name;
+    if (locants === undefined || locants.length === 1) yield* this.#groupsAt(start, from, locants, 1);
+    for (const word of wordsAt(this.lexicon.words, lower, from)) {
+      if (word.value.kind === 'multiplier') {
+        const count = word.value.count;
+        if (
+          locants &&
+          locants.length !== count &&
+          !(locants.length === 1 && /^[omp]$/.test(locants[0]!) && count === 2)
+        )
+          continue;
+        yield* this.#groupsAt(start, word.end, locants, count);
+      }
+    }
+  }
+
+  *#groupsAt(
+    start: number,
+    from: number,
+    locants: readonly Locant[] | undefined,
+    count: number,
+  ): Generator<{ item: Item; end: number }> {
+    const { text, lower } = this.name;
+    const place = { ...(locants ? { locants } : {}), count, start };
+    const bracket = text[from];
+    if (bracket === '(' || bracket === '[') {
+      for (const inner of this.stretchesAt(from + 1)) {
+        if (
+          inner.role !== 'radical' ||
+          text[inner.end] !== (bracket === '(' ? ')' : ']') ||
+          inner.count !== 1
+        )
+          continue;
+        const end = inner.end + 1;
+        this.furthest = Math.max(this.furthest, end);
+        yield {
+          item: {
+            kind: 'group',
+            ...place,
+            unit: inner.unit,
+            role: 'radical',
+            joins: !locants,
+            bracketed: true,
+            end,
+          },
+          end,
+        };
+      }
+      return;
+    }
+    for (const word of wordsAt(this.lexicon.words, lower, from)) {
+      if (word.value.kind === 'hydro')
+        yield { item: { kind: 'hydro', ...place, end: word.end }, end: word.end };
+      if (word.value.kind === 'replacement') {
+        const { atomicNumber } = word.value;
+        yield { item: { kind: 'replacement', ...place, atomicNumber, end: word.end }, end: word.end };
+      }
+    }
+    const groups = groupsAt(text, lower, from, this.lexicon);
+    groups.sort((first, second) => second.end - first.end);
+    const normal = locants?.length === 1 && count === 1 && locants[0] === 'N' && text[start] === 'n';
+    for (const group of groups) {
+      const base = {
+        kind: 'group' as const,
+        count,
+        unit: group.unit,
+        role: group.role,
+        bracketed: false,
+        start,
+        end: group.end,
+      };
+      if (normal && group.normal === true) yield { item: { ...base, joins: true }, end: group.end };
+      else yield { item: { ...base, joins: !locants, ...(locants ? { locants } : {}) }, end: group.end };
+    }
+  }
+}

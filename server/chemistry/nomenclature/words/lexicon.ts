@@ -1,0 +1,195 @@
+/** All words of the vocabulary in one trie, so that every word that begins at a place is found in a single walk. */
+import { chain, skeletonFromSmiles, type SkeletonGraph } from '../build/skeleton.ts';
+import type { SuffixEntry } from '../tree.ts';
+import { anions } from '../vocabulary/functions.ts';
+import { acids, type AcidLine } from '../vocabulary/acids.ts';
+import { alkaneStem, groupTerm, numericalTerm, numericalTermVariants } from '../vocabulary/numbers.ts';
+import { parents } from '../vocabulary/parents.ts';
+import {
+  branchedStems,
+  contractedRings,
+  joiningPrefixes,
+  linkingPrefixes,
+  simplePrefixes,
+} from '../vocabulary/prefixes.ts';
+import { rings } from '../vocabulary/rings.ts';
+import { suffixes } from '../vocabulary/suffixes.ts';
+
+export type Word =
+  | { kind: 'multiplier'; count: number; grouped: boolean }
+  | { kind: 'alkane'; size: number }
+  | { kind: 'radical'; skeletons: Lazy; order: 1 | 2 | 3; linkAt?: number; needsLink?: boolean }
+  | { kind: 'contracted'; skeletons: Lazy }
+  | { kind: 'branched'; skeletons: Lazy; oxy: Lazy }
+  | { kind: 'ring'; skeletons: Lazy }
+  | { kind: 'parent'; skeletons: Lazy }
+  | { kind: 'acid'; line: AcidLine; form: 'acid' | 'other'; skeletons: Lazy }
+  | { kind: 'hydro' }
+  | { kind: 'replacement'; atomicNumber: number };
+
+/** Skeletons are read from their SMILES when first met. */
+export type Lazy = () => readonly SkeletonGraph[];
+
+export interface Trie<T> {
+  readonly next: Map<string, Trie<T>>;
+  values: T[];
+}
+const emptyTrie = <T>(): Trie<T> => ({ next: new Map(), values: [] });
+
+function add<T>(trie: Trie<T>, word: string, value: T): void {
+  let node = trie;
+  for (const character of word) {
+    let next = node.next.get(character);
+    if (!next) node.next.set(character, (next = emptyTrie()));
+    node = next;
+  }
+  node.values.push(value);
+}
+
+/** Every value whose word begins at the offset, the longest word last. */
+export function wordsAt<T>(trie: Trie<T>, text: string, offset: number): { value: T; end: number }[] {
+  const found: { value: T; end: number }[] = [];
+  let node: Trie<T> | undefined = trie;
+  for (let at = offset; node; at++) {
+    for (const value of node.values) found.push({ value, end: at });
+    node = at < text.length ? node.next.get(text[at]!) : undefined;
+  }
+  return found;
+}
+
+function lazily(make: () => readonly (SkeletonGraph | undefined)[]): Lazy {
+  let made: readonly SkeletonGraph[] | undefined;
+  return () => (made ??= make().filter((one): one is SkeletonGraph => one !== undefined));
+}
+
+const replacements: readonly (readonly [string, number])[] = [
+  ['oxa', 8],
+  ['thia', 16],
+  ['selena', 34],
+  ['aza', 7],
+  ['phospha', 15],
+  ['sila', 14],
+  ['bora', 5],
+  ['ox', 8],
+  ['thi', 16],
+  ['az', 7],
+];
+
+export interface Lexicon {
+  readonly words: Trie<Word>;
+  readonly suffixes: Trie<SuffixEntry>;
+  readonly list: readonly string[];
+}
+
+/** Builds the index; about two thousand words. */
+export function createLexicon(): Lexicon {
+  const words = emptyTrie<Word>();
+  const list: string[] = [];
+  const put = (word: string, value: Word) => {
+    add(words, word, value);
+    if (word.length > 2) list.push(word);
+  };
+  for (let count = 2; count <= 30; count++) {
+    put(numericalTerm(count), { kind: 'multiplier', count, grouped: false });
+    put(groupTerm(count), { kind: 'multiplier', count, grouped: true });
+  }
+  put('mono', { kind: 'multiplier', count: 1, grouped: false });
+  for (let size = 1; size <= 200; size++) {
+    const stems =
+      size < 5 ? [alkaneStem(size)] : numericalTermVariants(size).map((term) => term.replace(/a$/, ''));
+    for (const stem of stems) put(stem, { kind: 'alkane', size });
+  }
+  const group = (smiles: string) => smiles.replace(/^[=#]/, '');
+  const order = (smiles: string): 1 | 2 | 3 => (smiles.startsWith('=') ? 2 : smiles.startsWith('#') ? 3 : 1);
+  for (const [name, smiles, locants] of simplePrefixes) {
+    put(name, {
+      kind: 'radical',
+      order: order(smiles),
+      skeletons: lazily(() => [skeletonFromSmiles(group(smiles), locants)]),
+    });
+  }
+  for (const [lines, needsLink] of [
+    [linkingPrefixes, false],
+    [joiningPrefixes, true],
+  ] as const) {
+    for (const [name, smiles, locants, linkAt] of lines) {
+      const skeletons = lazily(() => [skeletonFromSmiles(group(smiles), locants)]);
+      put(name, { kind: 'radical', order: order(smiles), skeletons, linkAt, needsLink });
+    }
+  }
+  const ringSkeletons = new Map<string, Lazy>();
+  for (const [name, smiles, locants, mancude, indicated] of rings) {
+    const skeletons = lazily(() => [skeletonFromSmiles(smiles, locants, mancude === 'm', indicated)]);
+    ringSkeletons.set(name, skeletons);
+    put(name, { kind: 'ring', skeletons });
+  }
+  for (const [name, ring] of contractedRings)
+    put(name, { kind: 'contracted', skeletons: ringSkeletons.get(ring)! });
+  for (const [name, smiles, locants] of branchedStems) {
+    put(name, {
+      kind: 'branched',
+      skeletons: lazily(() => [skeletonFromSmiles(smiles, locants)]),
+      oxy: lazily(() => [skeletonFromSmiles(`O${smiles}`)]),
+    });
+  }
+  putParents(put);
+  for (const line of acids) {
+    const skeletons = lazily(() => [skeletonFromSmiles(line[2], line[3])]);
+    put(line[0], { kind: 'acid', line, form: 'acid', skeletons });
+    if (line[1] !== '') put(line[1], { kind: 'acid', line, form: 'other', skeletons });
+  }
+  for (const [name, smiles, locants] of anions) {
+    put(name, { kind: 'parent', skeletons: lazily(() => [skeletonFromSmiles(smiles, locants)]) });
+  }
+  put('hydro', { kind: 'hydro' });
+  for (const [name, atomicNumber] of replacements) add(words, name, { kind: 'replacement', atomicNumber });
+  const endings = emptyTrie<SuffixEntry>();
+  for (const suffix of suffixes) {
+    add(endings, suffix.name, suffix);
+    if (suffix.name.length > 2) list.push(suffix.name);
+  }
+  return { words, suffixes: endings, list };
+}
+
+/** Names with siblings (`xylene`) stand for all of them, and with `o-`, `m-`, `p-` or `ortho-` … for one. */
+function putParents(put: (word: string, value: Word) => void): void {
+  const byName = new Map<string, (readonly [string, string, string, string?])[]>();
+  for (const line of parents) byName.set(line[0], [...(byName.get(line[0]) ?? []), line]);
+  const long: Readonly<Record<string, string>> = { 'o-': 'ortho-', 'm-': 'meta-', 'p-': 'para-' };
+  for (const [name, lines] of byName) {
+    const made = lines.map((line) =>
+      lazily(() => {
+        const skeleton = skeletonFromSmiles(line[1], line[2]);
+        return [skeleton && line[3] !== undefined ? { ...skeleton, mark: line[3] } : skeleton];
+      }),
+    );
+    put(name, { kind: 'parent', skeletons: () => made.flatMap((one) => one()) });
+    lines.forEach((line, index) => {
+      if (line[3] === undefined) return;
+      const skeletons = lazily(() => made[index]!().map((one) => withoutMark(one)));
+      put(line[3] + name, { kind: 'parent', skeletons });
+      if (long[line[3]] !== undefined) put(long[line[3]]! + name, { kind: 'parent', skeletons });
+    });
+  }
+}
+
+function withoutMark(skeleton: SkeletonGraph): SkeletonGraph {
+  const { atoms, bonds, indicated, kind, stereo } = skeleton;
+  return { atoms, bonds, indicated, kind, stereo };
+}
+
+/** Skeleton of an alkoxy group: the oxygen first, then the chain. */
+export function alkoxySkeleton(size: number): SkeletonGraph {
+  const alkyl = chain(size);
+  const oxygen = { atomicNumber: 8, charge: 0, isotope: 0, locants: [], mancude: false };
+  return {
+    kind: 'chain',
+    atoms: [oxygen, ...alkyl.atoms],
+    bonds: [
+      { from: 0, to: 1, order: 1 },
+      ...alkyl.bonds.map((bond) => ({ from: bond.from + 1, to: bond.to + 1, order: 1 })),
+    ],
+    indicated: [],
+    stereo: [],
+  };
+}

@@ -1,0 +1,126 @@
+/**
+ * A name made ready for reading: one spelling for dashes, primes and spaces, inverted index names turned round, and for
+ * every character the place it came from, so that ranges still point into what was typed.
+ */
+export interface PreparedName {
+  readonly text: string;
+  readonly lower: string;
+  /** For each character of `text`, and its end, the offset in the original. */
+  readonly origin: readonly number[];
+}
+
+const oneForOne: Readonly<Record<string, string>> = {
+  '‐': '-',
+  '‑': '-',
+  '‒': '-',
+  '–': '-',
+  '—': '-',
+  '−': '-',
+  '’': "'",
+  '‘': "'",
+  '′': "'",
+  ʹ: "'",
+  '`': "'",
+  '´': "'",
+  '\u00a0': ' ',
+  '\u2009': ' ',
+  '\u202f': ' ',
+  '\t': ' ',
+  '{': '(',
+  '}': ')',
+  '[': '[',
+  ']': ']',
+  '⁰': '0',
+  '¹': '1',
+  '²': '2',
+  '³': '3',
+  '⁴': '4',
+  '⁵': '5',
+  '⁶': '6',
+  '⁷': '7',
+  '⁸': '8',
+  '⁹': '9',
+};
+const greek: Readonly<Record<string, string>> = {
+  alpha: 'α',
+  beta: 'β',
+  gamma: 'γ',
+  delta: 'δ',
+  epsilon: 'ε',
+  omega: 'ω',
+  lambda: 'λ',
+};
+
+/** Prepares a name; its length may change, `origin` says how. Linear in the length of the text. */
+export function prepareName(original: string): PreparedName {
+  let text = '';
+  const origin: number[] = [];
+  const put = (characters: string, from: number) => {
+    for (const character of characters) {
+      text += character;
+      origin.push(from);
+    }
+  };
+  for (let index = 0; index < original.length; index++) {
+    const character = original[index]!;
+    if (character === '″' || character === '"') put("''", index);
+    else if (character === '‴') put("'''", index);
+    else if ((character === ' ' || character === '\n') && (text === '' || text.endsWith(' '))) continue;
+    else put(oneForOne[character] ?? character, index);
+  }
+  while (text.endsWith(' ')) {
+    text = text.slice(0, -1);
+    origin.pop();
+  }
+  origin.push(original.length);
+  return settle({ text, lower: text.toLowerCase(), origin });
+}
+
+/** Applies the spellings that change the length: `sulph`, `.alpha.`, `alpha-`, and inverted names. */
+function settle(name: PreparedName): PreparedName {
+  let result = name;
+  if (name.lower.includes('sulph')) result = replaceAll(result, /sulph/gi, () => 'sulf');
+  result = replaceAll(
+    result,
+    /\.?\b(alpha|beta|gamma|delta|epsilon|omega|lambda)\b\.?(?=[-,')])/gi,
+    (word) => greek[word.replace(/\./g, '').toLowerCase()]!,
+  );
+  return uninverted(result);
+}
+
+function replaceAll(
+  name: PreparedName,
+  pattern: RegExp,
+  replacement: (match: string) => string,
+): PreparedName {
+  let text = '';
+  const origin: number[] = [];
+  let last = 0;
+  for (const match of name.text.matchAll(pattern)) {
+    text += name.text.slice(last, match.index);
+    origin.push(...name.origin.slice(last, match.index));
+    for (const character of replacement(match[0])) {
+      text += character;
+      origin.push(name.origin[match.index]!);
+    }
+    last = match.index + match[0].length;
+  }
+  if (last === 0) return name;
+  text += name.text.slice(last);
+  for (const place of name.origin.slice(last)) origin.push(place);
+  return { text, lower: text.toLowerCase(), origin };
+}
+
+/** `benzene, 1-bromo-4-chloro-` as index names print it becomes `1-bromo-4-chlorobenzene`. */
+function uninverted(name: PreparedName): PreparedName {
+  if (!name.text.endsWith('-')) return name;
+  const comma = name.text.lastIndexOf(', ');
+  if (comma <= 0) return name;
+  const end = name.text.length - 1;
+  const pick = (list: string) => list.slice(comma + 2, end) + list.slice(0, comma);
+  return {
+    text: pick(name.text),
+    lower: pick(name.lower),
+    origin: [...name.origin.slice(comma + 2, end), ...name.origin.slice(0, comma), name.origin[comma]!],
+  };
+}

@@ -1,0 +1,120 @@
+/** A whole name as words: substitutive names alone, or joined by function words, ions and adducts (P-51.3). */
+import { adducts, cations, functionWords } from '../vocabulary/functions.ts';
+import type { Unit } from '../tree.ts';
+import type { ItemReader, Stretch } from './items.ts';
+import { numericalTerm } from '../vocabulary/numbers.ts';
+
+export type Part =
+  | { readonly kind: 'stretch'; readonly stretch: Stretch; readonly start: number }
+  | {
+      readonly kind: 'function';
+      readonly index: number;
+      readonly count: number | undefined;
+      readonly start: number;
+      readonly end: number;
+    }
+  | {
+      readonly kind: 'cation';
+      readonly index: number;
+      readonly count: number | undefined;
+      readonly start: number;
+      readonly end: number;
+    }
+  | { readonly kind: 'hydrogen'; readonly count: number; readonly start: number; readonly end: number }
+  | {
+      readonly kind: 'adduct';
+      readonly index: number;
+      readonly count: number;
+      readonly start: number;
+      readonly end: number;
+    }
+  | { readonly kind: 'oxide'; readonly start: number; readonly end: number }
+  | { readonly kind: 'oxime'; readonly start: number; readonly end: number };
+
+const sentenceCap = 16;
+const multiples: readonly (readonly [string, number])[] = [
+  ...[2, 3, 4, 5, 6].map((count) => [numericalTerm(count), count] as const),
+  ['mono', 1],
+  ['bis', 2],
+  ['tris', 3],
+  ['hemi', 0.5],
+  ['sesqui', 1.5],
+];
+const wordEnd = /[\s,;.·]|$/y;
+
+/** All ways in which the text to its end is a row of words. */
+export function sentences(reader: ItemReader): Part[][] {
+  const text = reader.name.text;
+  const found: Part[][] = [];
+  const memo = new Map<number, readonly (Part & { end: number })[]>();
+  walk(0, []);
+  return found;
+
+  function walk(offset: number, before: readonly Part[]): void {
+    if (found.length >= sentenceCap || before.length > 7 || reader.exhausted) return;
+    let parts = memo.get(offset);
+    if (!parts) memo.set(offset, (parts = [...partsAt(reader, offset)]));
+    for (const part of parts) {
+      const end = part.end;
+      if (end === text.length) {
+        if (found.length < sentenceCap) found.push([...before, part]);
+      } else if (text[end] === ' ') {
+        const next = text.startsWith(' · ', end) ? end + 3 : end + 1;
+        walk(next, [...before, part]);
+      }
+    }
+  }
+}
+
+function* partsAt(reader: ItemReader, offset: number): Generator<Part & { end: number }> {
+  const { lower } = reader.name;
+  for (const part of plainWords(lower, offset)) {
+    reader.furthest = Math.max(reader.furthest, part.end);
+    yield part;
+  }
+  for (const stretch of reader.stretchesAt(offset)) {
+    yield { kind: 'stretch', stretch, start: offset, end: stretch.end };
+  }
+}
+
+function* plainWords(lower: string, offset: number): Generator<Part & { end: number }> {
+  for (const [multiple, count] of [['', undefined] as const, ...multiples]) {
+    if (!lower.startsWith(multiple, offset)) continue;
+    const start = offset + multiple.length;
+    const ends = (word: string): number | undefined => {
+      if (!lower.startsWith(word, start)) return undefined;
+      wordEnd.lastIndex = start + word.length;
+      return wordEnd.test(lower) ? start + word.length : undefined;
+    };
+    for (const [index, [word]] of functionWords.entries()) {
+      const end = ends(word);
+      if (end !== undefined) yield { kind: 'function', index, count, start: offset, end };
+    }
+    for (const [index, [word]] of cations.entries()) {
+      const end = ends(word);
+      if (end !== undefined) yield { kind: 'cation', index, count, start: offset, end };
+    }
+    for (const [index, [word]] of adducts.entries()) {
+      const end = ends(word);
+      if (end !== undefined) yield { kind: 'adduct', index, count: count ?? 1, start: offset, end };
+    }
+    const hydrogen = ends('hydrogen');
+    if (hydrogen !== undefined) yield { kind: 'hydrogen', count: count ?? 1, start: offset, end: hydrogen };
+    if (multiple !== '') continue;
+    const oxide = ends('n-oxide') ?? ends('1-oxide');
+    if (oxide !== undefined) yield { kind: 'oxide', start: offset, end: oxide };
+    const oxime = ends('oxime');
+    if (oxime !== undefined) yield { kind: 'oxime', start: offset, end: oxime };
+  }
+}
+
+/** The unit with the endings changed; used for oximes and anhydrides. */
+export function withEndings(
+  unit: Unit,
+  change: (ending: Unit['endings'][number]) => Unit['endings'][number] | undefined,
+): Unit | undefined {
+  const endings = unit.endings.map(change);
+  return endings.some((one) => one === undefined)
+    ? undefined
+    : { ...unit, endings: endings as Unit['endings'] };
+}
