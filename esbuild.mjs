@@ -1,7 +1,7 @@
 // Bundles the parts that ship: the editor's client, the server, the command, and the toolkit's worker thread, and
 // lays RDKit's WebAssembly build beside them. `--watch` rebuilds on every change.
 import { build, context } from 'esbuild';
-import { chmodSync, copyFileSync, mkdirSync, rmSync } from 'node:fs';
+import { chmodSync, copyFileSync, mkdirSync, rmSync, writeFileSync } from 'node:fs';
 import { createRequire } from 'node:module';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
@@ -69,6 +69,8 @@ function layToolkit() {
   for (const file of ['RDKit_minimal.js', 'RDKit_minimal.wasm']) {
     copyFileSync(join(packageFolder, file), join(out, 'rdkit', file));
   }
+  // Our package is ESM, RDKit's loader is CommonJS; this says so to Node.
+  writeFileSync(join(out, 'rdkit', 'package.json'), '{ "type": "commonjs" }\n');
 }
 
 rmSync(out, { recursive: true, force: true });
