@@ -57,7 +57,7 @@ function letterOfCentre(
   element: TetrahedralStereo,
   kinds: readonly number[],
 ): DescriptorLetter | undefined {
-  const tree = new CipTree(molecule, element.centre, kinds);
+  const tree = new CipTree(molecule, element.centre, kinds, true);
   const letters = new AuxiliaryLetters(molecule, tree, constitutionalRanker(tree));
   const branches = ligandBranches(tree, tree.root).filter(
     ({ node }) => node.atom < 0 || element.ligands.includes(node.atom),

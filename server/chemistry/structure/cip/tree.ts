@@ -47,6 +47,12 @@ export class CipTree {
     private readonly molecule: Molecule,
     root: number,
     private readonly kinds: readonly number[] = bondKinds(molecule),
+    /**
+     * The root is a tetrahedral centre: a double bond of such an atom (P=O, S=O) lends it no duplicates, because the
+     * share of d orbitals in the bonds of a quadriligant centre is neglected (Prelog and Helmchen 1982, 3.1; from
+     * memory). So sulfoxides and phosphine oxides keep their letters when they are drawn with charges.
+     */
+    private readonly rootIsCentre = false,
   ) {
     this.root = this.node(root, undefined, false, 0);
   }
@@ -90,7 +96,7 @@ export class CipTree {
         );
       }
       if (this.kinds[bond] === RESONANT) resonant.push(atom);
-      else
+      else if (!(this.rootIsCentre && (node.parent === undefined || (isParent && node.sphere === 1))))
         for (let extra = 1; extra < order; extra++)
           children.push(this.node(atom, node, 'bond', isParent ? node.parent.sphere : node.sphere + 1));
     }
