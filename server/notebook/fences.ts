@@ -1,7 +1,7 @@
 /**
- * Finds the fenced code blocks of a Markdown document, in lists and quotes too. Where a fence begins and ends is decided by
- * a CommonMark parser; it reports lines, and here these are traced back to offsets. Inline structure plays no part in
- * that, so it is not parsed.
+ * Finds the fenced code blocks of a Markdown document, in lists and quotes too. Where a fence begins and ends is
+ * decided by a CommonMark parser; it reports lines, and here these are traced back to offsets. Inline structure
+ * plays no part in that, so it is not parsed.
  */
 import MarkdownIt from 'markdown-it';
 import type { ContentLine } from './model.ts';
@@ -20,7 +20,9 @@ export interface Fence {
   readonly closed: boolean;
 }
 
-const parser = new MarkdownIt('commonmark');
+/** Deeper quotes and lists are not looked into: the parser descends with them. */
+const deepestNesting = 100;
+const parser = new MarkdownIt('commonmark', { maxNesting: deepestNesting });
 parser.core.ruler.enableOnly(['normalize', 'block']);
 
 interface SourceLine {
@@ -53,8 +55,9 @@ function fenceAt(
   const start = opening.offset + opening.text.indexOf(markup);
   const contents = content === '' ? [] : content.replace(/\n$/, '').split('\n');
   const lines = contents.map((line, index) => contentLine(source[first + 1 + index]!, line));
-  const closed = after - first === contents.length + 2;
   const last = source[Math.max(first, after - 1)]!;
+  // An empty content may also be one blank line at the end of the document.
+  const closed = after - first === contents.length + 2 && last.text.trimEnd().endsWith(markup);
   return {
     start,
     infoStart: start + markup.length,

@@ -2,9 +2,10 @@
  * The lines of a block taken apart into fields, comments and what is neither. Nothing is lost: every line is
  * blank, a comment, part of a field, or the subject of a problem.
  */
+import { strayLineProblem, unindentedItemProblem, type StrayLines } from './field-problems.ts';
 import { JoinedText, trimmedPiece, type Piece } from './mapped-text.ts';
 import type { Block, BlockKind, ContentLine, EntryProblem, Field, MappedText } from './model.ts';
-import { nearestKey, readKey } from './read-key.ts';
+import { readKey } from './read-key.ts';
 
 export interface BlockFields {
   readonly fields: readonly Field[];
@@ -19,23 +20,16 @@ interface OpenField {
   readonly items: Piece[][];
 }
 
-/** Lines that are neither field nor comment, together. */
-interface Stray {
-  readonly start: number;
-  end: number;
-  readonly indented: boolean;
-}
-
 export function readFields(block: Block): BlockFields {
   const fields: Field[] = [];
   const problems: EntryProblem[] = [];
   const margin = marginOf(block.lines);
   let open: OpenField | undefined;
   /** The last line was no field; what is indented below it belongs to it. */
-  let stray: Stray | undefined;
+  let stray: StrayLines | undefined;
   const close = () => {
     if (open !== undefined) fields.push(finished(block.kind, open));
-    if (stray !== undefined) problems.push(strayProblem(stray));
+    if (stray !== undefined) problems.push(strayLineProblem(block, stray));
     open = undefined;
     stray = undefined;
   };
@@ -46,7 +40,7 @@ export function readFields(block: Block): BlockFields {
     const indented = columnOf(line, content) > margin;
     if (item !== undefined && open !== undefined) {
       open.items.push([item]);
-      if (!indented) problems.push(unindentedItem(content));
+      if (!indented) problems.push(unindentedItemProblem(content));
     } else if (indented && open !== undefined) {
       (open.items.at(-1) ?? open.value).push(content);
     } else if (indented && stray !== undefined) {
@@ -55,7 +49,7 @@ export function readFields(block: Block): BlockFields {
       close();
       open = indented || item !== undefined ? undefined : openedField(content);
       if (open === undefined) {
-        stray = { start: content.offset, end: content.offset + content.text.length, indented };
+        stray = { firstLine: content, end: content.offset + content.text.length, indented };
       }
     }
   }
@@ -111,59 +105,4 @@ function finished(kind: BlockKind, open: OpenField): Field {
 function joined(pieces: readonly Piece[]): MappedText {
   const filled = pieces.filter((piece) => piece.text !== '');
   return new JoinedText(filled.length === 0 ? pieces.slice(0, 1) : filled, ' ');
-}
-
-function strayProblem({ start, end, indented }: Stray): EntryProblem {
-  const toNotes = { range: { start, end: start }, newText: 'notes: ' };
-  return {
-    check: 'bad-value',
-    range: { start, end },
-    message:
-      'This line is no field: it has no key and colon, and it continues nothing above it. So nobody reads it. ' +
-      'Write “key: value”, indent it to continue the line above, put it under “notes:”, or begin it with // to ' +
-      'make it a comment.',
-    fixes: indented ? [] : [{ title: 'Put it under notes', edits: [toNotes], safe: false }],
-  };
-}
-
-function unindentedItem(content: Piece): EntryProblem {
-  const range = { start: content.offset, end: content.offset + 1 };
-  return {
-    check: 'bad-value',
-    range,
-    message:
-      'An item of a list stands indented below its key. This one is read as an item of the list above; indent it ' +
-      'so that a reader sees the same.',
-    fixes: [
-      {
-        title: 'Indent the item',
-        edits: [{ range: { ...range, end: range.start }, newText: '  ' }],
-        safe: true,
-      },
-    ],
-  };
-}
-
-/** What is said of a key that nobody knows. */
-export function unknownKeyProblem(kind: BlockKind, field: Field): EntryProblem {
-  const nearest = nearestKey(kind, field.keyText);
-  return {
-    check: 'unknown-field',
-    range: field.keyRange,
-    message:
-      `A ${kind} block has no field “${field.keyText}”, so its value is read by nobody. ` +
-      (nearest === undefined
-        ? 'Take a key of the block language, or put the text under “notes”.'
-        : `The nearest known key is “${nearest}”.`),
-    fixes:
-      nearest === undefined
-        ? []
-        : [
-            {
-              title: `Change the key to “${nearest}”`,
-              edits: [{ range: field.keyRange, newText: nearest }],
-              safe: false,
-            },
-          ],
-  };
 }

@@ -55,6 +55,37 @@ export function readKey(kind: BlockKind, keyText: string): FieldKey | undefined 
   return before !== undefined && keysWithConditions.has(before) ? before : undefined;
 }
 
+/** Statements that papers print without a colon after their name. */
+const printedWithoutColon: ReadonlySet<FieldKey> = new Set([
+  ...keysWithConditions,
+  'formula',
+  'SMILES',
+  'InChI',
+  'InChIKey',
+  'CAS RN',
+  'molar mass',
+  'exact mass',
+]);
+const mostWords = 3;
+
+/** The words at the beginning of a text that name such a statement, as written: `1H NMR`, `Anal.`. */
+export function leadingKey(kind: BlockKind, text: string): string | undefined {
+  const words =
+    /^(?:\S{1,20}\s+){1,3}/
+      .exec(text.slice(0, 80))?.[0]
+      .trimEnd()
+      .split(/(?<=\S)(?=\s)/) ?? [];
+  for (let count = Math.min(words.length, mostWords); count > 0; count--) {
+    const written = words.slice(0, count).join('');
+    // The conditions of the measurement belong to the value.
+    const key = written.includes('(') ? undefined : readKey(kind, written);
+    // One letter can begin any sentence.
+    if (key !== undefined && printedWithoutColon.has(key) && normalizedKey(written).length > 1)
+      return written;
+  }
+  return undefined;
+}
+
 /** The known key that is spelt most like the text, when one is near enough to be meant. */
 export function nearestKey(kind: BlockKind, keyText: string): FieldKey | undefined {
   const normalized = normalizedKey(keyText).slice(0, 40);

@@ -15,7 +15,7 @@ export interface DecimalComma {
  * thousands that a decimal point follows (`1,234.5`) are none.
  */
 const candidate =
-  /(?<![\p{L}\p{N}.,'′-])[-+−–]?(\d+),(\d+)(?![\p{L}\p{N}.]*[-‐‑–−]\p{L}|\d|[.,]\d|\p{L}+[-‐‑])/gu;
+  /(?<![\p{L}\p{N}.,'′-])[-+−–]?(\d+),(\d+)(?![\p{L}\p{N}.'′’]*[-‐‑–−][\p{L}([{]|\d|[.,]\d|\p{L}+[-‐‑])/gu;
 
 export function findDecimalCommas(text: string): DecimalComma[] {
   if (!text.includes(',')) return [];

@@ -81,6 +81,8 @@ describe('problems of the block language, on their characters', () => {
     [block('bp: 95 °C (1,5 mmHg)'), ['decimal-comma: 1,5']],
     [block('mp: 64,5–66,0 °C'), ['decimal-comma: 64,5', 'decimal-comma: 66,0']],
     [block('name: 1,5-dimethylnaphthalene', '1H NMR: δ 7,30 (d)'), []],
+    [block('scheme: 1 -> 2'), ['unknown-field: scheme']],
+    [reaction('solvent: 2,2′-bipyridine in 1,3-(x)', 'conditions: 0 °C, 2,5 h'), ['decimal-comma: 2,5']],
     [block('combustion: C, 71.03; H, 7,95'), ['decimal-comma: 7,95']],
     [
       reaction('charged:', '  - 3: 1,50 g, 9.99 mmol', '  - 1,4-dioxane: 20 mL', '  - 5: 2 g in 1,2-DCE'),
@@ -113,6 +115,9 @@ describe('fixes', () => {
   it.each([
     [block('molar mass: 108,14 g/mol'), block('molar mass: 108.14 g/mol')],
     [block('formla: CH4'), block('formula: CH4')],
+    [block('1H NMR (CDCl3) δ 7.30 (s, 6H)'), block('1H NMR: (CDCl3) δ 7.30 (s, 6H)')],
+    [block('Anal. Calcd for C6H6: C, 92.26'), block('Anal.: Calcd for C6H6: C, 92.26')],
+    [block('mp 36–38 °C'), block('mp: 36–38 °C')],
     [block('allow: x because'), block('allow: x (because)')],
     [block('anisole'), block('notes: anisole')],
     [block('isomers: racemate2'), block('isomers: racemate')],

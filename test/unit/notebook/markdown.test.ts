@@ -23,6 +23,7 @@ describe('which fences are blocks', () => {
     ['   ```compound\n```', 'compound'],
     ['- ```compound\n  ```', 'compound'],
     ['> 1. ~~~reaction\n>    ~~~', 'reaction'],
+    [`${'> '.repeat(50)}\`\`\`compound`, 'compound'],
   ])('%j', (text, kind) => {
     expect(findBlocks(text).map((block) => block.kind)).toEqual([kind]);
   });
@@ -88,6 +89,8 @@ describe('how a block ends', () => {
     ['```compound\nlabel: 1\n~~~\n', false],
     ['````compound\nlabel: 1\n```\n', false],
     ['> ```compound\n> label: 1\n\n```', false],
+    ['> ```compound\n>', false],
+    ['```compound\n\n```', true],
     ['```compound\nlabel: 1\n``` x\n', false],
     ['```compound\nlabel: 1\n```', true],
     ['```compound\nlabel: 1\n   `````  \n', true],
