@@ -10,14 +10,13 @@ import {
 import type { TextEdit, TextRange } from '../chemistry/text.ts';
 import type { Finding, RelatedPlace } from '../checks/finding.ts';
 import type { Severity } from '../checks/severity.ts';
+import { findingSource } from './names.ts';
 
 /** A text document of the protocol's library, as far as positions go. */
 export interface PositionSource {
   positionAt(offset: number): Position;
   offsetAt(position: Position): number;
 }
-
-export const findingSource = 'isonym';
 
 const severityOf: Record<Severity, DiagnosticSeverity> = {
   error: DiagnosticSeverity.Error,

@@ -13,13 +13,15 @@ export interface Drawing {
 }
 
 export interface HoverCard {
-  readonly title: string;
+  readonly title?: string;
   /** Beside the title: a formula with its subscripts. */
   readonly subtitle?: string;
   /** One is drawn large, up to four side by side. */
   readonly drawings?: readonly Drawing[];
   /** Name and value, such as `molar mass` and `152.19 g/mol`. */
   readonly rows?: readonly (readonly [string, string])[];
+  /** Canonical SMILES of the one structure that the card is about; its InChIKey joins the rows. */
+  readonly identity?: string;
   /** Sentences below. */
   readonly lines?: readonly string[];
   /** Markdown of our own making, such as the words for a key. */
@@ -38,9 +40,7 @@ const longestMarkdown = 90_000;
 
 /** `svgs` in the order of the card's drawings; null where there is none. */
 export function renderMarkdown(card: HoverCard, svgs: readonly (string | null)[]): string {
-  const head =
-    card.subtitle === undefined ? bold(card.title) : `${bold(card.title)} · ${escaped(card.subtitle)}`;
-  const parts = [head];
+  const parts = headOf(card, bold, escaped);
   const pictures = picturesOf(card, svgs);
   const tail: string[] = [];
   if (card.rows !== undefined && card.rows.length > 0) {
@@ -54,11 +54,22 @@ export function renderMarkdown(card: HoverCard, svgs: readonly (string | null)[]
 }
 
 export function renderPlain(card: HoverCard): string {
-  const lines = [card.subtitle === undefined ? card.title : `${card.title} · ${card.subtitle}`];
+  const same = (text: string) => text;
+  const lines = headOf(card, same, same);
   for (const [name, value] of card.rows ?? []) lines.push(`${name}: ${value}`);
   if (card.words !== undefined) lines.push(card.words.replaceAll('`', ''));
   lines.push(...(card.lines ?? []));
   return lines.join('\n');
+}
+
+/** The first line, or none. */
+function headOf(
+  { title, subtitle }: HoverCard,
+  strong: (text: string) => string,
+  plain: (text: string) => string,
+): string[] {
+  if (title === undefined) return [];
+  return [subtitle === undefined ? strong(title) : `${strong(title)} · ${plain(subtitle)}`];
 }
 
 function bold(text: string): string {

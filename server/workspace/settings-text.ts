@@ -3,6 +3,7 @@
  * Every mistake is placed on its characters, and what is sound beside it still counts.
  */
 import { Ajv, type ErrorObject } from 'ajv';
+// By its ES module: the package's main file is UMD, whose inner `require` no bundler can follow.
 import {
   findNodeAtLocation,
   getNodeValue,
@@ -10,7 +11,7 @@ import {
   printParseErrorCode,
   type Node,
   type ParseError,
-} from 'jsonc-parser';
+} from 'jsonc-parser/lib/esm/main.js';
 import type { Problem, TextRange } from '../chemistry/text.ts';
 import type { Settings } from '../checks/settings.ts';
 

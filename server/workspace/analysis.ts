@@ -1,0 +1,90 @@
+/**
+ * From a text to its findings, step by step, for one notebook's settings: what `notebook.ts` caches and what it
+ * runs again are the results of these steps.
+ */
+import { LRUCache } from 'lru-cache';
+
+import type { NameReading } from '../chemistry/nomenclature/reading.ts';
+import type { Molecule } from '../chemistry/structure/molecule.ts';
+import { readSmiles } from '../chemistry/structure/read-smiles.ts';
+import type { Read } from '../chemistry/text.ts';
+import type { ToolkitFactsOf } from '../checks/facts.ts';
+import type { Finding } from '../checks/finding.ts';
+import { modelOf, type EntryModel } from '../checks/model.ts';
+import { analyseEntry, analyseNotebook } from '../checks/run.ts';
+import type { Settings } from '../checks/settings.ts';
+import { readEntry } from '../notebook/entries.ts';
+import { findBlocks } from '../notebook/markdown.ts';
+import type { Block, ValueReaders } from '../notebook/model.ts';
+import { readName } from './name-reader.ts';
+
+export interface Analysis {
+  readonly findBlocks: (text: string) => readonly Block[];
+  readonly read: (block: Block) => EntryModel;
+  readonly check: (model: EntryModel, facts: ToolkitFactsOf) => readonly Finding[];
+  readonly checkAcross: (
+    files: ReadonlyMap<string, readonly EntryModel[]>,
+  ) => ReadonlyMap<string, readonly Finding[]>;
+}
+
+export function createAnalysis(settings: Settings): Analysis {
+  return {
+    findBlocks,
+    read: (block) => sharedByStructure(modelOf(readEntry(block, rememberingReaders), settings)),
+    check: analyseEntry,
+    checkAcross: (files) => analyseNotebook({ files, settings }),
+  };
+}
+
+/** Names and structures recur: the same solvents and reagents in every entry, the same text at every keystroke. */
+const mostRemembered = 5000;
+
+/** Longer texts are rare, dear to keep and never the same twice. */
+const longestRemembered = 2000;
+
+/** What was read depends on the text alone, so all notebooks share it. */
+const rememberingReaders: ValueReaders = {
+  readSmiles: remembering<Read<Molecule>>(readSmiles),
+  readName: remembering<NameReading>(readName),
+};
+
+/** What follows from a structure alone, however many entries have it. Gone with the structure itself. */
+const ofStructure = new WeakMap<Molecule, Map<string, unknown>>();
+
+const derivedFromStructure = ['structureSmiles', 'stereo'] as const;
+
+/**
+ * Equal SMILES texts are one molecule here (see `rememberingReaders`), so the dear things that a model works out
+ * from its structure when they are asked for are worked out once for all its entries.
+ */
+function sharedByStructure(model: EntryModel): EntryModel {
+  if (model.kind !== 'compound' || model.structure === undefined) return model;
+  let known = ofStructure.get(model.structure);
+  if (known === undefined) {
+    known = new Map();
+    ofStructure.set(model.structure, known);
+  }
+  for (const property of derivedFromStructure) {
+    const derive = Object.getOwnPropertyDescriptor(model, property)?.get;
+    if (derive === undefined) continue;
+    const get = () => {
+      if (!known.has(property)) known.set(property, derive.call(model));
+      return known.get(property);
+    };
+    Object.defineProperty(model, property, { get, enumerable: true });
+  }
+  return model;
+}
+
+function remembering<T extends object>(read: (text: string) => T): (text: string) => T {
+  const known = new LRUCache<string, T>({ max: mostRemembered });
+  return (text) => {
+    if (text.length > longestRemembered) return read(text);
+    let value = known.get(text);
+    if (value === undefined) {
+      value = read(text);
+      known.set(text, value);
+    }
+    return value;
+  };
+}
