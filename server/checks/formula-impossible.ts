@@ -32,15 +32,17 @@ export const check: Check = {
     if (reason === undefined) return;
     const written = hillFormula(formula);
     const unsaturation = degreeOfUnsaturation(formula);
+    const degree =
+      unsaturation === undefined ? '' : ` (degree of unsaturation ${String(unsaturation).replace('-', '−')})`;
     report({
       range: model.entry.formula!.text.range,
       message:
         reason === 'too many hydrogens'
           ? `${written} has more hydrogens than its other atoms can bind` +
-            `${unsaturation === undefined ? '' : ` (degree of unsaturation ${unsaturation})`}. ` +
+            `${degree}. ` +
             'No such compound exists: correct the counts.'
           : `${written} has an odd number of electrons` +
-            `${unsaturation === undefined ? '' : ` (degree of unsaturation ${unsaturation})`}: a radical, or a ` +
+            `${degree}: a radical, or a ` +
             'hydrogen or nitrogen too many or too few. Correct the counts, or write the charge of the ion.',
     });
   },

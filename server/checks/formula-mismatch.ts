@@ -39,7 +39,7 @@ export const check: Check = {
     const withFormula = agreeingStatements(model, stated, ['formula', other.what]);
     const withOther = agreeingStatements(model, other.composition, ['formula', other.what]);
     const parts = [
-      `The formula says ${hillFormula(stated)}, but the ${other.what} is ${computed}: ` +
+      `The formula says ${hillFormula(stated)}, but the ${other.what} ${other.what === 'name' ? 'means' : 'is'} ${computed}: ` +
         `${differenceInWords(stated, other.composition)}.`,
       usualDifference(stated, other.composition) ?? '',
       sideTaken(withFormula, 'formula', other.what),

@@ -1,7 +1,12 @@
 /** Recorded InChI against the structure, layer by layer. */
+import { compositionDifference } from '../chemistry/composition/compare.ts';
+import type { Composition } from '../chemistry/composition/composition.ts';
+import { hillFormula } from '../chemistry/composition/format-formula.ts';
+import { partsOfKind } from '../chemistry/composition/mass.ts';
+import { readFormula } from '../chemistry/composition/read-formula.ts';
 import type { TextRange } from '../chemistry/text.ts';
 import type { EntryValue } from '../notebook/model.ts';
-import type { Check } from './finding.ts';
+import type { Check, Report } from './finding.ts';
 import type { CompoundModel } from './model.ts';
 import { definiteStructure, factsAsDrawn, leavesStereoOpenOnPurpose } from './shared/identity.ts';
 import {
@@ -39,7 +44,11 @@ export const check: Check = {
     const value = model.entry.inchi;
     const recorded = value?.read.value === undefined ? undefined : readInchi(value.read.value);
     const structure = definiteStructure(model);
-    if (value === undefined || recorded === undefined || structure === undefined) return;
+    if (value === undefined || recorded === undefined) return;
+    if (structure === undefined) {
+      compareFormulas(model, value, recorded, report);
+      return;
+    }
     const facts = toolkit(structure.smiles);
     const computed = typeof facts === 'string' ? undefined : readInchi(facts.inchi);
     if (computed === undefined || typeof facts === 'string') return;
@@ -65,6 +74,38 @@ export const check: Check = {
   },
 };
 
+/** Without a structure the formula layer can still be held against the formula field. */
+function compareFormulas(
+  { formula, entry }: CompoundModel,
+  value: EntryValue<string>,
+  recorded: Inchi,
+  report: (found: Report) => void,
+): void {
+  const layer = recorded.layers.find(({ key }) => key === 'formula');
+  // The layer leaves out the protons and charges that follow it.
+  if (formula === undefined || layer === undefined || textOf(recorded, 'charge') !== '') return;
+  const stated = readFormula(layer.text).value;
+  if (stated === undefined || compositionDifference(unlabelled(stated), unlabelled(formula)).size === 0)
+    return;
+  report({
+    range: placed(value, layer.range),
+    message:
+      `This InChI is that of ${layer.text}, but the formula says ${hillFormula(formula)}. ` +
+      'Nobody can tell which compound is meant: correct whichever is wrong.',
+    related: [{ range: entry.formula!.text.range, message: 'The formula stands here.' }],
+  });
+}
+
+/** The layer counts labelled atoms with their elements. */
+function unlabelled({ counts, charge }: Composition): Composition {
+  const merged = new Map<string, number>();
+  for (const [kind, count] of counts) {
+    const { symbol } = partsOfKind(kind);
+    merged.set(symbol, (merged.get(symbol) ?? 0) + count);
+  }
+  return { counts: merged, charge };
+}
+
 /** Whitespace in the recorded InChI moves its letters; then the whole of it is underlined. */
 function placed(value: EntryValue<string>, place: TextRange): TextRange {
   return value.text.text === value.read.value ? inDocument(value, place) : value.text.range;
@@ -84,7 +125,7 @@ function differing(kind: LayerKind, recorded: Inchi, computed: Inchi, from: stri
   const of = (inchi: Inchi) => inchi.layers.find((layer) => layer.key === 'formula')?.text ?? 'nothing';
   switch (kind) {
     case 'formula':
-      return `This InChI is of a compound ${of(recorded)}; the ${from} is ${of(computed)}.`;
+      return `This InChI is that of ${of(recorded)}; the ${from} is ${of(computed)}.`;
     case 'connections':
       return `This InChI has the formula of the ${from}, but its atoms are connected otherwise: it is of an isomer.`;
     case 'hydrogens':

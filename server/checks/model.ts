@@ -7,6 +7,7 @@ import { readSmiles } from '../chemistry/structure/read-smiles.ts';
 import { enumerateStereoisomers, type StereoisomerList } from '../chemistry/structure/stereoisomers.ts';
 import type { CompoundEntry, Entry, EntryValue, IsomerStatement, ReactionEntry } from '../notebook/model.ts';
 import type { Settings } from './settings.ts';
+import { isomersOfName } from './shared/isomers-of-name.ts';
 import { canonicalSmiles } from '../chemistry/structure/canonical-smiles.ts';
 
 /** What the compound block says of its identity, each statement read on its own. */
@@ -27,7 +28,7 @@ export interface CompoundModel {
   readonly name: UnderstoodName | undefined;
   /** From `formula`, when it could be read. */
   readonly formula: Composition | undefined;
-  /** How many isomers the entry says it holds; `single` when it does not say. */
+  /** How many isomers the entry says it holds; what its name says, or `single`, when it does not say. */
   readonly isomers: IsomerStatement['kind'];
 }
 
@@ -77,7 +78,7 @@ function compoundModel(entry: CompoundEntry, settings: Settings): CompoundModel 
     nameReading,
     name: nameReading?.kind === 'understood' ? nameReading : undefined,
     formula: entry.formula?.read.value,
-    isomers: entry.isomers?.read.value?.kind ?? 'single',
+    isomers: entry.isomers?.read.value?.kind ?? isomersOfName(entry.name?.text.text ?? '') ?? 'single',
   };
 }
 

@@ -65,14 +65,15 @@ function openDrawing(
   const places = open.length === 0 ? 'the arrangement' : placesInWords(open);
   const leaves = `The SMILES leaves ${places} open, so it stands for ${countOf(stereo.count)} stereoisomers`;
   if (named !== undefined) {
-    const written = canonicalSmiles(named.molecule);
+    const meant = canonicalSmiles(named.molecule);
+    const isomers = stereo.isomers.filter((isomer) => canonicalSmiles(isomer) === meant);
     report({
       range,
       severity: 'information',
       message:
         `${leaves}. The name says which one it is; a drawing or a search made from the SMILES does not. ` +
         'Add the arrangement to the SMILES.',
-      fixes: [replacement(smiles, written, 'Write the SMILES with the arrangement of the name')],
+      fixes: stereoFixes(smiles, { ...stereo, isomers }, open),
     });
     return;
   }
@@ -84,7 +85,7 @@ function openDrawing(
     : `: ${rest > 0 ? `${letters.join(', ')} and ${rest} more` : listed([...letters].sort(), 6, 'or')}`;
   report({
     range,
-    message: `The SMILES leaves ${places}${countOf(stereo.count)} stereoisomers have it${list}. ${whatToDo(isPair(stereo.isomers, stereo.count))}`,
+    message: `${leaves}${list}. ${whatToDo(isPair(stereo.isomers, stereo.count))}`,
     fixes: [
       ...stereoFixes(smiles, stereo, open),
       ...(isPair(stereo.isomers, stereo.count) ? [declare(model, 'racemate')] : [declare(model, 'mixture')]),

@@ -61,10 +61,12 @@ export function disagreements(
       ? []
       : [{ element, inStructure: letter, inName }];
   });
-  // Twins may have been matched the wrong way round.
-  const ambiguous = places.some(({ element }) =>
-    atomsOf(element).some((atom) => one.classes.filter((each) => each === one.classes[atom]).length > 1),
-  );
+  // Where equal branches hold several places, twins may have been matched the wrong way round.
+  const classKeys = one.molecule.stereo.map((element) => placeKey(element, one.classes));
+  const ambiguous = places.some(({ element }) => {
+    const own = placeKey(element, one.classes);
+    return classKeys.filter((key) => key === own).length > 1;
+  });
   return ambiguous || places.length === 0 ? undefined : { molecule: one.molecule, places };
 }
 
