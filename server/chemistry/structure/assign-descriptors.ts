@@ -8,7 +8,7 @@ import { isOddPermutation } from './canonical-stereo.ts';
 import { type DescriptorLetter, letterOf } from './cip/descriptors.ts';
 import { type Molecule, type StereoElement, withStereo } from './molecule.ts';
 import { type StereoCandidate, stereoCandidates } from './stereo-candidates.ts';
-import { elementFor } from './stereoisomers.ts';
+import { elementFor } from './stereo-elements.ts';
 
 export interface WantedDescriptor {
   /** A centre, or either end of a double bond or axis. */

@@ -4,7 +4,8 @@
  *
  * Tetrahedral: carbon, silicon and germanium with four ligands; ammonium nitrogen and phosphorus with four; the pyramids
  * of phosphines, sulfoxides, sulfonium salts and their selenium analogues, which keep their shape at room temperature.
- * Amines turn over and are none. Double bonds: C=C, C=N with a substituent on nitrogen, N=N; not in rings of fewer than
+ * Amines turn over and are none, unless a bridgehead nitrogen is stated to have an arrangement (Tröger's base). Allene
+ * axes end at carbon: carbodiimides and ketenimines turn over at nitrogen (common practice, no source). Double bonds: C=C, C=N with a substituent on nitrogen, N=N; not in rings of fewer than
  * eight atoms (P-31.1.4.3.4: cyclooctene is the smallest ring with a trans form that can be kept), and not where a
  * mobile hydrogen moves the double bond (amidines and guanidines; common practice, no source). Biaryl axes are not
  * covered.
@@ -36,12 +37,15 @@ const smallestTransRing = 8;
 /** Centres first, by atom; then double bonds and axes, by bond. The molecule must be in its normal spelling. */
 export function stereoCandidates(molecule: Molecule): StereoCandidate[] {
   const kinds = bondKinds(molecule);
+  const inRing = ringBonds(molecule);
+  const isHeldNitrogen = (atom: number) =>
+    molecule.stereo.some((element) => element.kind === 'tetrahedral' && element.centre === atom) &&
+    molecule.neighbours[atom]!.every(({ bond }) => inRing[bond]);
   const candidates: StereoCandidate[] = [];
   for (let atom = 0; atom < molecule.atoms.length; atom++) {
-    const ligands = tetrahedralLigands(molecule, atom, kinds);
+    const ligands = tetrahedralLigands(molecule, atom, kinds, isHeldNitrogen);
     if (ligands !== undefined) candidates.push({ kind: 'tetrahedral', centre: atom, ligands });
   }
-  const inRing = ringBonds(molecule);
   for (let index = 0; index < molecule.bonds.length; index++) {
     const bond = molecule.bonds[index]!;
     if (bond.order !== 2 || kinds[index] === RESONANT) continue;
@@ -54,8 +58,10 @@ export function stereoCandidates(molecule: Molecule): StereoCandidate[] {
     const first = endLigands(molecule, left.end, left.inward);
     const second = endLigands(molecule, right.end, right.inward);
     if (first === undefined || second === undefined) continue;
-    if (doubles % 2 === 0) candidates.push({ kind: 'axis', ends, ligands: [...first, ...second] });
-    else if (
+    if (doubles % 2 === 0) {
+      if (ends.every((end) => molecule.atoms[end]!.atomicNumber !== 7))
+        candidates.push({ kind: 'axis', ends, ligands: [...first, ...second] });
+    } else if (
       !(inRing[index] && smallestRingThrough(molecule, index, smallestTransRing - 1)) &&
       !hasMobileHydrogen(molecule, ends)
     ) {
@@ -71,6 +77,7 @@ function tetrahedralLigands(
   molecule: Molecule,
   index: number,
   kinds: readonly number[],
+  isHeldNitrogen: (atom: number) => boolean,
 ): [number, number, number, number] | undefined {
   const { atomicNumber, charge, hydrogens } = molecule.atoms[index]!;
   const neighbours = molecule.neighbours[index]!;
@@ -90,7 +97,14 @@ function tetrahedralLigands(
       case 50:
         return charge === 0 && ligandCount === 4 && doubles === 0;
       case 7:
-        return charge === 1 && neighbours.length === 4;
+        return (
+          (charge === 1 && neighbours.length === 4) ||
+          (charge === 0 &&
+            neighbours.length === 3 &&
+            hydrogens === 0 &&
+            doubles === 0 &&
+            isHeldNitrogen(index))
+        );
       case 15:
       case 33:
         return ligandCount === 4
@@ -106,10 +120,33 @@ function tetrahedralLigands(
         return false;
     }
   })();
-  if (!possible) return undefined;
+  if (!possible || (doubles > 0 && hasTwinOfDoubleBond(molecule, index))) return undefined;
   const ligands = neighbours.map(({ atom }) => atom);
   if (ligands.length === 3) ligands.push(-1);
   return [ligands[0]!, ligands[1]!, ligands[2]!, ligands[3]!];
+}
+
+/**
+ * P(=O)OH, P(=O)O⁻ and the like: the proton or charge is on either of two like atoms, so that they are one kind of ligand
+ * (common practice, no source).
+ */
+function hasTwinOfDoubleBond(molecule: Molecule, centre: number): boolean {
+  const ends = molecule.neighbours[centre]!.map(({ atom, bond }) => ({
+    atom: molecule.atoms[atom]!,
+    isTerminal: molecule.neighbours[atom]!.length === 1,
+    order: molecule.bonds[bond]!.order,
+  })).filter(({ isTerminal }) => isTerminal);
+  return ends.some(
+    (one) =>
+      one.order === 2 &&
+      ends.some(
+        (other) =>
+          other.order === 1 &&
+          other.atom.atomicNumber === one.atom.atomicNumber &&
+          other.atom.isotope === one.atom.isotope &&
+          (other.atom.hydrogens > 0 || other.atom.charge < 0),
+      ),
+  );
 }
 
 /** Follows double bonds from `from` through `through`; `length` counts the bonds walked. */

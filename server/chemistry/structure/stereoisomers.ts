@@ -1,14 +1,16 @@
 /**
- * All stereoisomers of a structure that agree with what it states, and which of its places are stereogenic. Every
- * arrangement of the candidates is made and compared by canonical form, so meso forms, symmetric rings and
- * pseudoasymmetric centres come out exactly.
+ * All stereoisomers of a structure that agree with what it states, and which of its places are stereogenic. The
+ * symmetries of the constitution sort the arrangements of the candidates into compounds, so meso forms, symmetric rings
+ * and pseudoasymmetric centres come out exactly.
  */
 import { canonicalForm } from './canonical-form.ts';
 import { bondKinds, canonicalGraph } from './canonical-graph.ts';
 import { initialColouring } from './canonical-refine.ts';
-import { type CageConstraint, cageConstraints } from './stereo-cages.ts';
+import { cageConstraints } from './stereo-cages.ts';
 import { type StereoCandidate, stereoCandidates } from './stereo-candidates.ts';
-import { isOddPermutation } from './canonical-stereo.ts';
+import { type FreeChoices, freeChoices } from './stereo-choices.ts';
+import { elementFor, valueAt } from './stereo-elements.ts';
+import { leastEquivalents, symmetryMoves } from './stereo-symmetry.ts';
 import { type Molecule, type StereoElement, withStereo } from './molecule.ts';
 import { normalise } from './normalise.ts';
 
@@ -31,8 +33,8 @@ export interface StereoisomerList {
   readonly meaningless: readonly StereoElement[];
 }
 
-/** Arrangements compared by canonical form before counting is given up. */
-const assignmentLimit = 4096;
+/** Candidates up to which all arrangements of a symmetric structure are sorted into compounds. */
+const sortedLimit = 16;
 
 /**
  * `cap` bounds the isomers listed. Isomers come in the order of their arrangements, which depends on the numbering of
@@ -41,48 +43,79 @@ const assignmentLimit = 4096;
 export function enumerateStereoisomers(input: Molecule, cap = 64): StereoisomerList {
   const molecule = normalise(input);
   const candidates = distinctCandidates(molecule);
-  const constraints = cageConstraints(molecule, candidates);
   const statedAt = candidates.map((candidate) => statedElement(molecule, candidate));
+  const kept = molecule.stereo.filter(isPolyhedral);
   const meaningless = molecule.stereo.filter(
-    (element) =>
-      element.kind !== 'SP' &&
-      element.kind !== 'TB' &&
-      element.kind !== 'OH' &&
-      !statedAt.some((stated) => stated?.element === element),
+    (element) => !isPolyhedral(element) && !statedAt.some((stated) => stated?.element === element),
   );
-  const kept = molecule.stereo.filter(
-    (element) => element.kind === 'SP' || element.kind === 'TB' || element.kind === 'OH',
+  const choices = freeChoices(
+    statedAt.map((stated) => stated?.value),
+    cageConstraints(molecule, candidates),
   );
-  const free = candidates.flatMap((_, index) => (statedAt[index] === undefined ? [index] : []));
-  const unitsOf = (matters: readonly boolean[]) =>
-    candidates.flatMap((candidate, index) =>
-      matters[index] ? [{ candidate, stated: statedAt[index]?.element }] : [],
-    );
-
-  const asymmetric = !hasSymmetry(molecule);
-  if (2 ** free.length > assignmentLimit && !asymmetric) {
-    const all = candidates.map(() => true);
-    return { molecule, units: unitsOf(all), isomers: [], count: undefined, meaningless };
-  }
-
-  const found = new Map<string, { readonly values: readonly boolean[]; readonly molecule: Molecule }>();
-  // Without symmetry every arrangement is a compound of its own, and listing can stop at the cap.
-  const listed = asymmetric ? Math.min(2 ** free.length, 4 * cap) : 2 ** free.length;
-  for (let number = 0; number < listed && (!asymmetric || found.size < cap); number++) {
-    const values = statedAt.map((stated) => stated?.value ?? false);
-    free.forEach((index, bit) => (values[index] = Math.floor(number / 2 ** bit) % 2 === 1));
-    if (!constraints.every((constraint) => allows(constraint, values, statedAt))) continue;
-    const isomer = withStereo(molecule, [
+  const isomerWith = (values: readonly boolean[]) =>
+    withStereo(molecule, [
       ...kept,
       ...candidates.map((candidate, index) => elementFor(candidate, values[index]!)),
     ]);
-    const key = asymmetric ? String(number) : canonicalForm(isomer).key;
-    if (!found.has(key)) found.set(key, { values, molecule: isomer });
+  const listed = (numbers: readonly number[]) =>
+    numbers.map((number) => isomerWith(choices.valuesOf(number)));
+  const unitsOf = (matters: (index: number) => boolean) =>
+    candidates.flatMap((candidate, index) =>
+      matters(index) ? [{ candidate, stated: statedAt[index]?.element }] : [],
+    );
+  const moves = symmetryMoves(molecule, candidates, kept);
+
+  if (moves?.length === 0) {
+    // No symmetry touches an arrangement: each is a compound of its own.
+    const count = 2 ** choices.count;
+    const numbers = Array.from({ length: Math.min(count, cap) }, (_, number) => number);
+    return { molecule, units: unitsOf(() => true), isomers: listed(numbers), count, meaningless };
   }
-  const count = asymmetric ? 2 ** (free.length - independent(constraints, statedAt)) : found.size;
-  const matters = asymmetric ? candidates.map(() => true) : whichMatter(found, candidates, kept, molecule);
-  const isomers = [...found.values()].slice(0, cap).map((entry) => entry.molecule);
-  return { molecule, units: unitsOf(matters), isomers, count, meaningless };
+  if (moves === undefined || candidates.length > sortedLimit) {
+    const isomers = firstDistinct(choices, isomerWith, cap);
+    return { molecule, units: unitsOf(() => true), isomers, count: undefined, meaningless };
+  }
+
+  const least = leastEquivalents(candidates.length, moves);
+  const found = new Map<number, number>();
+  for (let number = 0; number < 2 ** choices.count; number++) {
+    const compound = least[bitsOf(choices.valuesOf(number))]!;
+    if (!found.has(compound)) found.set(compound, number);
+  }
+  // A candidate matters when turning it alone makes another compound out of at least one isomer.
+  const matters = (index: number) =>
+    [...found.keys()].some((compound) => least[compound ^ (1 << index)] !== compound);
+  return {
+    molecule,
+    units: unitsOf(matters),
+    isomers: listed([...found.values()].slice(0, cap)),
+    count: found.size,
+    meaningless,
+  };
+}
+
+/** Some isomers, told apart one by one; there may be more. */
+function firstDistinct(
+  choices: FreeChoices,
+  isomerWith: (values: readonly boolean[]) => Molecule,
+  cap: number,
+): Molecule[] {
+  const found = new Map<string, Molecule>();
+  const tries = Math.min(2 ** choices.count, 2 * cap);
+  for (let number = 0; number < tries && found.size < cap; number++) {
+    const isomer = isomerWith(choices.valuesOf(number));
+    const { key } = canonicalForm(isomer);
+    if (!found.has(key)) found.set(key, isomer);
+  }
+  return [...found.values()];
+}
+
+function bitsOf(values: readonly boolean[]): number {
+  return values.reduce((bits, value, index) => (value ? bits | (1 << index) : bits), 0);
+}
+
+function isPolyhedral({ kind }: StereoElement): boolean {
+  return kind === 'SP' || kind === 'TB' || kind === 'OH';
 }
 
 /** Candidates whose ligands are not plainly alike: two ligands that carry no candidate and share a class are. */
@@ -160,117 +193,14 @@ function constitutionalClasses(molecule: Molecule): Int32Array {
   return initialColouring(graph, { steps: 0 }).colours;
 }
 
-/** Whether two atoms may exchange places in some symmetry of the constitution, terminal twins such as CF3 aside. */
-function hasSymmetry(molecule: Molecule): boolean {
-  const classes = constitutionalClasses(molecule);
-  const first = new Map<number, number>();
-  for (let atom = 0; atom < classes.length; atom++) {
-    const twin = first.get(classes[atom]!);
-    if (twin === undefined) first.set(classes[atom]!, atom);
-    else if (!areTerminalTwins(molecule, twin, atom)) return true;
-  }
-  return false;
-}
-
-function areTerminalTwins(molecule: Molecule, first: number, second: number): boolean {
-  const [one, other] = [molecule.neighbours[first]!, molecule.neighbours[second]!];
-  return one.length === 1 && other.length === 1 && one[0]!.atom === other[0]!.atom;
-}
-
-/** The arrangement with `value` true is the clockwise one, or the one with both ligands on the same side. */
-export function elementFor(candidate: StereoCandidate, value: boolean): StereoElement {
-  return candidate.kind === 'double-bond'
-    ? { ...candidate, sameSide: value }
-    : { ...candidate, clockwise: value };
-}
-
 /** What the molecule states for a candidate, brought to the candidate's own order of ligands. */
 function statedElement(
   molecule: Molecule,
   candidate: StereoCandidate,
 ): { element: StereoElement; value: boolean } | undefined {
   for (const element of molecule.stereo) {
-    if (
-      element.kind === 'tetrahedral' &&
-      candidate.kind === 'tetrahedral' &&
-      element.centre === candidate.centre
-    ) {
-      const odd = isOddPermutation(candidate.ligands.map((ligand) => element.ligands.indexOf(ligand)));
-      return { element, value: element.clockwise !== odd };
-    }
-    if (
-      element.kind === 'double-bond' &&
-      candidate.kind === 'double-bond' &&
-      sameEnds(element.ends, candidate.ends)
-    ) {
-      const [first, second] =
-        element.ends[0] === candidate.ends[0] ? element.ligands : [element.ligands[1], element.ligands[0]];
-      const turned = (first !== candidate.ligands[0]) !== (second !== candidate.ligands[1]);
-      return { element, value: element.sameSide !== turned };
-    }
-    if (element.kind === 'axis' && candidate.kind === 'axis' && sameEnds(element.ends, candidate.ends)) {
-      const straight = element.ends[0] === candidate.ends[0];
-      const [a, b, c, d] = element.ligands;
-      const [first, , second] = straight ? [a, b, c, d] : [c, d, a, b];
-      const turned = (first !== candidate.ligands[0]) !== (second !== candidate.ligands[2]);
-      return { element, value: element.clockwise !== turned };
-    }
+    const value = valueAt(candidate, element);
+    if (value !== undefined) return { element, value };
   }
   return undefined;
-}
-
-function sameEnds(first: readonly [number, number], second: readonly [number, number]): boolean {
-  return (
-    (first[0] === second[0] && first[1] === second[1]) || (first[0] === second[1] && first[1] === second[0])
-  );
-}
-
-type StatedAt = readonly ({ readonly element: StereoElement; readonly value: boolean } | undefined)[];
-
-/** What the text states outright is believed, however strained it is. */
-function allows(
-  { first, second, equal }: CageConstraint,
-  values: readonly boolean[],
-  statedAt: StatedAt,
-): boolean {
-  if (statedAt[first] !== undefined && statedAt[second] !== undefined) return true;
-  return (values[first] === values[second]) === equal;
-}
-
-/** How many free choices the cages take away: for each connected set of heads, one less than its free members. */
-function independent(constraints: readonly CageConstraint[], statedAt: StatedAt): number {
-  const parent = new Map<number, number>();
-  const find = (index: number): number => {
-    let root = index;
-    while ((parent.get(root) ?? root) !== root) root = parent.get(root)!;
-    return root;
-  };
-  let taken = 0;
-  const stated = -1;
-  for (const { first, second } of constraints) {
-    const one = find(statedAt[first] === undefined ? first : stated);
-    const other = find(statedAt[second] === undefined ? second : stated);
-    if (one === other) continue;
-    parent.set(one, other);
-    taken++;
-  }
-  return taken;
-}
-
-/** A candidate matters when turning it alone makes another compound out of at least one isomer. */
-function whichMatter(
-  found: ReadonlyMap<string, { readonly values: readonly boolean[] }>,
-  candidates: readonly StereoCandidate[],
-  kept: readonly StereoElement[],
-  molecule: Molecule,
-): boolean[] {
-  return candidates.map((_, turned) => {
-    for (const [key, { values }] of found) {
-      const stereo = candidates.map((candidate, index) =>
-        elementFor(candidate, index === turned ? !values[index]! : values[index]!),
-      );
-      if (canonicalForm(withStereo(molecule, [...kept, ...stereo])).key !== key) return true;
-    }
-    return false;
-  });
 }
