@@ -30,18 +30,34 @@ interface SourceLine {
   readonly offset: number;
 }
 
-/** All fenced code blocks, in the order of the text. */
-export function findFences(text: string): readonly Fence[] {
+export interface FenceScan {
+  /** In the order of the text. */
+  readonly fences: readonly Fence[];
+  /** A fence or raw HTML, in no list or quote, was still open at the end: text added there would belong to it. */
+  readonly open: boolean;
+}
+
+/** All fenced code blocks. Any text is a document. */
+export function findFences(text: string): FenceScan {
   // A byte order mark is no part of the first line.
   const start = text.charCodeAt(0) === 0xfeff ? 1 : 0;
   const source = sourceLines(text, start);
   const fences: Fence[] = [];
-  for (const token of parser.parse(start === 0 ? text : text.slice(1), {})) {
+  const tokens = parser.parse(start === 0 ? text : text.slice(1), {});
+  for (const token of tokens) {
     if (token.type === 'fence' && token.map !== null) {
       fences.push(fenceAt(source, token.map[0], token.map[1], token.markup, token.content));
     }
   }
-  return fences;
+  const last = tokens.at(-1);
+  const lineCount = source.length - (source.at(-1)!.text === '' ? 1 : 0);
+  const open =
+    last?.level === 0 &&
+    (last.type === 'fence'
+      ? fences.at(-1)?.closed === false
+      : // Also when it ended with the last line: then nothing is known of the next.
+        last.type === 'html_block' && last.map !== null && last.map[1] >= lineCount);
+  return { fences, open };
 }
 
 function fenceAt(
@@ -72,8 +88,9 @@ function fenceAt(
 function contentLine({ text, offset }: SourceLine, content: string): ContentLine {
   const length = Math.min(content.length, text.length);
   const tail = text.slice(text.length - length);
-  if (tail.replaceAll('\0', '\uFFFD') === content)
+  if (tail === content || tail.replaceAll('\0', '\uFFFD') === content) {
     return { text: tail, offset: offset + text.length - length };
+  }
   // A tab that is partly indentation comes back as spaces; the line is taken from that tab on.
   let from = text.length - content.replace(/^ +/, '').length;
   while (text[from - 1] === ' ') from--;

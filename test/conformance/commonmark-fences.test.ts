@@ -58,7 +58,7 @@ const examples: readonly [number, string, readonly string[]][] = [
 
 /** The content as the specification shows it: every line with its line break. */
 function contents(text: string): string[] {
-  return findFences(text).map(({ lines }) => lines.map((line) => `${line.text}\n`).join(''));
+  return findFences(text).fences.map(({ lines }) => lines.map((line) => `${line.text}\n`).join(''));
 }
 
 describe('examples of the CommonMark specification', () => {
@@ -127,7 +127,7 @@ it('traces every line of content back to its own characters', () => {
   fc.assert(
     fc.property(documents, (text) => {
       const theirs = markdownIt.parse(text, {}).filter(({ type }) => type === 'fence');
-      const ours = findFences(text);
+      const ours = findFences(text).fences;
       expect(ours.map(({ lines }) => lines.map((each) => bare(each.text)[0]))).toEqual(
         theirs.map(({ content }) => (content === '' ? [] : bare(content.replace(/\n$/, '')))),
       );

@@ -1,5 +1,7 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { findBlocks } from '../../../server/notebook/markdown.ts';
+import { findFences } from '../../../server/notebook/fences.ts';
+import { findBlocks, parseMarkdown, type MarkdownPage } from '../../../server/notebook/markdown.ts';
 import { marked, withMarks } from './marked.ts';
 
 /** Where the lines of all blocks lie. */
@@ -126,4 +128,77 @@ it('takes deep and long documents', () => {
   ]) {
     expect(findBlocks(`${text}\n\n\n\`\`\`compound\nlabel: 1\n`).length).toBeLessThan(2);
   }
+});
+
+describe('reading a document in pieces', () => {
+  const line = fc.constantFrom(
+    '# heading',
+    '#hash',
+    '   ## indented heading',
+    '###### deep',
+    '```compound',
+    '```',
+    '~~~ reaction',
+    '~~~',
+    '```js',
+    'label: 4',
+    '> ```compound',
+    '- ```compound',
+    '  # in the list',
+    '<!-- remark',
+    '-->',
+    '<div>',
+    '<pre>',
+    '</pre>',
+    '<?x',
+    'text',
+    '',
+    '',
+  );
+  const documents = fc
+    .tuple(
+      fc.array(line, { maxLength: 14 }),
+      fc.constantFrom('\n', '\r\n', '\r'),
+      fc.constantFrom('', '\ufeff'),
+    )
+    .map(([lines, lineBreak, mark]) => mark + lines.join(lineBreak));
+
+  const places = ({ blocks }: MarkdownPage) =>
+    blocks.map(({ range, lines, closed }) => ({ start: range.start, end: range.end, lines, closed }));
+
+  it('finds what reading it whole finds', () => {
+    fc.assert(
+      fc.property(documents, (text) => {
+        const whole = findFences(text)
+          .fences.filter(({ infoStart, infoEnd }) => /compound|reaction/.test(text.slice(infoStart, infoEnd)))
+          .map(({ start, end, lines, closed }) => ({ start, end, lines, closed }));
+        expect(places(parseMarkdown(text))).toEqual(whole);
+      }),
+      { seed: 12, numRuns: 3000 },
+    );
+  });
+
+  it('does not depend on what was read before', () => {
+    fc.assert(
+      fc.property(fc.array(documents, { minLength: 2, maxLength: 4 }), (texts) => {
+        let page: MarkdownPage | undefined;
+        for (const text of texts) {
+          page = parseMarkdown(text, page);
+          expect(page).toEqual(parseMarkdown(text));
+        }
+      }),
+      { seed: 13, numRuns: 500 },
+    );
+  });
+
+  it('parses only the piece that an edit is in', () => {
+    const pieces = [
+      '# a\n```compound\nlabel: 1\n```\n',
+      '# b\n```compound\nlabel: 2\n```\n',
+      '# c\n~~~\n~~~\n',
+    ];
+    const before = parseMarkdown(pieces.join(''));
+    const after = parseMarkdown(`${pieces[0]!}# b\n\n${pieces[1]!}${pieces[2]!}`, before);
+    for (const piece of pieces) expect(after.pieces.get(piece)).toBe(before.pieces.get(piece));
+  });
 });
