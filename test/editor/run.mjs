@@ -26,18 +26,22 @@ async function everything() {
   }
   const editor = installEditor();
   const [browser] = await Promise.all([launchBrowser(), bundleSuite()]);
-  const folder = workspaceCopy(notebook);
-  await copyFile(join(root, 'test', 'editor', 'fixtures', page), join(folder, page));
+  // A copy for each run: what one of them left unsaved would be on the screen of the next.
+  const freshNotebook = async () => {
+    const folder = workspaceCopy(notebook);
+    await copyFile(join(root, 'test', 'editor', 'fixtures', page), join(folder, page));
+    return folder;
+  };
 
   console.log(`Starting VS Code 1.100.3 in ${browser.browserType().name()} ${browser.version()} …`);
   const workbench = await Workbench.start(editor);
   const extension = extensionFolder();
-  const inside = await runMochaInBrowser(browser, workbench, extension, folder);
+  const inside = await runMochaInBrowser(browser, workbench, extension, await freshNotebook());
   tally.passed += inside.passed;
   tally.failed += inside.failed;
-  await checkLooks(tally, browser, workbench, extension, folder, page);
+  await checkLooks(tally, browser, workbench, extension, await freshNotebook(), page);
   await workbench.stop();
-  await checkPackage(tally, browser, editor, folder, page);
+  await checkPackage(tally, browser, editor, await freshNotebook(), page);
   console.log(`Screenshots are in ${relative(process.cwd(), screenshotFolder)}.`);
 }
 
@@ -46,7 +50,8 @@ try {
   await within(limitMs, 'The editor suite', everything());
 } catch (error) {
   tally.failed += 1;
-  console.log(`  ✗ ${error.stack ?? error}`);
+  // Our own words need no stack; a mistake in the harness does.
+  console.log(`  ✗ ${error.constructor === Error ? error.message : error.stack}`);
 }
 await endAll();
 console.log(`The editor suite took ${((Date.now() - begun) / 1000).toFixed(0)} s.`);

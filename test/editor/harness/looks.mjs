@@ -3,7 +3,7 @@
 // pictures for human eyes.
 import { mkdirSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
-import { hover, leave, openInWorkbench, placeOf, rest } from './page.mjs';
+import { hover, leave, openInWorkbench, rest, squiggleUnder } from './page.mjs';
 import { screenshotFolder } from './paths.mjs';
 import { writeFolderSettings } from './workbench.mjs';
 
@@ -75,10 +75,7 @@ export async function checkLooks(tally, browser, workbench, extension, folder, f
     extensionDevelopmentPath: workbench.uriOf(extension),
   });
   await tally.test('look: the fifth bond of a carbon atom is underlined', async () => {
-    await page.locator('.monaco-editor .squiggly-error').first().waitFor();
-    const squiggle = await page.locator('.monaco-editor .squiggly-error').first().boundingBox();
-    const smiles = await placeOf(page, 'CC(C)(C)(C)C');
-    if (Math.abs(squiggle.y - smiles.y) > smiles.height) throw new Error('the squiggle is on another line');
+    await squiggleUnder(page, 'CC(C)(C)(C)C', 1);
     await shoot(page, 'squiggle');
   });
   await tally.test('look: keys and values of a block have colours of their own', async () => {
@@ -95,7 +92,7 @@ export async function checkLooks(tally, browser, workbench, extension, folder, f
     await tally.test(`look: the drawing stands out in a ${kind} theme, changed while running`, async () => {
       writeFolderSettings(folder, { 'workbench.colorTheme': name });
       await page.locator(`.monaco-workbench.${bodyClass}`).waitFor();
-      await rest(page, '(4-methoxyphenyl)');
+      await rest(page, 'COc1ccc(cc1)C(C)O');
       const drawing = await drawingInHover(page);
       await shoot(page, `hover-${kind}`);
       await leave(page);
@@ -104,11 +101,23 @@ export async function checkLooks(tally, browser, workbench, extension, folder, f
       if (drawing.cut) throw new Error(`the drawing is cut: ${JSON.stringify(drawing)}`);
     });
   }
-  await tally.test('look: the message of a finding', async () => {
-    await rest(page, 'CC(C)(C)(C)C');
-    await page.locator(hover).first().waitFor();
-    await shoot(page, 'finding');
-    await leave(page);
-  });
+  for (const [what, text, character] of [
+    ['finding', 'CC(C)(C)(C)C', 1],
+    ['name', '1-(4-methoxyphenyl)ethan-1-ol'],
+    ['formula', 'C9H12O2'],
+  ]) {
+    await tally.test(`look: resting the mouse on a ${what} says something`, async () => {
+      await rest(page, text, character);
+      await page.locator(hover).first().waitFor();
+      // Whatever draws itself into the hover a moment later belongs into the picture.
+      await page
+        .locator(`${hover} img`)
+        .first()
+        .waitFor({ timeout: 3000 })
+        .catch(() => undefined);
+      await shoot(page, `hover-${what}`);
+      await leave(page);
+    });
+  }
   await page.close();
 }

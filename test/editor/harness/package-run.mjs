@@ -1,7 +1,7 @@
 // What users get: the extension packed, installed into an editor that knows nothing of this repository, and used.
 import { readdirSync, statSync } from 'node:fs';
 import { join } from 'node:path';
-import { openInWorkbench } from './page.mjs';
+import { hover, openInWorkbench, rest, squiggleUnder } from './page.mjs';
 import { cache, root } from './paths.mjs';
 import { output } from './processes.mjs';
 import { installExtension, scratchFolder, Workbench } from './workbench.mjs';
@@ -52,10 +52,12 @@ export async function checkPackage(tally, browser, editor, folder, file) {
     if (bytes > limitBytes) throw new Error(`${(bytes / 1e6).toFixed(1)} MB installed`);
   });
 
-  await tally.test('package: finds the fifth bond of a carbon atom', async () => {
+  await tally.test('package: finds the fifth bond of a carbon atom, and draws', async () => {
     const workbench = await Workbench.start(editor, { extensionsFolder });
     const page = await openInWorkbench(browser, workbench, folder, file);
-    await page.locator('.monaco-editor .squiggly-error').first().waitFor();
+    await squiggleUnder(page, 'CC(C)(C)(C)C', 1);
+    await rest(page, 'COc1ccc(cc1)C(C)O');
+    await page.locator(`${hover} img`).first().waitFor();
     await page.close();
     await workbench.stop();
   });

@@ -2,7 +2,8 @@
 /* global document, NodeFilter -- functions given to the page run in the browser */
 import { join } from 'node:path';
 
-const patienceMs = 45_000;
+/** Generous, for machines that do other things at the same time; nothing here measures speed. */
+const patienceMs = 60_000;
 
 /** Opens one file of `folder` in a workbench and waits until its text is on the screen. */
 export async function openInWorkbench(browser, workbench, folder, file, payload = {}) {
@@ -41,11 +42,26 @@ export async function placeOf(page, text) {
   return found.jsonValue();
 }
 
-/** Rests the mouse on a word, as a person would: not in one jump. */
-export async function rest(page, text) {
+/** Waits for an error's squiggle under one character of a text. */
+export async function squiggleUnder(page, text, character) {
   const { x, y, width, height } = await placeOf(page, text);
-  await page.mouse.move(x + width / 2 - 40, y + height / 2 + 30);
-  await page.mouse.move(x + width / 2, y + height / 2, { steps: 8 });
+  const middle = { x: x + (width * (character + 0.5)) / text.length, y: y + height / 2 };
+  await page.waitForFunction(
+    (point) =>
+      [...document.querySelectorAll('.monaco-editor .squiggly-error')].some((squiggle) => {
+        const box = squiggle.getBoundingClientRect();
+        return box.left < point.x && point.x < box.right && box.top < point.y && point.y < box.bottom;
+      }),
+    middle,
+  );
+}
+
+/** Rests the mouse on one character of a text, as a person would: not in one jump. */
+export async function rest(page, text, character = Math.floor(text.length / 2)) {
+  const { x, y, width, height } = await placeOf(page, text);
+  const across = (width * (character + 0.5)) / text.length;
+  await page.mouse.move(x + across - 40, y + height / 2 + 30);
+  await page.mouse.move(x + across, y + height / 2, { steps: 8 });
 }
 
 export const hover = '.monaco-hover:not(.hidden)';

@@ -16,7 +16,7 @@ export async function runMocha(files: readonly (() => Promise<unknown>)[]): Prom
   const { default: Mocha } = await import('mocha');
   /** The lines below are the report. */
   class Silent extends Mocha.reporters.Base {}
-  const mocha = new Mocha({ ui: 'tdd', timeout: 20_000, reporter: Silent });
+  const mocha = new Mocha({ ui: 'tdd', timeout: 60_000, reporter: Silent });
   mocha.suite.emit('pre-require', globalThis, '', mocha);
   for (const load of files) await load();
 

@@ -52,7 +52,7 @@ export async function replace(document: TextDocument, wrong: string, right: stri
 export async function eventually<T>(
   what: string,
   ask: () => T | undefined | Promise<T | undefined>,
-  withinMs = 15_000,
+  withinMs = 30_000,
 ): Promise<T> {
   const deadline = Date.now() + withinMs;
   for (;;) {
