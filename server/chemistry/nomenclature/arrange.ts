@@ -141,7 +141,9 @@ function onlyPlace(molecule: Molecule, atoms: readonly number[], letter: string)
     if (isBond !== (letter === 'E' || letter === 'Z')) return [];
     return [candidate.kind === 'tetrahedral' ? [candidate.centre] : [...candidate.ends]];
   });
-  const inUnit = places.filter((ends) => ends.some((atom) => atoms.includes(atom)));
+  const within = places.filter((ends) => ends.every((atom) => atoms.includes(atom)));
+  const inUnit =
+    within.length > 0 ? within : places.filter((ends) => ends.some((atom) => atoms.includes(atom)));
   const chosen = inUnit.length > 0 ? inUnit : places;
   return chosen.length === 1 ? chosen[0]![0] : undefined;
 }

@@ -3,7 +3,7 @@
  * 2013 (Favre, Powell: Nomenclature of Organic Chemistry) and the usage of 1979 and 1993 still met in notebooks.
  */
 import type { NameReading, NameRemark, Reading } from './reading.ts';
-import { completedName, meaningsOf } from './readings.ts';
+import { completedName, meaningsOf, type Meaning } from './readings.ts';
 import { createCommonNames, type CommonNames } from './common-names.ts';
 import { arrangedReading } from './arrange.ts';
 import { unknownName } from './unknown.ts';
@@ -78,7 +78,7 @@ function read(text: string, limits: NameLimits, lexicon: Lexicon, common: Common
   const cap = limits.readings ?? 32;
   const remarks = new Map<string, NameRemark>();
   const readings = meanings.slice(0, cap).map((meaning): Reading => {
-    const name = meanings.length === 1 ? text : completed(text, prepared, meaning.insertions);
+    const name = meanings.length === 1 ? text : completed(text, prepared, meaning);
     const arranged = arrangedReading(name, meaning.molecule, meaning.draft, prepared, limits);
     for (const remark of arranged.remarks)
       remarks.set(`${String(remark.range.start)} ${remark.message}`, remark);
@@ -92,18 +92,17 @@ function read(text: string, limits: NameLimits, lexicon: Lexicon, common: Common
   };
 }
 
-/** Insertions are written into the prepared text, unless it differs from what was typed only by its length. */
-function completed(
-  text: string,
-  prepared: PreparedName,
-  insertions: Parameters<typeof completedName>[1],
-): string {
+/** What is missing is written into the text as typed, or into the prepared one where that has another order. */
+function completed(text: string, prepared: PreparedName, meaning: Meaning): string {
+  const { insertions, draft } = meaning;
   const inOrder = prepared.origin.every(
     (place, index) => index === 0 || place >= prepared.origin[index - 1]!,
   );
-  if (!inOrder) return completedName(prepared.text, insertions);
+  if (!inOrder) return completedName(prepared.text, insertions, draft.brackets);
+  const place = (offset: number) => prepared.origin[offset] ?? text.length;
   return completedName(
     text,
-    insertions.map((one) => ({ ...one, at: prepared.origin[one.at] ?? text.length })),
+    insertions.map((one) => ({ ...one, at: place(one.at) })),
+    draft.brackets.map(({ at, end }) => ({ at: place(at), end: place(end) })),
   );
 }

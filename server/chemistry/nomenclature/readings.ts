@@ -61,20 +61,33 @@ export function meaningsOf(sentences: readonly (readonly Part[])[], buildLimit: 
   return { meanings: [...found.values()], complete: true, failure };
 }
 
-/** The name with the missing locants written in. */
-export function completedName(text: string, insertions: readonly Insertion[]): string {
-  const sorted = insertions
-    .map((one, order) => ({ ...one, order }))
-    .sort((a, b) => b.at - a.at || b.order - a.order);
-  let name = text;
-  for (const { at, text: inserted } of sorted) {
-    const before = name.slice(0, at);
-    const after = name.slice(at);
-    let middle = inserted;
-    if (middle.startsWith('-') && /[-\s([]$|^$/.test(before)) middle = middle.slice(1);
-    else if (!middle.startsWith('-') && /[\p{L}\d')\]]$/u.test(before)) middle = `-${middle}`;
-    if (middle.endsWith('-') && after.startsWith('-')) middle = middle.slice(0, -1);
-    name = before + middle + after;
+/** The name with the missing locants and brackets written in. */
+export function completedName(
+  text: string,
+  insertions: readonly Insertion[],
+  brackets: readonly { readonly at: number; readonly end: number }[] = [],
+): string {
+  // At one place: a closing bracket, then locants, then an opening bracket.
+  const all = [
+    ...insertions.map(({ at, text: added }, order) => ({ at, text: added, order: order + 1000 })),
+    ...brackets.map(({ at }) => ({ at, text: '(', order: 1e6 })),
+    ...brackets.map(({ end }) => ({ at: end, text: ')', order: 0 })),
+  ];
+  all.sort((first, second) => first.at - second.at || first.order - second.order);
+  let name = '';
+  let last = 0;
+  for (const one of all) {
+    name += text.slice(last, one.at);
+    last = one.at;
+    let added = one.text;
+    if (added === '(' || added === ')') {
+      name += added;
+      continue;
+    }
+    if (added.startsWith('-') && /[-\s([]$|^$/.test(name)) added = added.slice(1);
+    else if (!added.startsWith('-') && /[\p{L}\d')\]]$/u.test(name)) added = `-${added}`;
+    if (added.endsWith('-') && text[one.at] === '-') added = added.slice(0, -1);
+    name += added;
   }
-  return name;
+  return name + text.slice(last);
 }

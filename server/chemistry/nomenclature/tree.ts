@@ -65,6 +65,8 @@ export interface Substitution extends OpenPlace {
   readonly count: number;
   readonly unit: Unit;
   readonly range: TextRange;
+  /** The group was written without brackets that would belong here, up to the end of `range`. */
+  readonly bracketAt?: number;
 }
 
 /** One way of understanding a stretch of substituents; the ways with the lowest cost are meant. */

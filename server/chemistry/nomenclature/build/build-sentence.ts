@@ -72,7 +72,6 @@ export function buildSentence(parts: readonly Part[], draft: Draft, choices: Cho
   }
   if (functional) {
     const [word, group, sites, anion] = functionWords[functional.index]!;
-    const count = functional.count ?? 1;
     if (parents.length === 0 && metals.length === 0 && radicals.length > 0) {
       if (group === '' || hydrogens > 0) return reject();
       return functionalClass(radicals, group, sites, functional.count, word, draft, choices) || reject();
@@ -85,7 +84,6 @@ export function buildSentence(parts: readonly Part[], draft: Draft, choices: Cho
         [{ smiles: anion, charge: sites.length === 0 ? 1 : sites.length, count: functional.count }],
         draft,
         choices,
-        count,
       ) || reject()
     );
   }
@@ -166,8 +164,7 @@ function functionalClass(
     const atoms = add(group, draft);
     const places = [...new Set(sites)].map((site) => atoms[site]!);
     for (const place of places) {
-      const used = draft.orderSum(place);
-      draft.atoms[place]!.capacity = used + sites.filter((site) => atoms[site] === place).length;
+      draft.settleCapacity(place, undefined, sites.filter((site) => atoms[site] === place).length);
     }
     if (copies > 1) {
       const all = valences.flatMap((one) =>
@@ -200,7 +197,6 @@ function salt(
   negatives: readonly Ion[],
   draft: Draft,
   choices: Choices,
-  _count: number,
 ): boolean {
   const positives: { charge: number; count: number | undefined; make: () => boolean }[] = metals.map(
     (metal) => ({
@@ -300,7 +296,9 @@ function acidsAndBases(
     draft.atoms[site]!.capacity++;
     left = left.filter((one) => one !== site);
   }
-  if (metals.length === 0 && parents.length === 1) return left.length === 0;
+  // An acid's anion by itself is an ion; half an ester is nothing definite.
+  if (metals.length === 0 && parents.length === 1)
+    return left.length === 0 || (valences.length === 0 && hydrogens === 0);
   const bases = parents.length === 2 ? parents.slice(0, 1) : [];
   const positives = [
     ...metals.map((metal) => ({ metal, base: undefined })),

@@ -1,5 +1,5 @@
 /** Builds one unit of the tree, and everything that hangs on it, into the draft. */
-import type { Ending, Locant, Unit } from '../tree.ts';
+import type { Ending, Locant, Substitution, Unit } from '../tree.ts';
 import { noSuchPlace, type BuiltUnit } from './built-unit.ts';
 import type { Choices } from './choices.ts';
 import type { Draft } from './draft.ts';
@@ -20,10 +20,13 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
   if (unit.attach) {
     const atom = atoms[unit.attach.atom]!;
     built.free.push({ atom, order: unit.attach.order });
+    const link = unit.linkAt === undefined ? -1 : atoms[unit.linkAt]!;
+    const joined = unit.needsLink === true && link === atom ? 1 : 0;
     // An atom written in brackets says what it has; its free valence comes on top.
-    if (skeleton.atoms[unit.attach.atom]!.hydrogens !== undefined) {
-      draft.atoms[atom]!.capacity += unit.attach.order + (unit.needsLink === true ? 1 : 0);
-    }
+    if (skeleton.atoms[unit.attach.atom]!.hydrogens !== undefined)
+      draft.atoms[atom]!.capacity += unit.attach.order + joined;
+    else if (!draft.atoms[atom]!.mancude) draft.settleCapacity(atom, undefined, unit.attach.order + joined);
+    if (unit.needsLink === true && link >= 0 && link !== atom) draft.settleCapacity(link, undefined, 1);
   }
   skeleton.atoms.forEach((atom, index) => {
     if (atom.locants.includes('@')) built.sites.push(atoms[index]!);
@@ -42,12 +45,24 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
   const endings = [...unit.endings].sort((first, second) => rank(first) - rank(second));
   for (const ending of endings) if (!placeEnding(ending, built, draft, choices)) return undefined;
   if (!placeUnsaturations(unit, places, draft, choices)) return undefined;
+  let substitutions = 0;
+  let used: Substitution | undefined;
   for (const ways of unit.groupings) {
     const way = ways[choices.pick(ways.length)]!;
     draft.cost += way.cost;
     for (const substitution of way.substitutions) {
+      substitutions += substitution.count;
+      used = substitution;
+      if (ways.length > 1 && substitution.bracketAt !== undefined) {
+        draft.brackets.push({ at: substitution.bracketAt, end: substitution.range.end });
+      }
       if (!placeSubstitution(substitution, unit, built, draft, choices, buildUnit)) return undefined;
     }
+  }
+  // A single group on a ring whose places are all alike needs no locant, and one other than 1 is not about the ring.
+  if (substitutions === 1 && places.alike && unit.endings.length + unit.unsaturations.length === 0) {
+    for (const inserted of places.inserted) draft.insertions.splice(draft.insertions.indexOf(inserted), 1);
+    if (used?.locants !== undefined && used.locants[0] !== '1') draft.cost += 3;
   }
   for (const word of unit.stereo) {
     if (word.locant === undefined) draft.loose.push({ atoms, word });

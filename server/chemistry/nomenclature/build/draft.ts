@@ -38,6 +38,8 @@ export class Draft {
   readonly neighbours: { atom: number; bond: number }[][] = [];
   readonly stereo: StereoElement[] = [];
   readonly insertions: Insertion[] = [];
+  /** Brackets to be written in round compound groups. */
+  readonly brackets: { readonly at: number; readonly end: number }[] = [];
   readonly wanted: { atom: number; word: StereoWord }[] = [];
   readonly loose: { atoms: readonly number[]; word: StereoWord }[] = [];
   readonly chains: ChainClaim[] = [];
@@ -107,9 +109,10 @@ export class Draft {
     return added;
   }
 
-  settleCapacity(atom: number, hydrogens?: number): void {
+  /** `more`: bonds that are still to come and must fit. */
+  settleCapacity(atom: number, hydrogens?: number, more = 0): void {
     const own = this.atoms[atom]!;
-    const used = this.orderSum(atom);
+    const used = this.orderSum(atom) + more;
     own.capacity =
       hydrogens === undefined
         ? (usualValences(own.atomicNumber, own.charge)?.find((usual) => usual >= used) ?? used)

@@ -52,7 +52,10 @@ function attach(ending: Ending, host: number, index: number, built: BuiltUnit, d
       draft.settleCapacity(atom, undefined);
       if (suffix.anion === true && draft.atoms[atom]!.charge < 0) built.sites.push(atom);
     }
-    if (suffix.radical === true && suffix.kind === 'on') built.free.push({ atom: added[0]!, order: 1 });
+    if (suffix.radical === true && suffix.kind === 'on') {
+      draft.settleCapacity(added[0]!, undefined, 1);
+      built.free.push({ atom: added[0]!, order: 1 });
+    }
   }
   if (suffix.kind === 'at') {
     built.places.spent.add(host);
@@ -93,6 +96,7 @@ function endingAtoms(ending: Ending, built: BuiltUnit, draft: Draft, choices: Ch
         ? [atoms[0]!, atoms[1]!]
         : draft.fail(ending.range, 'Locants are missing for these free valences.');
   }
+  if (kind === 'chain' && count === 1 && (atoms.length <= 2 || suffix.name === 'oxy')) return [atoms[0]!];
   if (places.alike && count === 1) return [atoms[0]!];
   const order = suffix.kind === 'free' ? Number(suffix.group) : suffix.group.startsWith('=') ? 2 : 1;
   const chosen: number[] = [];

@@ -66,7 +66,7 @@ function placeDoubleBonds(draft: Draft, choices: Choices, whole: TextRange): boo
     const left = ring.filter((one) => !draft.atoms[one]!.saturated);
     const options = left.filter(
       (atom) =>
-        draft.free(atom) >= 2 &&
+        draft.free(atom) >= 1 &&
         matching(
           draft,
           left.filter((one) => one !== atom),

@@ -1,6 +1,6 @@
 /** The numbered places of one unit while it is built. */
 import type { Locant, Unit } from '../tree.ts';
-import type { Draft } from './draft.ts';
+import type { Draft, Insertion } from './draft.ts';
 import type { SkeletonGraph } from './skeleton.ts';
 
 export class Places {
@@ -14,6 +14,8 @@ export class Places {
   fresh: boolean;
   /** Carbons that are part of an acid, amide, nitrile or aldehyde group, which take no substituent by themselves. */
   readonly spent = new Set<number>();
+  /** Locants written in for substituents. */
+  readonly inserted: Insertion[] = [];
   /** Where `o`, `m`, `p` meets a ring without anything on it: the place that the next substituent takes. */
   awaiting: Locant | undefined;
 

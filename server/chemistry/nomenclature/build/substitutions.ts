@@ -58,7 +58,9 @@ export function placeSubstitution(
     draft.bond(host, free.atom, free.order);
   }
   if (!given && (offered > 1 || substitution.count > 1) && places.atoms.length > 1) {
-    draft.insertions.push({ at: substitution.at, text: `${chosen.join(',')}-` });
+    const insertion = { at: substitution.at, text: `${chosen.join(',')}-` };
+    draft.insertions.push(insertion);
+    places.inserted.push(insertion);
     places.opened = true;
   }
   return true;
@@ -101,16 +103,25 @@ function openPlaces(
   const { places } = built;
   const carbon = draft.atoms[free.atom]!.atomicNumber === 6;
   return [...places.named()].filter((atom) => {
-    if (atom >= before || places.spent.has(atom)) return false;
+    if (atom >= before || (places.spent.has(atom) && places.atoms.length > 1)) return false;
     // Greek locants mark side chains (toluene, acetophenone), which a bare prefix does not mean.
     if (/^[α-ω]/.test(places.locantOf(atom)!)) return false;
     const element = draft.atoms[atom]!.atomicNumber;
-    if (element === 8 || (element === 16 && places.atoms.length > 1)) return false;
-    if (element === 7 && !carbon && places.atoms.length > 1) return false;
+    const alone = places.atoms.length === 1 && places.atoms[0] === atom;
+    if ((element === 8 || element === 16 || element === 34) && !alone) return false;
+    if (element === 7 && !alone && (!carbon || !takesCarbon(built, atom))) return false;
     const usual =
       draft.usualHydrogen.includes(atom) && draft.atoms[atom]!.mancude && !draft.atoms[atom]!.saturated;
     const valence = built.free.filter((one) => one.atom === atom).reduce((sum, one) => sum + one.order, 0);
     const spare = (usual ? draft.free(atom) : draft.freeBesideRing(atom)) - valence;
     return spare >= free.order;
   });
+}
+
+/** Nitrogen of the parent itself (aniline, urea), or of an amide; that of an ending `amine` is always cited as N. */
+function takesCarbon(built: BuiltUnit, atom: number): boolean {
+  const { places } = built;
+  return (
+    places.atoms.includes(atom) || places.unit.endings.some((ending) => ending.suffix.name.endsWith('amide'))
+  );
 }

@@ -37,7 +37,9 @@ export function placeUnsaturations(unit: Unit, places: Places, draft: Draft, cho
       const options = bondsOf(places, draft, order).filter(
         (bond) => bond.position >= from && !cumulated(draft, bond.from, bond.to),
       );
-      const only = places.alike && unit.endings.length === 0 && places.fresh ? options.slice(0, 1) : options;
+      const first =
+        index === 0 && places.alike && unit.endings.every((ending) => ending.locants !== undefined);
+      const only = first ? options.slice(0, 1) : options;
       if (only.length === 0) return false;
       const bond = only[choices.pick(only.length)]!;
       raise(draft, bond.from, bond.to, order);
@@ -46,7 +48,7 @@ export function placeUnsaturations(unit: Unit, places: Places, draft: Draft, cho
       chosen.push(places.locantOf(bond.from)!);
     }
     draft.insertions.push({ at, text: `${count > 1 ? '' : ''}-${chosen.join(',')}-` });
-    places.opened ||= count > 1 || !(places.alike && unit.endings.length === 0);
+    places.opened ||= count > 1 || !places.alike;
   }
   return true;
 }

@@ -56,6 +56,7 @@ export const suffixes: readonly SuffixEntry[] = [
   { name: 'sulfonyl chloride', kind: 'on', group: 'S(=O)(=O)Cl' },
   { name: 'phosphonic acid', kind: 'on', group: 'P(=O)(O)O' },
   { name: 'boronic acid', kind: 'on', group: 'B(O)O' },
+  { name: 'oxy', kind: 'on', group: 'O', radical: true },
   { name: 'yl', kind: 'free', group: '1' },
   { name: 'ylidene', kind: 'free', group: '2' },
   { name: 'ylidyne', kind: 'free', group: '3' },

@@ -31,8 +31,16 @@ const bare = (skeletons: readonly SkeletonGraph[], start: number, end: number): 
 /** Groups and parents that begin at the offset, brackets excepted. */
 export function groupsAt(text: string, lower: string, offset: number, lexicon: Lexicon): Group[] {
   const found: Group[] = [];
-  for (const word of wordsAt(lexicon.words, lower, offset)) {
-    found.push(...groupsOf(word.value, text, lower, offset, word.end, lexicon));
+  const words = wordsAt(lexicon.words, lower, offset);
+  const radicalEnds = new Set(words.filter((word) => word.value.kind === 'radical').map((word) => word.end));
+  for (const word of words) {
+    const groups = groupsOf(word.value, text, lower, offset, word.end, lexicon);
+    // `sulfanyl` is a word of its own, not `sulfane` with an ending.
+    const made =
+      word.value.kind === 'radical'
+        ? groups
+        : groups.filter((group) => group.role === 'parent' || !radicalEnds.has(group.end));
+    found.push(...made);
   }
   if (lower.startsWith('cyclo', offset)) {
     for (const word of wordsAt(lexicon.words, lower, offset + 5)) {
@@ -50,7 +58,7 @@ export function groupsAt(text: string, lower: string, offset: number, lexicon: L
         found.push(...withTails([skeleton], offset, chainTailsAt(text, lower, word.end, lexicon)));
     }
   }
-  for (const name of ringNameAt(text, lower, offset, lexicon)) {
+  for (const name of ringNameAt(text, lower, offset)) {
     found.push(...ringForms(() => name.skeletons, text, lower, offset, name.end, lexicon));
   }
   return found;
@@ -96,8 +104,10 @@ function groupsOf(
     }
     case 'branched':
       return branchedForms(word.skeletons, word.oxy, text, lower, start, end, lexicon);
-    case 'ring':
     case 'parent':
+      if (!word.extensible) return plainForms(word.skeletons, lower, start, end);
+      return ringForms(word.skeletons, text, lower, start, end, lexicon);
+    case 'ring':
       return ringForms(word.skeletons, text, lower, start, end, lexicon);
     case 'acid':
       return acidForms(word, lower, start, end);
@@ -128,6 +138,19 @@ function cycloalkoxy(skeletons: readonly SkeletonGraph[], start: number, end: nu
   }));
   const atom = made[0]!.atoms.length - 1;
   return { unit: { ...bare(made, start, end), attach: { atom, order: 1 } }, role: 'radical', end };
+}
+
+/** The name as it stands, with its final e or without. */
+function plainForms(
+  skeletons: () => readonly SkeletonGraph[],
+  lower: string,
+  start: number,
+  end: number,
+): Group[] {
+  const made = skeletons();
+  if (made.length === 0) return [];
+  const last = lower[end] === 'e' ? end + 1 : end;
+  return [{ unit: bare(made, start, last), role: 'parent', end: last }];
 }
 
 /** `pyridine`, `pyridin-2-yl`, `pyridine-3-carboxylic acid`; the final e is elided before a vowel. */

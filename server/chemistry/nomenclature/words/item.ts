@@ -12,6 +12,8 @@ export interface GroupItem {
   readonly joins: boolean;
   readonly bracketed: boolean;
   readonly start: number;
+  /** Where the group itself begins, after its locants. */
+  readonly bodyAt: number;
   readonly end: number;
 }
 

@@ -124,6 +124,13 @@ export class ItemReader {
     }
   }
 
+  /** Ends of words like `disulfanyl` that begin where a multiplier could be read as well. */
+  #radicalEnds(start: number, locants: readonly Locant[] | undefined): ReadonlySet<number> {
+    const from = locants === undefined ? start : (locantsAt(this.name.text, start)?.end ?? start);
+    const words = wordsAt(this.lexicon.words, this.name.lower, from);
+    return new Set(words.filter((word) => word.value.kind === 'radical').map((word) => word.end));
+  }
+
   *#groupsAt(
     start: number,
     from: number,
@@ -131,6 +138,7 @@ export class ItemReader {
     count: number,
   ): Generator<{ item: Item; end: number }> {
     const { text, lower } = this.name;
+    const bodyAt = locants === undefined ? start : (locantsAt(text, start)?.end ?? start);
     const place = { ...(locants ? { locants } : {}), count, start };
     const bracket = text[from];
     if (bracket === '(' || bracket === '[') {
@@ -138,7 +146,7 @@ export class ItemReader {
         if (
           inner.role !== 'radical' ||
           text[inner.end] !== (bracket === '(' ? ')' : ']') ||
-          inner.count !== 1
+          (inner.count !== 1 && count !== 1)
         )
           continue;
         const end = inner.end + 1;
@@ -147,7 +155,9 @@ export class ItemReader {
           item: {
             kind: 'group',
             ...place,
+            count: Math.max(count, inner.count),
             unit: inner.unit,
+            bodyAt,
             role: 'radical',
             joins: !locants,
             bracketed: true,
@@ -166,7 +176,10 @@ export class ItemReader {
         yield { item: { kind: 'replacement', ...place, atomicNumber, end: word.end }, end: word.end };
       }
     }
-    const groups = groupsAt(text, lower, from, this.lexicon);
+    const direct = count > 1 ? this.#radicalEnds(start, locants) : undefined;
+    const groups = groupsAt(text, lower, from, this.lexicon).filter(
+      (group) => direct?.has(group.end) !== true,
+    );
     groups.sort((first, second) => second.end - first.end);
     const normal = locants?.length === 1 && count === 1 && locants[0] === 'N' && text[start] === 'n';
     for (const group of groups) {
@@ -177,6 +190,7 @@ export class ItemReader {
         role: group.role,
         bracketed: false,
         start,
+        bodyAt,
         end: group.end,
       };
       if (normal && group.normal === true) yield { item: { ...base, joins: true }, end: group.end };

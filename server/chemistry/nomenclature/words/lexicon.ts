@@ -4,7 +4,7 @@ import type { SuffixEntry } from '../tree.ts';
 import { anions } from '../vocabulary/functions.ts';
 import { acids, type AcidLine } from '../vocabulary/acids.ts';
 import { alkaneStem, groupTerm, numericalTerm, numericalTermVariants } from '../vocabulary/numbers.ts';
-import { parents } from '../vocabulary/parents.ts';
+import { extensibleParents, parents } from '../vocabulary/parents.ts';
 import {
   branchedStems,
   contractedRings,
@@ -22,7 +22,7 @@ export type Word =
   | { kind: 'contracted'; skeletons: Lazy }
   | { kind: 'branched'; skeletons: Lazy; oxy: Lazy }
   | { kind: 'ring'; skeletons: Lazy }
-  | { kind: 'parent'; skeletons: Lazy }
+  | { kind: 'parent'; skeletons: Lazy; extensible: boolean }
   | { kind: 'acid'; line: AcidLine; form: 'acid' | 'other'; skeletons: Lazy }
   | { kind: 'hydro' }
   | { kind: 'replacement'; atomicNumber: number };
@@ -139,7 +139,11 @@ export function createLexicon(): Lexicon {
     if (line[1] !== '') put(line[1], { kind: 'acid', line, form: 'other', skeletons });
   }
   for (const [name, smiles, locants] of anions) {
-    put(name, { kind: 'parent', skeletons: lazily(() => [skeletonFromSmiles(smiles, locants)]) });
+    put(name, {
+      kind: 'parent',
+      skeletons: lazily(() => [skeletonFromSmiles(smiles, locants)]),
+      extensible: false,
+    });
   }
   put('hydro', { kind: 'hydro' });
   for (const [name, atomicNumber] of replacements) add(words, name, { kind: 'replacement', atomicNumber });
@@ -163,12 +167,13 @@ function putParents(put: (word: string, value: Word) => void): void {
         return [skeleton && line[3] !== undefined ? { ...skeleton, mark: line[3] } : skeleton];
       }),
     );
-    put(name, { kind: 'parent', skeletons: () => made.flatMap((one) => one()) });
+    const extensible = extensibleParents.has(name);
+    put(name, { kind: 'parent', skeletons: () => made.flatMap((one) => one()), extensible });
     lines.forEach((line, index) => {
       if (line[3] === undefined) return;
       const skeletons = lazily(() => made[index]!().map((one) => withoutMark(one)));
-      put(line[3] + name, { kind: 'parent', skeletons });
-      if (long[line[3]] !== undefined) put(long[line[3]]! + name, { kind: 'parent', skeletons });
+      put(line[3] + name, { kind: 'parent', skeletons, extensible });
+      if (long[line[3]] !== undefined) put(long[line[3]]! + name, { kind: 'parent', skeletons, extensible });
     });
   }
 }

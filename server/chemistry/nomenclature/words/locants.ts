@@ -3,11 +3,11 @@ import type { Locant, StereoWord } from '../tree.ts';
 
 const one = "(?:\\d+(?:[a-z](?![a-z]))?'*(?:-N'*(?![a-z]))?|[NnOSP]\\d*'*|[αβγδεω]'*|[omp])";
 const list = new RegExp(`(${one}(?:, ?${one})*)-`, 'y');
-const indicated = /\(?((?:\d+[a-z]?'*H)(?:,\d+[a-z]?'*H)*)\)?-?/y;
+const indicated = /\(?((?:\d+[a-z]?'*[Hh](?![a-z]))(?:,\d+[a-z]?'*[Hh](?![a-z]))*)\)?-?/y;
 const descriptor =
-  /\(((?:(?:\d+[a-z]?'*|[NSP])?(?:[RSEZMPrs]|ξ)\*?)(?:[,;] ?(?:\d+[a-z]?'*|[NSP])?(?:[RSEZMPrs])\*?)*)\)-?/y;
+  /\(((?:(?:\d+[a-z]?'*|[NSP])?(?:[RSEZMPrsez]|ξ)\*?)(?:[,;] ?(?:\d+[a-z]?'*|[NSP])?(?:[RSEZMPrsez])\*?)*)\)-?/y;
 const wordDescriptor =
-  /(cis|trans|rac|rel|meso|Z|E|R|S|dl|DL|D|L)-|\(((?:\+|-|±|\+\/-|\+-|cis|trans|dl|DL|d|l|rac))\)-/y;
+  /(cis|trans|rac|rel|meso|Z|E|dl|DL|D|L)-|\(((?:\+|-|±|\+\/-|\+-|cis|trans|dl|DL|d|l|rac))\)-/y;
 
 export interface Written<T> {
   readonly value: T;
@@ -49,7 +49,7 @@ export function stereoAt(text: string, offset: number): Written<StereoWord[]> | 
       const range = { start: at + lead, end: at + part.length };
       words.push({
         ...(own[1] === undefined ? {} : { locant: own[1] }),
-        letter: own[2] as StereoWord['letter'],
+        letter: (/[ez]/.test(own[2]!) ? own[2]!.toUpperCase() : own[2]!) as StereoWord['letter'],
         range,
       });
       if (own[3] === '*') words.push({ letter: 'rel', range });

@@ -1,7 +1,6 @@
 /** Ring names made by rule: Hantzsch–Widman (P-22.2.2), benzo heterocycles (P-25.2.2.4) and fusion names (P-25.3). */
 import type { SkeletonGraph } from '../build/skeleton.ts';
 import { hantzschWidmanAt } from './hantzsch-widman.ts';
-import type { Lexicon } from './lexicon.ts';
 
 export interface RingName {
   readonly skeletons: readonly SkeletonGraph[];
@@ -10,6 +9,6 @@ export interface RingName {
 }
 
 /** Ring names by rule that begin at the offset. */
-export function ringNameAt(text: string, lower: string, offset: number, _lexicon: Lexicon): RingName[] {
+export function ringNameAt(text: string, lower: string, offset: number): RingName[] {
   return hantzschWidmanAt(text, lower, offset);
 }

@@ -12,7 +12,7 @@ export interface Tail {
   readonly end: number;
 }
 
-const added = /-?(\d+[a-z]?(?:,\d+[a-z]?)*)\((\d+[a-z]?H(?:,\d+[a-z]?H)*)\)-/y;
+const added = /-?(\d+[a-z]?(?:,\d+[a-z]?)*)\((\d+[a-z]?[Hh](?:,\d+[a-z]?[Hh])*)\)-/y;
 const elided = /(tetr|pent|hex)(?=ol|on|amin|oic|yl)/y;
 
 interface Counted {
@@ -58,7 +58,7 @@ function* countedAt(text: string, lower: string, offset: number, lexicon: Lexico
 export function endingsAt(text: string, lower: string, offset: number, lexicon: Lexicon): Tail[] {
   const found: Tail[] = [];
   const seen = new Set<string>();
-  const begin = lower[offset] === 'e' && !lower.startsWith('en', offset) ? [offset + 1, offset] : [offset];
+  const begin = lower[offset] === 'e' ? [offset + 1, offset] : [offset];
   for (const from of begin) {
     for (const counted of countedAt(text, lower, from, lexicon)) {
       for (const word of wordsAt(lexicon.suffixes, lower, counted.end)) {
