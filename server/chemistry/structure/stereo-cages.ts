@@ -27,7 +27,7 @@ export function cageConstraints(
     list.filter(({ bond }) => inRing[bond]).map(({ atom }) => atom),
   );
   const heads = candidates.flatMap((candidate, index) =>
-    candidate.kind === 'tetrahedral' && ringLinks[candidate.centre]!.length === 3
+    candidate.kind === 'tetrahedral' && ringLinks[candidate.centre]!.length >= 3
       ? [{ candidate, index }]
       : [],
   );
@@ -38,14 +38,10 @@ export function cageConstraints(
       const paths = threePaths(ringLinks, first.candidate.centre, second.candidate.centre);
       if (paths === undefined || !isTight(paths.map((path) => path.length - 2))) continue;
       // Seen from outside at either head, the three chains run round in opposite senses.
-      const from = [
-        outside(first.candidate.ligands, ringLinks[first.candidate.centre]!),
-        ...paths.map((path) => path[1]!),
-      ];
-      const to = [
-        outside(second.candidate.ligands, ringLinks[second.candidate.centre]!),
-        ...paths.map((path) => path[path.length - 2]!),
-      ];
+      const starts = paths.map((path) => path[1]!);
+      const ends = paths.map((path) => path[path.length - 2]!);
+      const from = [outside(first.candidate.ligands, starts), ...starts];
+      const to = [outside(second.candidate.ligands, ends), ...ends];
       const firstOdd = isOddPermutation(from.map((ligand) => first.candidate.ligands.indexOf(ligand)));
       const secondOdd = isOddPermutation(to.map((ligand) => second.candidate.ligands.indexOf(ligand)));
       constraints.push({ first: first.index, second: second.index, equal: firstOdd !== secondOdd });
@@ -54,8 +50,9 @@ export function cageConstraints(
   return constraints;
 }
 
-function outside(ligands: readonly number[], ringLigands: readonly number[]): number {
-  return ligands.find((ligand) => !ringLigands.includes(ligand))!;
+/** The ligand that is on none of the three chains. */
+function outside(ligands: readonly number[], onChains: readonly number[]): number {
+  return ligands.find((ligand) => !onChains.includes(ligand))!;
 }
 
 /** `bridges` are the numbers of atoms between the heads on the three chains. */
