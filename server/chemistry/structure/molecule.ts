@@ -129,6 +129,21 @@ export class MoleculeBuilder {
     return this.atoms.length - 1;
   }
 
+  /** The same for an atom of a SMILES without brackets; the shortest way, because nearly all atoms come by it. */
+  addPlainAtom(atomicNumber: number, aromatic: boolean, start: number, end: number): number {
+    this.atoms.push({
+      atomicNumber,
+      isotope: 0,
+      charge: 0,
+      hydrogens: 0,
+      aromatic,
+      atomClass: 0,
+      range: { start, end },
+    });
+    this.neighbours.push([]);
+    return this.atoms.length - 1;
+  }
+
   /** Adds a bond between two atoms already added and returns its index. */
   addBond(
     from: number,

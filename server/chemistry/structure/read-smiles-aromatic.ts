@@ -69,31 +69,35 @@ function doubleBondNeed({ builder, implied }: SmilesDraft, index: number): 'need
 /** The bonds of `among` that lie on no ring made of such bonds and of those written aromatic. */
 function bridgesAmong(builder: MoleculeBuilder, among: ReadonlySet<number>): Set<number> {
   const usable = (bond: number) => among.has(bond) || builder.bonds[bond]!.aromatic;
-  const order = new Int32Array(builder.atoms.length).fill(-1);
-  const low = new Int32Array(builder.atoms.length);
+  const { atoms, neighbours } = builder;
+  const order = new Int32Array(atoms.length).fill(-1);
+  const low = new Int32Array(atoms.length);
+  const by = new Int32Array(atoms.length);
+  const next = new Int32Array(atoms.length);
   const bridges = new Set<number>();
+  const stack: number[] = [];
   let clock = 0;
-  for (let root = 0; root < builder.atoms.length; root++) {
-    if (order[root] !== -1 || !builder.atoms[root]!.aromatic) continue;
-    const stack = [{ atom: root, by: -1, next: 0 }];
+  for (let root = 0; root < atoms.length; root++) {
+    if (order[root] !== -1 || !atoms[root]!.aromatic) continue;
     order[root] = low[root] = clock++;
+    by[root] = -1;
+    stack.push(root);
     while (stack.length > 0) {
-      const top = stack[stack.length - 1]!;
-      const neighbour = builder.neighbours[top.atom]![top.next++];
+      const atom = stack[stack.length - 1]!;
+      const neighbour = neighbours[atom]![next[atom]!++];
       if (neighbour === undefined) {
         stack.pop();
         const below = stack[stack.length - 1];
-        if (below !== undefined) {
-          low[below.atom] = Math.min(low[below.atom]!, low[top.atom]!);
-          if (low[top.atom]! > order[below.atom]!) bridges.add(top.by);
-        }
-      } else if (neighbour.bond !== top.by && usable(neighbour.bond)) {
-        if (order[neighbour.atom] === -1) {
+        if (below === undefined) continue;
+        if (low[atom]! < low[below]!) low[below] = low[atom]!;
+        if (low[atom]! > order[below]!) bridges.add(by[atom]!);
+      } else if (neighbour.bond !== by[atom] && usable(neighbour.bond)) {
+        const seen = order[neighbour.atom]!;
+        if (seen === -1) {
           order[neighbour.atom] = low[neighbour.atom] = clock++;
-          stack.push({ atom: neighbour.atom, by: neighbour.bond, next: 0 });
-        } else {
-          low[top.atom] = Math.min(low[top.atom]!, order[neighbour.atom]!);
-        }
+          by[neighbour.atom] = neighbour.bond;
+          stack.push(neighbour.atom);
+        } else if (seen < low[atom]!) low[atom] = seen;
       }
     }
   }

@@ -43,34 +43,31 @@ interface OpenRing {
   readonly end: number;
 }
 
-const organicAtoms: Readonly<Record<string, { number: number; aromatic: boolean }>> = {
-  B: { number: 5, aromatic: false },
-  C: { number: 6, aromatic: false },
-  N: { number: 7, aromatic: false },
-  O: { number: 8, aromatic: false },
-  P: { number: 15, aromatic: false },
-  S: { number: 16, aromatic: false },
-  F: { number: 9, aromatic: false },
-  I: { number: 53, aromatic: false },
-  '*': { number: 0, aromatic: false },
-  b: { number: 5, aromatic: true },
-  c: { number: 6, aromatic: true },
-  n: { number: 7, aromatic: true },
-  o: { number: 8, aromatic: true },
-  p: { number: 15, aromatic: true },
-  s: { number: 16, aromatic: true },
-};
+/** Atomic number of the one-letter atoms that stand without brackets, by character code; 0 elsewhere. */
+const organicNumber = new Uint8Array(128);
+const lowerCase = new Uint8Array(128);
+for (const [letter, atomicNumber] of Object.entries({ B: 5, C: 6, N: 7, O: 8, P: 15, S: 16, F: 9, I: 53 })) {
+  organicNumber[letter.charCodeAt(0)] = atomicNumber;
+  if (letter === 'F' || letter === 'I') continue;
+  organicNumber[letter.toLowerCase().charCodeAt(0)] = atomicNumber;
+  lowerCase[letter.toLowerCase().charCodeAt(0)] = 1;
+}
+const asterisk = 42;
+const openBracket = 91;
 
-const bondSymbols: Readonly<Record<string, Omit<BondSymbol, 'at'>>> = {
-  '-': { order: 1, aromatic: false, direction: 0 },
-  '=': { order: 2, aromatic: false, direction: 0 },
-  '#': { order: 3, aromatic: false, direction: 0 },
-  $: { order: 4, aromatic: false, direction: 0 },
-  ':': { order: 1, aromatic: true, direction: 0 },
-  '/': { order: 1, aromatic: false, direction: 1 },
-  '\\': { order: 1, aromatic: false, direction: -1 },
-  '~': { order: 0, aromatic: false, direction: 0 },
-};
+const bondSymbols: (Omit<BondSymbol, 'at'> | undefined)[] = [];
+for (const [symbol, order, aromatic, direction] of [
+  ['-', 1, false, 0],
+  ['=', 2, false, 0],
+  ['#', 3, false, 0],
+  ['$', 4, false, 0],
+  [':', 1, true, 0],
+  ['/', 1, false, 1],
+  ['\\', 1, false, -1],
+  ['~', 0, false, 0],
+] as const) {
+  bondSymbols[symbol.charCodeAt(0)] = { order, aromatic, direction };
+}
 
 /** What papers and word processors print in place of the ASCII characters. */
 const lookalikes: Readonly<Record<string, string>> = {
@@ -83,14 +80,18 @@ const lookalikes: Readonly<Record<string, string>> = {
 };
 
 const isSpace = (character: string) => /^\s$/u.test(character);
+function isSpaceAt(text: string, at: number): boolean {
+  const code = text.charCodeAt(at);
+  return code <= 32 || (code >= 128 && isSpace(text[at]!));
+}
 const isDigit = (code: number) => code >= 48 && code <= 57;
 
 /** Any string is accepted; leading and trailing white space is passed over, and an empty text is a problem. */
 export function readSmiles(text: string): Read<Molecule> {
   let start = 0;
   let end = text.length;
-  while (start < end && isSpace(text[start]!)) start++;
-  while (end > start && isSpace(text[end - 1]!)) end--;
+  while (start < end && isSpaceAt(text, start)) start++;
+  while (end > start && isSpaceAt(text, end - 1)) end--;
   if (start === end) return problemAt(start, end, 'There is no SMILES here.');
   const draft: SmilesDraft = {
     builder: new MoleculeBuilder(),
@@ -132,19 +133,18 @@ function readGraph(text: string, start: number, end: number, draft: SmilesDraft)
   };
 
   while (at < end) {
-    const raw = text[at]!;
-    const character = lookalikes[raw] ?? raw;
-    const code = text.charCodeAt(at);
-    const organic = organicAtoms[character];
-    if (organic !== undefined || character === '[') {
+    const raw = text.charCodeAt(at);
+    const code = raw < 128 ? raw : (lookalikes[text[at]!]?.charCodeAt(0) ?? 0);
+    let atomicNumber = organicNumber[code]!;
+    if (atomicNumber !== 0 || code === openBracket || code === asterisk) {
       if (previous === -1 && symbol !== undefined) return danglingBond(symbol, 'before it');
       let length = 1;
-      if (organic !== undefined) {
+      if (code !== openBracket) {
         // Cl and Br are the two-letter members of the organic subset; B and C stand in the table by themselves.
-        let atomicNumber = organic.number;
-        if (character === 'C' && text[at + 1] === 'l') [atomicNumber, length] = [17, 2];
-        else if (character === 'B' && text[at + 1] === 'r') [atomicNumber, length] = [35, 2];
-        attach(builder.addAtom(atomicNumber, { aromatic: organic.aromatic, range: range(at, at + length) }));
+        const next = text.charCodeAt(at + 1);
+        if (code === 67 && next === 108) [atomicNumber, length] = [17, 2];
+        else if (code === 66 && next === 114) [atomicNumber, length] = [35, 2];
+        attach(builder.addPlainAtom(atomicNumber, lowerCase[code] === 1, at, at + length));
         implied.push(atomicNumber !== 0);
       } else {
         const atom = readBracketAtom(text.slice(0, end), at);
@@ -159,7 +159,7 @@ function readGraph(text: string, start: number, end: number, draft: SmilesDraft)
       at += length;
       continue;
     }
-    const bond = bondSymbols[character];
+    const bond = bondSymbols[code];
     if (bond !== undefined) {
       if (symbol !== undefined) {
         return problemAt(symbol.at, at + 1, 'Two bond symbols follow each other; one bond has one symbol.')
@@ -168,7 +168,7 @@ function readGraph(text: string, start: number, end: number, draft: SmilesDraft)
       if (previous === -1) return danglingBond({ ...bond, at }, 'before it');
       symbol = { ...bond, at };
       at++;
-    } else if (isDigit(code) || character === '%') {
+    } else if (isDigit(code) || code === 37) {
       const mark = readRingNumber(text, at, end);
       if ('problem' in mark) return mark.problem;
       if (previous === -1 || afterDot !== -1) {
@@ -184,7 +184,7 @@ function readGraph(text: string, start: number, end: number, draft: SmilesDraft)
       }
       symbol = undefined;
       at = mark.end;
-    } else if (character === '(') {
+    } else if (code === 40) {
       if (previous === -1 || afterDot !== -1) {
         return problemAt(at, at + 1, 'A branch needs an atom before it; move the parenthesis behind an atom.')
           .problem;
@@ -201,7 +201,7 @@ function readGraph(text: string, start: number, end: number, draft: SmilesDraft)
       }
       branches.push({ atom: previous, at, atomsBefore: builder.atoms.length });
       at++;
-    } else if (character === ')') {
+    } else if (code === 41) {
       const branch = branches.pop();
       if (branch === undefined) {
         return problemAt(at, at + 1, 'This parenthesis closes a branch that was never opened.').problem;
@@ -217,7 +217,7 @@ function readGraph(text: string, start: number, end: number, draft: SmilesDraft)
       previous = branch.atom;
       afterDot = -1;
       at++;
-    } else if (character === '.') {
+    } else if (code === 46) {
       if (symbol !== undefined) return danglingBond(symbol, 'after it');
       if (previous === -1)
         return problemAt(at, at + 1, 'A dot separates two parts; there is none before it.').problem;
