@@ -1,11 +1,16 @@
 /** What stands under the cursor: a key, a name, a structure, a formula, an identifier, or the block itself. */
 import { MarkupKind, type Hover } from 'vscode-languageserver';
+import { readSmiles } from '../chemistry/structure/read-smiles.ts';
 import type { TextRange } from '../chemistry/text.ts';
-import { explainCheck } from '../checks/explain.ts';
-import type { CompoundModel, EntryModel } from '../checks/model.ts';
+import { checkWithId, explainCheck } from '../checks/explain.ts';
+import type { Finding } from '../checks/finding.ts';
+import type { CompoundModel, EntryModel, ReactionModel } from '../checks/model.ts';
+import type { Settings } from '../checks/settings.ts';
 import type { CompoundKey, ReactionKey } from '../notebook/keys.ts';
 import type { Field, MappedText } from '../notebook/model.ts';
 import type { Toolkit } from '../toolkit/toolkit.ts';
+import { readName } from '../workspace/name-reader.ts';
+import type { Notebook } from '../workspace/notebook.ts';
 import { blockAt, toText } from '../workspace/page.ts';
 import { toProtocolRange } from './convert.ts';
 import type { OpenPage } from './documents.ts';
@@ -29,12 +34,21 @@ interface Found {
 /** Longest wait for a toolkit that is still loading, in ms; the next hover has the drawing. */
 const patienceMs = 1500;
 
-export async function hover(open: OpenPage, offset: number, traits: HoverTraits): Promise<Hover | null> {
+/** `findings` are those of the page; the checks behind the ones under the cursor are explained. */
+export async function hover(
+  open: OpenPage,
+  offset: number,
+  findings: readonly Finding[],
+  traits: HoverTraits,
+): Promise<Hover | null> {
   const place = blockAt(open.page, offset);
-  const found = place && underCursor(place.block.read.model, place.address);
+  const found = place && underCursor(open.notebook, place.block.read.model, place.address);
   const range = found && toText(open.page, found.range);
   if (found === undefined || range === undefined) return null;
-  const card = await withInchiKey(found.card, traits.toolkit);
+  const card = withReasons(
+    await withInchiKey(found.card, traits.toolkit),
+    findings.filter((finding) => holds(finding.range, offset)),
+  );
   return {
     contents: traits.markdown
       ? { kind: MarkupKind.Markdown, value: renderMarkdown(card, await drawings(card, traits)) }
@@ -43,7 +57,7 @@ export async function hover(open: OpenPage, offset: number, traits: HoverTraits)
   };
 }
 
-function underCursor(model: EntryModel, at: number): Found | undefined {
+function underCursor(notebook: Notebook, model: EntryModel, at: number): Found | undefined {
   const { entry } = model;
   if (holds(entry.block.kindRange, at)) {
     const card = model.kind === 'compound' ? compoundCard(model) : undefined;
@@ -57,7 +71,7 @@ function underCursor(model: EntryModel, at: number): Found | undefined {
     const words = explainCheck(accepted.checkId);
     return words === undefined ? undefined : { card: { words }, range: accepted.checkIdRange };
   }
-  return model.kind === 'compound' ? valueFound(model, at) : undefined;
+  return model.kind === 'compound' ? valueFound(model, at) : substanceFound(notebook, model, at);
 }
 
 function keyFound(field: Field, kind: EntryModel['kind']): Found | undefined {
@@ -69,12 +83,31 @@ function keyFound(field: Field, kind: EntryModel['kind']): Found | undefined {
   return { card: { title: field.key, words }, range: field.keyRange };
 }
 
+/** A substance of a reaction: a label of the notebook wins over a name. */
+function substanceFound(notebook: Notebook, { entry }: ReactionModel, at: number): Found | undefined {
+  const item = [...entry.charged, ...entry.obtained].find(({ what }) => holds(what.range, at));
+  if (item === undefined) return undefined;
+  const { text, range } = item.what;
+  const labelled = notebook.compoundLabelled(text);
+  const card = labelled === undefined ? wordCard(text, notebook.settings) : compoundCard(labelled);
+  return card && { card, range };
+}
+
+/** A name, or one of the laboratory's own words. */
+function wordCard(word: string, { vocabulary }: Settings): HoverCard {
+  const reading = readName(word);
+  const smiles = Object.hasOwn(vocabulary, word) ? vocabulary[word] : undefined;
+  const molecule = reading.kind === 'unknown' && smiles !== undefined ? readSmiles(smiles).value : undefined;
+  return molecule === undefined ? nameCard(word, reading) : structureCard(molecule, word);
+}
+
 function valueFound(model: CompoundModel, at: number): Found | undefined {
   const { entry } = model;
   for (const value of [entry.name, ...entry.synonyms]) {
-    if (value !== undefined && holds(value.text.range, at) && value.read.value !== undefined) {
-      return { card: nameCard(value.text.text, value.read.value), range: value.text.range };
-    }
+    if (value === undefined || !holds(value.text.range, at)) continue;
+    // The model knows the laboratory's own words besides.
+    const reading = value === entry.name ? model.nameReading : value.read.value;
+    if (reading !== undefined) return { card: nameCard(value.text.text, reading), range: value.text.range };
   }
   const { smiles, formula } = entry;
   if (smiles?.read.value !== undefined && holds(smiles.text.range, at)) {
@@ -117,6 +150,15 @@ function smilesFound(model: CompoundModel, text: MappedText, at: number): Found 
 
 function holds(range: TextRange, at: number): boolean {
   return range.start <= at && at <= range.end;
+}
+
+/** Why the checks that found something here exist; what they found, the editor shows by itself. */
+function withReasons(card: HoverCard, findings: readonly Finding[]): HoverCard {
+  const reasons = [...new Set(findings.map((finding) => finding.check))].flatMap((id) => {
+    const check = checkWithId(id);
+    return check === undefined ? [] : [`${id}: ${check.why}`];
+  });
+  return reasons.length === 0 ? card : { ...card, lines: [...(card.lines ?? []), ...reasons] };
 }
 
 async function withInchiKey(card: HoverCard, toolkit: Toolkit): Promise<HoverCard> {

@@ -80,7 +80,8 @@ export class Session {
     const page = this.pageOf(uri);
     if (page === undefined) return null;
     const traits = { ...this.traits, toolkit: this.toolkit };
-    const shown = await hover(page, page.document.offsetAt(position), traits);
+    const findings = this.documents.findings(page);
+    const shown = await hover(page, page.document.offsetAt(position), findings, traits);
     this.tellFailure();
     return shown;
   }

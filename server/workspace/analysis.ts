@@ -44,9 +44,23 @@ const longestRemembered = 2000;
 
 /** What was read depends on the text alone, so all notebooks share it. */
 const rememberingReaders: ValueReaders = {
-  readSmiles: remembering<Read<Molecule>>(readSmiles),
-  readName: remembering<NameReading>(readName),
+  readSmiles: remembering<Read<Molecule>>(readSmiles, (text, message) => ({
+    problem: { range: { start: 0, end: text.length }, message },
+  })),
+  readName: remembering<NameReading>(readName, (text, message) => ({
+    kind: 'unknown',
+    stoppedAt: 0,
+    range: { start: 0, end: text.length },
+    message,
+    suggestions: [],
+  })),
 };
+
+/** Readers do not throw; should one do so all the same, it must not take the other entries with it. */
+function breakdown(error: unknown): string {
+  const reason = error instanceof Error ? error.message : String(error);
+  return `The program broke down on this text (${reason}) and says nothing of it; please report it.`;
+}
 
 /** What follows from a structure alone, however many entries have it. Gone with the structure itself. */
 const ofStructure = new WeakMap<Molecule, Map<string, unknown>>();
@@ -76,13 +90,23 @@ function sharedByStructure(model: EntryModel): EntryModel {
   return model;
 }
 
-function remembering<T extends object>(read: (text: string) => T): (text: string) => T {
+function remembering<T extends object>(
+  read: (text: string) => T,
+  broken: (text: string, message: string) => T,
+): (text: string) => T {
   const known = new LRUCache<string, T>({ max: mostRemembered });
+  const safely = (text: string) => {
+    try {
+      return read(text);
+    } catch (error) {
+      return broken(text, breakdown(error));
+    }
+  };
   return (text) => {
-    if (text.length > longestRemembered) return read(text);
+    if (text.length > longestRemembered) return safely(text);
     let value = known.get(text);
     if (value === undefined) {
-      value = read(text);
+      value = safely(text);
       known.set(text, value);
     }
     return value;

@@ -3,7 +3,7 @@
  * facts, same findings in the same order.
  */
 import type { Finding } from '../checks/finding.ts';
-import type { EntryModel } from '../checks/model.ts';
+import type { CompoundModel, EntryModel } from '../checks/model.ts';
 import { byPlace } from '../checks/run.ts';
 import type { Settings } from '../checks/settings.ts';
 import type { Toolkit } from '../toolkit/toolkit.ts';
@@ -66,6 +66,17 @@ export class Notebook {
 
   models(file: string): readonly EntryModel[] {
     return this.pages.get(file)?.blocks.map((block) => block.read.model) ?? [];
+  }
+
+  /** The compound that a label stands for; the first where several claim it. */
+  compoundLabelled(label: string): CompoundModel | undefined {
+    for (const { blocks } of this.pages.values()) {
+      for (const { read } of blocks) {
+        const { model } = read;
+        if (model.kind === 'compound' && model.entry.label?.text.text === label) return model;
+      }
+    }
+    return undefined;
   }
 
   /** Whether a fact of the toolkit would change anything. */

@@ -29,7 +29,8 @@ async function hoverAt(marked: string, options: { markdown?: boolean; facts?: To
   const { text, offset } = atCaret(marked);
   const { toolkit, drawn } = drawingToolkit(options.facts);
   const traits = { markdown: options.markdown ?? true, foreground: '#000', toolkit };
-  const shown = await hover(openPage(text), offset, traits);
+  const page = openPage(text);
+  const shown = await hover(page, offset, page.notebook.findings(page.name), traits);
   return { value: (shown?.contents as MarkupContent | undefined)?.value, range: shown?.range, drawn };
 }
 
@@ -82,6 +83,20 @@ describe('a hover', () => {
     expect((await hoverAt(block.replace('C6H6', 'C6‸H6'))).value).toContain('| unsaturation | 4 |');
     expect((await hoverAt(block.replace('formula:', 'form‸ula:'))).value).toContain('Molecular formula');
     expect((await hoverAt(block.replace('-only', '-on‸ly'))).value).toContain('formula-only');
+  });
+
+  it('on a substance of a reaction shows the compound of that label, or what the name means', async () => {
+    const compound = '```compound\nlabel: LR-1\nname: ethanol\nSMILES: CCO\n```\n\n';
+    const reaction = '```reaction\ncharged:\n  - LR-1: 1.0 g\n  - methanol: 2 mL (solvent)\n```';
+    const labelled = await hoverAt(compound + reaction.replace('LR-1', 'LR‸-1'));
+    expect(labelled.value).toContain('**LR-1 · ethanol** · C₂H₆O');
+    const named = await hoverAt(compound + reaction.replace('methanol', 'meth‸anol'));
+    expect(named.value).toContain('**methanol** · CH₄O');
+  });
+
+  it('says why the check exists that found something under the cursor', async () => {
+    const { value } = await hoverAt('```compound\nname: chloro‸toluene\n```');
+    expect(value).toContain('name-ambiguous: ');
   });
 
   it('lets nothing of the notebook act', async () => {
