@@ -7,7 +7,7 @@ const patienceMs = 60_000;
 
 /** Opens one file of `folder` in a workbench and waits until its text is on the screen. */
 export async function openInWorkbench(browser, workbench, folder, file, payload = {}) {
-  const page = await browser.newPage({ viewport: { width: 1280, height: 900 } });
+  const page = await browser.newPage({ viewport: { width: 1280, height: 900 }, reducedMotion: 'reduce' });
   page.setDefaultTimeout(patienceMs);
   const url = workbench.urlOf(folder, { openFile: workbench.uriOf(join(folder, file)), ...payload });
   await page.goto(url);

@@ -36,4 +36,25 @@ suite('fixes', () => {
     await noFinding(document, 'formula-mismatch');
     assert.equal(document.getText(), page.replace('C5H10', 'C5H12'));
   });
+
+  test('a finding is accepted with a reason, and goes', async () => {
+    const page = [
+      '> ```compound',
+      '> label: X-2',
+      '> SMILES: CC(C)(C)C',
+      '> formula: C5H10',
+      '> ```',
+      '',
+    ].join('\n');
+    const { document } = await openPage('accept.md', page);
+    const found = await finding(document, 'formula-mismatch');
+    const acceptance = (await fixesFor(document, found)).find((action) =>
+      /formula-mismatch/.test(action.title),
+    );
+    assert.ok(acceptance, 'nothing accepts the finding');
+    await apply(acceptance);
+    await noFinding(document, 'formula-mismatch');
+    assert.match(document.lineAt(4).text, /^> allow: formula-mismatch \(\w+\)$/);
+    assert.equal(document.lineAt(5).text, '> ```');
+  });
 });
