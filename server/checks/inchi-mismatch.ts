@@ -43,8 +43,8 @@ export const check: Check = {
     if (model.kind !== 'compound') return;
     const value = model.entry.inchi;
     const recorded = value?.read.value === undefined ? undefined : readInchi(value.read.value);
-    const structure = definiteStructure(model);
     if (value === undefined || recorded === undefined) return;
+    const structure = definiteStructure(model);
     if (structure === undefined) {
       compareFormulas(model, value, recorded, report);
       return;

@@ -42,8 +42,9 @@ export const check: Check = {
     if (model.kind !== 'compound') return;
     const value = model.entry.inchiKey;
     const recorded = value?.read.value;
+    if (value === undefined || recorded === undefined) return;
     const structure = definiteStructure(model);
-    if (value === undefined || recorded === undefined || structure === undefined) return;
+    if (structure === undefined) return;
     const stated = partsOf(recorded);
     const facts = toolkit(structure.smiles);
     if (stated === undefined || typeof facts === 'string') return;

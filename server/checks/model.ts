@@ -17,7 +17,7 @@ export interface CompoundModel {
   readonly settings: Settings;
   /** From SMILES, when it could be read. */
   readonly structure: Molecule | undefined;
-  /** Canonical SMILES of `structure`. */
+  /** Canonical SMILES of `structure`; undefined also for structures too large to be compared. */
   readonly structureSmiles: string | undefined;
   readonly structureComposition: Composition | undefined;
   /** The stereoisomers that `structure` leaves possible; ranges and numbering are those of its normal spelling. */
@@ -49,6 +49,9 @@ export interface NotebookModel {
   readonly settings: Settings;
 }
 
+/** Larger structures are weighed and counted, but not compared: the time for that grows with the square. */
+const mostAtoms = 500;
+
 /** Stereoisomers listed for one structure; their number is known beyond that. */
 const mostStereoisomers = 32;
 
@@ -60,6 +63,7 @@ export function modelOf(entry: Entry, settings: Settings): EntryModel {
 function compoundModel(entry: CompoundEntry, settings: Settings): CompoundModel {
   const structure = entry.smiles?.read.value;
   const nameReading = entry.name && understoodWith(settings, entry.name);
+  const comparable = structure !== undefined && structure.atoms.length <= mostAtoms ? structure : undefined;
   let key: string | undefined;
   let stereo: StereoisomerList | undefined;
   return {
@@ -69,11 +73,11 @@ function compoundModel(entry: CompoundEntry, settings: Settings): CompoundModel 
     structure,
     // The canonical form and the stereoisomers are dear, and most entries never ask for them.
     get structureSmiles() {
-      return structure && (key ??= canonicalSmiles(structure));
+      return comparable && (key ??= canonicalSmiles(comparable));
     },
     structureComposition: structure && compositionOf(structure),
     get stereo() {
-      return structure && (stereo ??= enumerateStereoisomers(structure, mostStereoisomers));
+      return comparable && (stereo ??= enumerateStereoisomers(comparable, mostStereoisomers));
     },
     nameReading,
     name: nameReading?.kind === 'understood' ? nameReading : undefined,

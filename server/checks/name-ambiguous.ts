@@ -41,6 +41,8 @@ export const check: Check = {
     // The entry as a whole is definite when its structure picks a reading; yet the name is what goes on the flask
     // and into the paper, where nobody sees the structure. So it is told, but only as information.
     const picked = deciding.some((what) => what !== 'synonyms');
+    // Nothing could be written that is not there already.
+    if (picked && names[0] === value.text.text) return;
     report({
       range: value.text.range,
       ...(picked ? { severity: 'information' as const } : {}),

@@ -20,8 +20,8 @@ export function definiteStructure({
   name,
 }: CompoundModel): DefiniteStructure | undefined {
   if (structure !== undefined) {
-    return structure.atoms.every((atom) => atom.atomicNumber !== 0)
-      ? { molecule: structure, smiles: structureSmiles!, from: 'SMILES' }
+    return structureSmiles !== undefined && structure.atoms.every((atom) => atom.atomicNumber !== 0)
+      ? { molecule: structure, smiles: structureSmiles, from: 'SMILES' }
       : undefined;
   }
   const [reading, ...others] = name?.readings ?? [];

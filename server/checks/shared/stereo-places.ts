@@ -1,6 +1,5 @@
 /** Stereogenic places in words and in the text of the SMILES. */
-import { symbolOf } from '../../chemistry/composition/elements.ts';
-import { cipDescriptors } from '../../chemistry/structure/cip/descriptors.ts';
+import { letterOf } from '../../chemistry/structure/cip/descriptors.ts';
 import type { StereoCandidate } from '../../chemistry/structure/stereo-candidates.ts';
 import type { Molecule, StereoElement } from '../../chemistry/structure/molecule.ts';
 import type { TextRange } from '../../chemistry/text.ts';
@@ -40,18 +39,13 @@ export function placesInWords(places: readonly Place[]): string {
     .join(' and ');
 }
 
-/** `C`, `S`, `C=N`: what stands there, for telling places apart. */
-export function symbolsOf(molecule: Molecule, place: Place): string {
-  return atomsOf(place)
-    .map((atom) => symbolOf(molecule.atoms[atom]!.atomicNumber))
-    .join('=');
-}
-
 /** The descriptors of some places in the order of the text, `R,E`; `?` where the ranking gives none. */
 export function lettersAt(molecule: Molecule, places: readonly Place[]): string {
-  const descriptors = cipDescriptors(molecule);
   return [...places]
     .sort((first, second) => rangeOfPlace(molecule, first).start - rangeOfPlace(molecule, second).start)
-    .map((place) => descriptors.find(({ element }) => samePlace(element, place))?.letter ?? '?')
+    .map((place) => {
+      const element = molecule.stereo.find((each) => samePlace(each, place));
+      return (element && letterOf(molecule, element)) ?? '?';
+    })
     .join(',');
 }
