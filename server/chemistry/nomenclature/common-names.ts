@@ -1,6 +1,7 @@
 /** Names of the vocabulary that are known whole; each structure is read when first asked for. */
 import { readSmiles } from '../structure/read-smiles.ts';
 import type { Molecule } from '../structure/molecule.ts';
+import { aminoAcids } from './vocabulary/amino-acids.ts';
 import { mixtures, wholeNames } from './vocabulary/whole.ts';
 
 export type CommonName =
@@ -17,6 +18,16 @@ export function createCommonNames(): CommonNames {
   const smiles = new Map<string, string>();
   for (const [names, structure] of wholeNames)
     for (const name of names.split('|')) smiles.set(name, structure);
+  // `L-` and `D-` name one enantiomer; without them, and with `DL-`, the name leaves it open.
+  for (const [name, structure] of aminoAcids) {
+    smiles.set(`l-${name}`, structure);
+    smiles.set(
+      `d-${name}`,
+      structure.replace(/@+/g, (sign) => (sign === '@' ? '@@' : '@')),
+    );
+    for (const prefix of ['', 'dl-', '(±)-'])
+      smiles.set(prefix + name, structure.replace(/\[C@+H\](\d?)/g, 'C$1'));
+  }
   const mixed = new Map<string, string>();
   for (const [names, what] of mixtures) for (const name of names.split('|')) mixed.set(name, what);
   const read = new Map<string, CommonName>();

@@ -40,6 +40,9 @@ export function vocabularyWords(): readonly string[] {
   return (shared.reader ??= createNameReader()).vocabularyWords();
 }
 
+/** Structures built for one name at most. */
+const buildLimit = 1000;
+
 /** Names longer than this are not read. */
 const longestName = 1500;
 
@@ -72,7 +75,7 @@ function read(text: string, limits: NameLimits, lexicon: Lexicon, common: Common
   }
   const reader = new ItemReader(prepared, lexicon, limits.steps ?? 4000);
   const found = sentences(reader);
-  const { meanings, complete, failure } = meaningsOf(found, limits.steps ?? 4000);
+  const { meanings, complete, failure } = meaningsOf(found, Math.min(limits.steps ?? 4000, buildLimit));
   if (meanings.length === 0)
     return unknownName(text, prepared, reader, failure, [...lexicon.list, ...common.names]);
   const cap = limits.readings ?? 32;

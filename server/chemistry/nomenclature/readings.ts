@@ -1,6 +1,6 @@
 /** From trees to readings: every structure that the words can mean, each once, with the name completed. */
-import { canonicalSmiles } from '../structure/canonical-smiles.ts';
-import { type Molecule, withStereo } from '../structure/molecule.ts';
+import { canonicalForm } from '../structure/canonical-form.ts';
+import type { Molecule } from '../structure/molecule.ts';
 import type { TextRange } from '../text.ts';
 import { buildSentence } from './build/build-sentence.ts';
 import { Choices } from './build/choices.ts';
@@ -14,8 +14,6 @@ export interface Meaning {
   readonly molecule: Molecule;
   readonly draft: Draft;
   readonly insertions: readonly Insertion[];
-  /** Constitution as a string. */
-  readonly key: string;
 }
 
 export interface Meanings {
@@ -29,13 +27,14 @@ export interface Meanings {
 /** Builds every sentence in every way, up to `buildLimit` structures; the cheapest understandings are kept. */
 export function meaningsOf(sentences: readonly (readonly Part[])[], buildLimit: number): Meanings {
   let best = Number.POSITIVE_INFINITY;
-  let found = new Map<string, Meaning>();
+  let found: Meaning[] = [];
+  const keys = new Set<string>();
   let failure: Meanings['failure'];
   let built = 0;
   for (const sentence of sentences) {
     const choices = new Choices();
     do {
-      if (++built > buildLimit) return { meanings: [...found.values()], complete: false, failure };
+      if (++built > buildLimit) return { meanings: found, complete: false, failure };
       const draft = new Draft();
       const last = sentence[sentence.length - 1]!;
       const whole = { start: sentence[0]!.start, end: last.kind === 'stretch' ? last.stretch.end : last.end };
@@ -50,15 +49,27 @@ export function meaningsOf(sentences: readonly (readonly Part[])[], buildLimit: 
       }
       if (draft.cost > best || draft.chains.some((chain) => chain.open && !isLongestChain(chain, draft)))
         continue;
-      const key = canonicalSmiles(withStereo(molecule, []));
       if (draft.cost < best) {
         best = draft.cost;
-        found = new Map();
+        found = [];
       }
-      if (!found.has(key)) found.set(key, { molecule, draft, insertions: draft.insertions, key });
+      const meaning: Meaning = { molecule, draft, insertions: draft.insertions };
+      // Keys are worked out only when there are two to compare; most names have one meaning.
+      if (found.length === 1 && keys.size === 0) keys.add(constitution(found[0]!.molecule));
+      if (found.length > 0) {
+        const key = constitution(molecule);
+        if (keys.has(key)) continue;
+        keys.add(key);
+      } else keys.clear();
+      found.push(meaning);
     } while (choices.advance());
   }
-  return { meanings: [...found.values()], complete: true, failure };
+  return { meanings: found, complete: true, failure };
+}
+
+/** Equal for equal constitutions. */
+function constitution(molecule: Molecule): string {
+  return canonicalForm(molecule, { stereo: false }).key;
 }
 
 /** The name with the missing locants and brackets written in. */

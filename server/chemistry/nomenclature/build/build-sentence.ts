@@ -1,7 +1,7 @@
 /** Builds the structure of a whole name from its words. */
 import { adducts, cations, functionWords } from '../vocabulary/functions.ts';
 import type { Unit } from '../tree.ts';
-import type { Part } from '../words/sentence.ts';
+import type { Part, Site } from '../words/sentence.ts';
 import { buildUnit } from './build-unit.ts';
 import type { BuiltUnit } from './built-unit.ts';
 import type { Choices } from './choices.ts';
@@ -11,6 +11,7 @@ import { skeletonFromSmiles } from './skeleton.ts';
 interface Word {
   readonly unit: Unit;
   readonly count: number;
+  readonly site?: Site | undefined;
 }
 const oops = 'These words do not make one compound together. Check the number of groups named.';
 
@@ -36,6 +37,7 @@ export function buildSentence(parts: readonly Part[], draft: Draft, choices: Cho
         (part.stretch.role === 'radical' ? radicals : parents).push({
           unit: part.stretch.unit,
           count: part.stretch.count,
+          site: part.site,
         });
         // Groups of an ester come before the acid, nothing but adducts after it.
         if (part.stretch.role === 'radical' && parents.length > 0) return reject();
@@ -254,11 +256,13 @@ function acidsAndBases(
 ): boolean {
   const acid = parents[parents.length - 1]!;
   const groups: BuiltUnit['free'][] = [];
+  const said: (Site | undefined)[] = [];
   for (const radical of radicals) {
     for (let copy = 0; copy < radical.count; copy++) {
       const built = buildUnit(radical.unit, draft, choices);
       if (!built || built.free.length === 0) return false;
       groups.push(built.free);
+      said.push(...built.free.map(() => radical.site));
     }
   }
   if (parents.length > 2) return false;
@@ -283,8 +287,9 @@ function acidsAndBases(
     (groups.length !== 1 || valences.length !== copies)
   )
     return false;
-  for (const valence of valences) {
-    const options = valences.every((one) => one === valences[0]) || valences.length === 1 ? left : left;
+  for (const [index, valence] of valences.entries()) {
+    const options = left.filter((site) => fits(site, said[index], sites, draft));
+    if (options.length === 0) return false;
     const same = radicals.length === 1 && hydrogens + metals.length === 0;
     const site = same ? options[0]! : options[choices.pick(options.length)]!;
     if (!join(draft, site, valence)) return false;
@@ -298,7 +303,7 @@ function acidsAndBases(
   }
   // An acid's anion by itself is an ion; half an ester is nothing definite.
   if (metals.length === 0 && parents.length === 1)
-    return left.length === 0 || (valences.length === 0 && hydrogens === 0);
+    return left.length === 0 || (valences.length === 0 && hydrogens === 0 && namesAnion(acid.unit));
   const bases = parents.length === 2 ? parents.slice(0, 1) : [];
   const positives = [
     ...metals.map((metal) => ({ metal, base: undefined })),
@@ -326,6 +331,15 @@ function acidsAndBases(
     if (valences.length + hydrogens > 0 || !buildUnit(acid.unit, draft, choices)) return false;
   }
   return true;
+}
+
+/** Whether a group said to be on O or S, and at a position, can be on this place; places stand in their order. */
+function fits(place: number, site: Site | undefined, all: readonly number[], draft: Draft): boolean {
+  if (site === undefined) return true;
+  if (draft.atoms[place]!.atomicNumber !== (site.element === 'O' ? 8 : 16)) return false;
+  return (
+    site.position === undefined || all.length < 2 || all.indexOf(place) === (site.position === 1 ? 0 : 1)
+  );
 }
 
 /** P-62.5: the oxide of a tertiary amine or pyridine; the nitrogen must be the only one that can bear it. */
@@ -368,4 +382,13 @@ function oximeOf(unit: Unit): Unit | undefined {
     };
   });
   return changed ? { ...unit, endings } : undefined;
+}
+
+/** `2-phenylacetate` is the ion; `citrate` or `ethylhexanoate` alone may be an ester or the acid written badly. */
+function namesAnion(unit: Unit): boolean {
+  const chain = unit.skeletons.every((one) => one.kind === 'chain');
+  const located = unit.groupings.every((ways) =>
+    ways.every((way) => way.substitutions.every((one) => one.locants !== undefined)),
+  );
+  return located && (chain || unit.groupings.length > 0);
 }

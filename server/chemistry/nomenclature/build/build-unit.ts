@@ -60,7 +60,12 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
     }
   }
   // A single group on a ring whose places are all alike needs no locant, and one other than 1 is not about the ring.
-  if (substitutions === 1 && places.alike && unit.endings.length + unit.unsaturations.length === 0) {
+  if (
+    substitutions === 1 &&
+    places.alike &&
+    unit.attach === undefined &&
+    unit.endings.length + unit.unsaturations.length === 0
+  ) {
     for (const inserted of places.inserted) draft.insertions.splice(draft.insertions.indexOf(inserted), 1);
     if (used?.locants !== undefined && used.locants[0] !== '1') draft.cost += 3;
   }

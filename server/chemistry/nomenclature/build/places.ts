@@ -30,7 +30,7 @@ export class Places {
       const first = atom.locants[0];
       if (first !== undefined) draft.named.set(atoms[index]!, { locant: first, parentAt: unit.parentAt });
     });
-    this.fresh = this.alike;
+    this.fresh = this.alike && unit.attach === undefined;
   }
 
   /** A ring in which every atom is the same as any other: benzene, cyclohexane. */

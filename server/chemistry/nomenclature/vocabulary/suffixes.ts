@@ -27,6 +27,7 @@ export const suffixes: readonly SuffixEntry[] = [
   { name: 'thioic s-acid', kind: 'at', group: '=O S', locants: '- S' },
   { name: 'thioic o-acid', kind: 'at', group: '=S O', locants: '- O' },
   { name: 'thioate', kind: 'at', group: '=O [S-]', anion: true },
+  { name: 'thioate', kind: 'at', group: '=S [O-]', anion: true },
   { name: 'dithioic acid', kind: 'at', group: '=S S' },
   { name: 'peroxoic acid', kind: 'at', group: '=O OO' },
   { name: 'eperoxoic acid', kind: 'at', group: '=O OO' },

@@ -16,7 +16,7 @@ export function runsOf(groups: readonly GroupItem[]): GroupItem[][] {
   const runs: GroupItem[][] = [];
   for (const group of groups) {
     const run = runs[runs.length - 1];
-    if (run && group.joins) run.push(group);
+    if (run && group.joins && !group.bracketed) run.push(group);
     else runs.push([group]);
   }
   return runs;
@@ -120,12 +120,13 @@ export function linkedGroupings(
 ): Grouping[] | undefined {
   if (groups.length === 0) return base.needsLink === true ? undefined : [];
   if (!last.joins && base.needsLink !== true) return [];
-  const apart = groups.slice(1).some((group) => !group.joins && !group.locants);
+  const apart = groups
+    .slice(1)
+    .some((group) => (!group.joins && !group.locants) || (group.bracketed && group.joins));
   if (apart && base.needsLink !== true) return eachRun(groups, nest);
   const found: Grouping[] = [];
   const range = { start: groups[0]!.start, end: groups[groups.length - 1]!.end };
-  const mixed = groups.slice(1).some((group) => group.bracketed && group.joins);
-  const whole = mixed && base.needsLink !== true ? undefined : nest(before);
+  const whole = nest(before);
   if (whole) {
     found.push({
       substitutions: [{ count: 1, unit: whole, locants: ['→'], at: range.start, range }],

@@ -13,6 +13,8 @@ export interface Group {
   readonly end: number;
   /** A stem with which an unbranched alkyl group begins, so that `n-` before it means `normal`. */
   readonly normal?: boolean;
+  /** A locant before it can be that of its free valence. */
+  readonly locantBefore?: boolean;
 }
 
 const bare = (skeletons: readonly SkeletonGraph[], start: number, end: number): Unit => ({
@@ -54,8 +56,13 @@ export function groupsAt(text: string, lower: string, offset: number, lexicon: L
   if (descriptor) {
     for (const word of wordsAt(lexicon.words, lower, descriptor.end)) {
       const skeleton = word.value.kind === 'alkane' ? descriptor.skeleton(word.value.size) : undefined;
-      if (skeleton)
-        found.push(...withTails([skeleton], offset, chainTailsAt(text, lower, word.end, lexicon)));
+      if (skeleton) {
+        for (const group of withTails([skeleton], offset, chainTailsAt(text, lower, word.end, lexicon))) {
+          const open =
+            group.role === 'radical' && group.unit.endings.every((ending) => ending.locants === undefined);
+          found.push(open ? { ...group, locantBefore: true } : group);
+        }
+      }
     }
   }
   for (const name of ringNameAt(text, lower, offset)) {
@@ -100,7 +107,14 @@ function groupsOf(
     }
     case 'contracted': {
       const yl: Ending = { suffix: freeValence, count: 1, at: start, range: { start, end } };
-      return [{ unit: { ...bare(word.skeletons(), start, end), endings: [yl] }, role: 'radical', end }];
+      return [
+        {
+          unit: { ...bare(word.skeletons(), start, end), endings: [yl] },
+          role: 'radical',
+          end,
+          locantBefore: true,
+        },
+      ];
     }
     case 'branched':
       return branchedForms(word.skeletons, word.oxy, text, lower, start, end, lexicon);

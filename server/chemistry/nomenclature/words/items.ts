@@ -109,7 +109,7 @@ export class ItemReader {
     locants: readonly Locant[] | undefined,
   ): Generator<{ item: Item; end: number }> {
     const { lower } = this.name;
-    if (locants === undefined || locants.length === 1) yield* this.#groupsAt(start, from, locants, 1);
+    yield* this.#groupsAt(start, from, locants, 1);
     for (const word of wordsAt(this.lexicon.words, lower, from)) {
       if (word.value.kind === 'multiplier') {
         const count = word.value.count;
@@ -120,6 +120,8 @@ export class ItemReader {
         )
           continue;
         yield* this.#groupsAt(start, word.end, locants, count);
+        // `di-tert-butyl`, `di-n-propyl`
+        if (lower[word.end] === '-') yield* this.#groupsAt(start, word.end + 1, locants, count);
       }
     }
   }
@@ -177,8 +179,9 @@ export class ItemReader {
       }
     }
     const direct = count > 1 ? this.#radicalEnds(start, locants) : undefined;
-    const groups = groupsAt(text, lower, from, this.lexicon).filter(
-      (group) => direct?.has(group.end) !== true,
+    const plain = count > 1 && lower.startsWith('n-', from) ? from + 2 : from;
+    const groups = groupsAt(text, lower, plain, this.lexicon).filter(
+      (group) => direct?.has(group.end) !== true && (plain === from || group.normal === true),
     );
     groups.sort((first, second) => second.end - first.end);
     const normal = locants?.length === 1 && count === 1 && locants[0] === 'N' && text[start] === 'n';
@@ -193,8 +196,16 @@ export class ItemReader {
         bodyAt,
         end: group.end,
       };
+      if (locants?.length === 1 && count === 1 && group.locantBefore === true) {
+        yield { item: { ...base, unit: attachedAt(group.unit, locants), joins: false }, end: group.end };
+      }
       if (normal && group.normal === true) yield { item: { ...base, joins: true }, end: group.end };
       else yield { item: { ...base, joins: !locants, ...(locants ? { locants } : {}) }, end: group.end };
     }
   }
+}
+
+/** `1-naphthyl`, `8-tricyclo[…]undecanyl`: the locant in front is that of the free valence. */
+function attachedAt(unit: Unit, locants: readonly Locant[]): Unit {
+  return { ...unit, endings: unit.endings.map((ending) => ({ ...ending, locants })) };
 }

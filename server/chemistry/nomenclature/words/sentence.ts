@@ -4,8 +4,14 @@ import type { Unit } from '../tree.ts';
 import type { ItemReader, Stretch } from './items.ts';
 import { numericalTerm } from '../vocabulary/numbers.ts';
 
+/** Which place of an acid a group is said to be on: `S-ethyl`, `1-O-butyl` (P-65.6.3.2.2). */
+export interface Site {
+  readonly element: 'O' | 'S';
+  readonly position?: number;
+}
+
 export type Part =
-  | { readonly kind: 'stretch'; readonly stretch: Stretch; readonly start: number }
+  | { readonly kind: 'stretch'; readonly stretch: Stretch; readonly start: number; readonly site?: Site }
   | {
       readonly kind: 'function';
       readonly index: number;
@@ -32,6 +38,7 @@ export type Part =
   | { readonly kind: 'oxime'; readonly start: number; readonly end: number };
 
 const sentenceCap = 16;
+const siteWord = /(?:(\d+)-)?([OS])(\d*)-/y;
 const multiples: readonly (readonly [string, number])[] = [
   ...[2, 3, 4, 5, 6].map((count) => [numericalTerm(count), count] as const),
   ['mono', 1],
@@ -72,15 +79,36 @@ function* partsAt(reader: ItemReader, offset: number): Generator<Part & { end: n
     reader.furthest = Math.max(reader.furthest, part.end);
     yield part;
   }
+  siteWord.lastIndex = offset;
+  const word = siteWord.exec(reader.name.text);
+  if (word) {
+    const position = word[1] ?? (word[3] === '' ? undefined : word[3]);
+    const site: Site = {
+      element: word[2] as 'O' | 'S',
+      ...(position === undefined ? {} : { position: Number(position) }),
+    };
+    for (const stretch of reader.stretchesAt(siteWord.lastIndex)) {
+      if (stretch.role === 'radical')
+        yield { kind: 'stretch', stretch, start: offset, site, end: stretch.end };
+    }
+  }
   for (const stretch of reader.stretchesAt(offset)) {
     yield { kind: 'stretch', stretch, start: offset, end: stretch.end };
   }
 }
 
+/** Words that stand by themselves begin so; most words of names do not. */
+const plainStart = new RegExp(
+  `(?:${[...functionWords, ...cations, ...adducts].map(([word]) => word.replace(/[()]/g, '\\$&')).join('|')}|hydrogen|n-oxide|1-oxide|oxime)`,
+  'y',
+);
+
 function* plainWords(lower: string, offset: number): Generator<Part & { end: number }> {
   for (const [multiple, count] of [['', undefined] as const, ...multiples]) {
     if (!lower.startsWith(multiple, offset)) continue;
     const start = offset + multiple.length;
+    plainStart.lastIndex = start;
+    if (!plainStart.test(lower)) continue;
     const ends = (word: string): number | undefined => {
       if (!lower.startsWith(word, start)) return undefined;
       wordEnd.lastIndex = start + word.length;

@@ -57,6 +57,8 @@ export function structured(items: readonly Item[], name: PreparedName, depth = 0
       });
     } else {
       if (item.role !== 'radical') return undefined;
+      const single = item.locants?.length === 1 && /^[omp]$/.test(item.locants[0]!);
+      if (item.locants && item.locants.length !== item.count && !single) return undefined;
       groups.push(item);
     }
   }
