@@ -2,16 +2,16 @@
 import { equalCompositions } from '../../chemistry/composition/compare.ts';
 import { isMetal } from '../../chemistry/composition/elements.ts';
 import { compositionOf } from '../../chemistry/structure/composition-of.ts';
-import { withStereo, type Molecule } from '../../chemistry/structure/molecule.ts';
+import type { Molecule } from '../../chemistry/structure/molecule.ts';
 import type { ToolkitFactsOf } from '../facts.ts';
 import { protonFree } from './proton-free.ts';
-import { canonicalSmiles } from '../../chemistry/structure/canonical-smiles.ts';
+import { canonicalSmiles, constitutionalSmiles } from '../../chemistry/structure/canonical-smiles.ts';
 
 /** The same atoms connected alike; salts written as ions or as acid and base are the same. */
 export function sameConstitution(first: Molecule, second: Molecule): boolean {
   if (!equalCompositions(compositionOf(first), compositionOf(second))) return false;
   return (
-    flatKey(first) === flatKey(second) ||
+    constitutionalSmiles(first) === constitutionalSmiles(second) ||
     canonicalSmiles(protonFree(first)) === canonicalSmiles(protonFree(second))
   );
 }
@@ -31,12 +31,8 @@ export function compareConstitutions(
   if (!equalCompositions(compositionOf(first), compositionOf(second))) return 'different';
   if (sameConstitution(first, second)) return 'same';
   if ([...first.atoms, ...second.atoms].some((atom) => isMetal(atom.atomicNumber))) return 'undecided';
-  const [one, other] = [toolkit(flatKey(first)), toolkit(flatKey(second))];
+  const [one, other] = [toolkit(constitutionalSmiles(first)), toolkit(constitutionalSmiles(second))];
   if (one === 'pending' || other === 'pending') return 'undecided';
   if (one === 'unavailable' || other === 'unavailable') return 'different';
   return one.inchi === other.inchi ? 'same' : 'different';
-}
-
-function flatKey(molecule: Molecule): string {
-  return canonicalSmiles(withStereo(molecule, []));
 }

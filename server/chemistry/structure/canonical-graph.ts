@@ -3,7 +3,7 @@
  * arrangements. The canonical labelling works on this.
  */
 import { resonantBonds } from './resonance.ts';
-import type { Molecule, StereoElement } from './molecule.ts';
+import type { Bond, Molecule, StereoElement } from './molecule.ts';
 
 export interface CanonicalGraph {
   /** Atoms of the molecule, by vertex. */
@@ -25,10 +25,17 @@ export interface SamenessOptions {
   readonly isotopes?: boolean;
 }
 
+// A pure function's results, kept as long as the bonds they are about; nobody can see this memory.
+const knownKinds = new WeakMap<readonly Bond[], readonly number[]>();
+
 /** The kind of every bond: its order, or RESONANT. */
-export function bondKinds(molecule: Molecule): number[] {
+export function bondKinds(molecule: Molecule): readonly number[] {
+  const known = knownKinds.get(molecule.bonds);
+  if (known !== undefined) return known;
   const resonant = resonantBonds(molecule);
-  return molecule.bonds.map((bond, index) => (resonant[index] ? RESONANT : bond.order));
+  const kinds = molecule.bonds.map((bond, index) => (resonant[index] ? RESONANT : bond.order));
+  knownKinds.set(molecule.bonds, kinds);
+  return kinds;
 }
 
 /** `members` are the atoms of one connected part; `kinds` as bondKinds gives them. */
