@@ -5,6 +5,7 @@ import { compositionOf } from '../chemistry/structure/composition-of.ts';
 import type { Molecule } from '../chemistry/structure/molecule.ts';
 import { readSmiles } from '../chemistry/structure/read-smiles.ts';
 import { enumerateStereoisomers, type StereoisomerList } from '../chemistry/structure/stereoisomers.ts';
+import { valenceProblems, type ValenceProblem } from '../chemistry/structure/valence.ts';
 import type { CompoundEntry, Entry, EntryValue, IsomerStatement, ReactionEntry } from '../notebook/model.ts';
 import type { Settings } from './settings.ts';
 import { isomersOfName } from './shared/isomers-of-name.ts';
@@ -17,7 +18,9 @@ export interface CompoundModel {
   readonly settings: Settings;
   /** From SMILES, when it could be read. */
   readonly structure: Molecule | undefined;
-  /** Canonical SMILES of `structure`; undefined also for structures too large to be compared. */
+  /** Atoms of `structure` with impossible valences. Such a structure is a slip, and nothing is held against it. */
+  readonly valenceProblems: readonly ValenceProblem[];
+  /** Canonical SMILES of `structure`; undefined also where it is impossible or too large to be compared. */
   readonly structureSmiles: string | undefined;
   readonly structureComposition: Composition | undefined;
   /** The stereoisomers that `structure` leaves possible; ranges and numbering are those of its normal spelling. */
@@ -63,7 +66,9 @@ export function modelOf(entry: Entry, settings: Settings): EntryModel {
 function compoundModel(entry: CompoundEntry, settings: Settings): CompoundModel {
   const structure = entry.smiles?.read.value;
   const nameReading = entry.name && understoodWith(settings, entry.name);
-  const comparable = structure !== undefined && structure.atoms.length <= mostAtoms ? structure : undefined;
+  const problems = structure === undefined ? [] : valenceProblems(structure);
+  const isComparable = problems.length === 0 && (structure?.atoms.length ?? 0) <= mostAtoms;
+  const comparable = isComparable ? structure : undefined;
   let key: string | undefined;
   let stereo: StereoisomerList | undefined;
   return {
@@ -71,6 +76,7 @@ function compoundModel(entry: CompoundEntry, settings: Settings): CompoundModel 
     entry,
     settings,
     structure,
+    valenceProblems: problems,
     // The canonical form and the stereoisomers are dear, and most entries never ask for them.
     get structureSmiles() {
       return comparable && (key ??= canonicalSmiles(comparable));

@@ -31,7 +31,8 @@ export const check: Check = {
   run(model, report, toolkit) {
     if (model.kind !== 'compound' || model.structure === undefined || model.name === undefined) return;
     const { structure } = model;
-    if (structure.atoms.some((atom) => atom.atomicNumber === 0)) return;
+    if (model.structureSmiles === undefined || structure.atoms.some((atom) => atom.atomicNumber === 0))
+      return;
     const verdicts = model.name.readings.map((reading) =>
       compareConstitutions(structure, reading.molecule, toolkit),
     );

@@ -29,7 +29,7 @@ export const check: Check = {
     const { structure } = model;
     const readings = model.name.readings.filter((reading) => sameConstitution(structure, reading.molecule));
     const [reading] = readings;
-    if (reading === undefined || structure.stereo.length === 0) return;
+    if (reading === undefined || structure.stereo.length === 0 || model.structureSmiles === undefined) return;
     const drawn = possibleKeys(structure);
     for (const each of readings) {
       const named = readingKeys(each);

@@ -1,5 +1,4 @@
 /** An atom with more bonds than its element can form, in the SMILES or in what the name would mean. */
-import { valenceProblems } from '../chemistry/structure/valence.ts';
 import type { Check } from './finding.ts';
 import { reportRemarks } from './shared/name-remarks.ts';
 import { inDocument } from './shared/values.ts';
@@ -27,8 +26,8 @@ export const check: Check = {
   run(model, report, toolkit) {
     if (model.kind !== 'compound') return;
     const { smiles } = model.entry;
-    if (smiles !== undefined && model.structure !== undefined) {
-      for (const problem of valenceProblems(model.structure)) {
+    if (smiles !== undefined) {
+      for (const problem of model.valenceProblems) {
         report({ range: inDocument(smiles, problem.range), message: problem.message });
       }
     }

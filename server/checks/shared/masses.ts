@@ -105,6 +105,8 @@ export function usualMassDifference(
   if (recorded === undefined || mass === undefined || recorded.high - recorded.low > 0.6) return undefined;
   const slack = Math.max(tolerance, 0.02);
   for (const counterpart of counterparts) {
+    // Labels weigh so little that any slip of a digit would look like one.
+    if (Object.keys(counterpart.gain).some((kind) => /^\d/.test(kind))) continue;
     const unit = massOf({ counts: new Map(Object.entries(counterpart.gain)), charge: 0 });
     if (unit === undefined) continue;
     for (const times of [1, -1, 2, -2, 3, -3, 0.5, -0.5]) {

@@ -14,9 +14,13 @@ export interface Witness {
 /** From the most telling to the least. A name whose readings differ in composition says nothing here. */
 export function witnesses(model: CompoundModel): Witness[] {
   const found: Witness[] = [];
-  const { structure, structureComposition, formula } = model;
-  // An atom `*` stands for anything.
-  if (structure !== undefined && structure.atoms.every((atom) => atom.atomicNumber !== 0)) {
+  const { structure, structureComposition, formula, valenceProblems } = model;
+  // An atom `*` stands for anything, and an impossible structure for nothing.
+  if (
+    structure !== undefined &&
+    valenceProblems.length === 0 &&
+    structure.atoms.every((atom) => atom.atomicNumber !== 0)
+  ) {
     found.push({ what: 'SMILES', composition: structureComposition! });
   }
   const named = nameComposition(model);
