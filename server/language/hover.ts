@@ -45,13 +45,19 @@ export async function hover(
   const found = place && underCursor(open.notebook, place.block.read.model, place.address);
   const range = found && toText(open.page, found.range);
   if (found === undefined || range === undefined) return null;
-  const card = withReasons(
-    await withInchiKey(found.card, traits.toolkit),
-    findings.filter((finding) => holds(finding.range, offset)),
-  );
+  const [inchiKey, svgs] = await Promise.all([
+    inchiKeyOf(found.card, traits.toolkit),
+    traits.markdown ? drawings(found.card, traits) : [],
+  ]);
+  const reasons = reasonsOf(findings.filter((finding) => holds(finding.range, offset)));
+  const card: HoverCard = {
+    ...found.card,
+    rows: [...(found.card.rows ?? []), ...inchiKey],
+    lines: [...(found.card.lines ?? []), ...reasons],
+  };
   return {
     contents: traits.markdown
-      ? { kind: MarkupKind.Markdown, value: renderMarkdown(card, await drawings(card, traits)) }
+      ? { kind: MarkupKind.Markdown, value: renderMarkdown(card, svgs) }
       : { kind: MarkupKind.PlainText, value: renderPlain(card) },
     range: toProtocolRange(open.document, range),
   };
@@ -153,25 +159,23 @@ function holds(range: TextRange, at: number): boolean {
 }
 
 /** Why the checks that found something here exist; what they found, the editor shows by itself. */
-function withReasons(card: HoverCard, findings: readonly Finding[]): HoverCard {
-  const reasons = [...new Set(findings.map((finding) => finding.check))].flatMap((id) => {
+function reasonsOf(findings: readonly Finding[]): string[] {
+  return [...new Set(findings.map((finding) => finding.check))].flatMap((id) => {
     const check = checkWithId(id);
     return check === undefined ? [] : [`${id}: ${check.why}`];
   });
-  return reasons.length === 0 ? card : { ...card, lines: [...(card.lines ?? []), ...reasons] };
 }
 
-async function withInchiKey(card: HoverCard, toolkit: Toolkit): Promise<HoverCard> {
-  const { identity } = card;
-  if (identity === undefined) return card;
+/** A row for the card, or none. */
+async function inchiKeyOf({ identity }: HoverCard, toolkit: Toolkit): Promise<[string, string][]> {
+  if (identity === undefined) return [];
   const facts =
     toolkit.knownFacts(identity) ??
     (await atMost(
       patienceMs,
       toolkit.facts([identity]).then((table) => table.get(identity)),
     ));
-  if (facts === null || facts === undefined || facts.inchiKey === '') return card;
-  return { ...card, rows: [...(card.rows ?? []), ['InChIKey', facts.inchiKey]] };
+  return facts === null || facts === undefined || facts.inchiKey === '' ? [] : [['InChIKey', facts.inchiKey]];
 }
 
 async function drawings(card: HoverCard, { toolkit, foreground }: HoverTraits): Promise<(string | null)[]> {

@@ -54,6 +54,9 @@ export class RawClient {
     this.child.stderr.on('data', (chunk: Buffer) => (this.stderr += chunk.toString()));
     this.child.on('exit', (code) => {
       this.exitCode = code;
+      const error = { code: 0, message: `the server ended with code ${code}; stderr: ${this.stderr}` };
+      for (const answer of this.open.values()) answer({ error });
+      this.open.clear();
       this.wake();
     });
     this.child.stdin.on('error', () => undefined);

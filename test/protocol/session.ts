@@ -39,6 +39,7 @@ export class Session {
         workspace: { workspaceEdit: { snippetEditSupport: this.options.snippets ?? false } },
       },
     });
+    if (answer.error !== undefined) throw new Error(answer.error.message);
     this.initialized = answer.result as InitializeResult;
     this.client.notify('initialized', {});
     return this;
@@ -84,6 +85,15 @@ export class Session {
       position: { line, character },
     });
     return (answer.result as Hover | null)?.contents as MarkupContent | undefined;
+  }
+
+  /** Hovers until the toolkit has loaded, for which a single hover does not wait for ever. */
+  async hoverWith(parts: readonly string[], uri: string, line: number, character: number): Promise<string> {
+    for (let attempt = 0; attempt < 20; attempt++) {
+      const value = (await this.hover(uri, line, character))?.value ?? '';
+      if (parts.every((part) => value.includes(part))) return value;
+    }
+    throw new Error(`no hover had ${parts.join(' and ')}`);
   }
 
   async actions(uri: string, at: Diagnostic['range'], only?: readonly string[]): Promise<CodeAction[]> {
