@@ -9,6 +9,7 @@ import { compositionOf } from '../chemistry/structure/composition-of.ts';
 import type { Molecule } from '../chemistry/structure/molecule.ts';
 import type { CompoundModel, EntryModel } from '../checks/model.ts';
 import type { Field } from '../notebook/model.ts';
+import { mostAtoms } from '../toolkit/toolkit.ts';
 
 export interface EntryDescription {
   readonly label: string | undefined;
@@ -56,7 +57,8 @@ type CompoundPart = Omit<EntryDescription, 'label' | 'fields' | 'accepted'>;
 
 function describeCompound(model: CompoundModel): CompoundPart {
   const name = textOrNone(model.entry.name?.text.text);
-  const structures = structuresOf(model);
+  // Nobody draws a structure beyond that, and its canonical form would take minutes.
+  const structures = structuresOf(model).filter(({ molecule }) => molecule.atoms.length <= mostAtoms);
   const [only] = structures;
   const composition =
     only !== undefined && structures.every((each) => sameFormula(each.molecule, only.molecule))

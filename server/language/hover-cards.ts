@@ -8,6 +8,7 @@ import { canonicalSmiles } from '../chemistry/structure/canonical-smiles.ts';
 import { compositionOf } from '../chemistry/structure/composition-of.ts';
 import type { Molecule } from '../chemistry/structure/molecule.ts';
 import type { CompoundModel } from '../checks/model.ts';
+import { mostAtoms } from '../toolkit/toolkit.ts';
 import { mostDrawings, type Drawing, type HoverCard } from './hover-card.ts';
 
 type Row = readonly [string, string];
@@ -43,18 +44,20 @@ export function structureCard(
 ): HoverCard {
   const composition = compositionOf(molecule);
   const formula = prettyFormula(composition);
+  const card: HoverCard = {
+    title: title ?? formula,
+    ...(title === undefined ? {} : { subtitle: formula }),
+    rows: massRows(composition),
+  };
+  // Nobody draws such a structure, and its canonical form would hold up the editor.
+  if (molecule.atoms.length > mostAtoms) return card;
+  const identity = canonicalSmiles(molecule);
   const drawing: Drawing = {
-    smiles: smiles ?? canonicalSmiles(molecule),
+    smiles: smiles ?? identity,
     caption: title ?? formula,
     ...(highlight === undefined ? {} : { highlight }),
   };
-  return {
-    title: title ?? formula,
-    ...(title === undefined ? {} : { subtitle: formula }),
-    drawings: [drawing],
-    rows: massRows(composition),
-    identity: canonicalSmiles(molecule),
-  };
+  return { ...card, drawings: [drawing], identity };
 }
 
 /** Everything that a name can mean. */

@@ -5,10 +5,8 @@
  */
 import { compactDrawing } from './drawing.ts';
 import type { LoadRdkit, RdkitModule, RdkitMolecule } from './rdkit-module.ts';
-import type { CrippenValues, ToolkitFacts } from './toolkit.ts';
+import { mostAtoms, type CrippenValues, type ToolkitFacts } from './toolkit.ts';
 
-/** Found by trial: chains, ladders and dendrimers of 350 atoms still pass, some of 400 do not. */
-export const mostAtoms = 300;
 const longestSmiles = 3000;
 
 /** Drawings of more atoms than this are unreadable at the size of a hover. */

@@ -3,6 +3,12 @@
  * be answered is a value, never an exception, so that the server survives a toolkit that is missing or broken.
  */
 
+/**
+ * Heavy atoms beyond which the toolkit is not asked and the answer is `null`: its WebAssembly stack is small. Found
+ * by trial: chains, ladders and dendrimers of 350 atoms still pass, some of 400 do not.
+ */
+export const mostAtoms = 300;
+
 /** What the toolkit says of one structure. */
 export interface ToolkitFacts {
   /** RDKit's own canonical SMILES, for the outside world. */

@@ -99,6 +99,12 @@ describe('a hover', () => {
     expect(value).toContain('name-ambiguous: ');
   });
 
+  it('on a structure too large to be drawn still gives formula and masses', async () => {
+    const { value, drawn } = await hoverAt(`\`\`\`compound\nSMILES: C‸${'C'.repeat(20_000)}\n\`\`\``);
+    expect(value).toContain('**C₂₀₀₀₁H₄₀₀₀₄**');
+    expect(drawn).toEqual([]);
+  });
+
   it('lets nothing of the notebook act', async () => {
     const { value } = await hoverAt('```compound\nname: [x](command:y) <b>\nSMILES: C‸C\n```');
     expect(value).toContain('\\[x\\](command:y) &lt;b&gt;');

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { RdkitModule } from '../../../server/toolkit/rdkit-module.ts';
-import { countSmilesAtoms, mostAtoms, RdkitService } from '../../../server/toolkit/service.ts';
+import { countSmilesAtoms, RdkitService } from '../../../server/toolkit/service.ts';
+import { mostAtoms } from '../../../server/toolkit/toolkit.ts';
 
 /** RDKit as far as the service knows it, counting what is alive. */
 function fakeRdkit(trouble: Record<string, unknown> = {}) {
