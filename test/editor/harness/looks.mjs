@@ -119,5 +119,22 @@ export async function checkLooks(tally, browser, workbench, extension, folder, f
       await leave(page);
     });
   }
+  await showPage(page, folder, shoot);
   await page.close();
+}
+
+/** The picture of the README: faults underlined, and the hover below the structure so that it covers none. */
+async function showPage(page, folder, shoot) {
+  writeFolderSettings(folder, {
+    'workbench.colorTheme': 'Default Light Modern',
+    'editor.minimap.enabled': false,
+    'editor.hover.above': false,
+    'workbench.sideBar.location': 'right',
+  });
+  await page.locator('.monaco-workbench.vs').waitFor();
+  await page.keyboard.press('Control+b');
+  await page.locator('.monaco-editor .minimap').waitFor({ state: 'hidden' });
+  await rest(page, 'COc1ccc(cc1)C(C)O');
+  await drawingInHover(page);
+  await shoot(page, 'page');
 }

@@ -28,7 +28,9 @@ export async function checkPackage(tally, browser, editor, folder, file) {
         join(root, 'node_modules', '@vscode', 'vsce', 'vsce'),
         'package',
         '--no-dependencies',
+        // Nothing in it is published anywhere that links could lead to.
         '--allow-missing-repository',
+        '--no-rewrite-relative-links',
         '--out',
         vsix,
       ],

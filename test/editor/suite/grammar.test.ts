@@ -1,5 +1,7 @@
 /** The TextMate grammar, in the editor's own engine and on top of the editor's own Markdown grammar. */
 import assert from 'node:assert/strict';
+import { compoundKeyAliases, reactionKeyAliases } from '../../../server/notebook/key-aliases.ts';
+import { compoundKeys, reactionKeys, type FieldKey } from '../../../server/notebook/keys.ts';
 import { tokenize, type Token } from './tokenize.ts';
 
 /** The innermost scope of the first piece of a line that begins with `text`. */
@@ -23,11 +25,33 @@ async function scopesIn(
   );
 }
 
-const key = 'entity.name.tag.key.isonym';
+const keyScope = 'entity.name.tag.key.isonym';
 const number = 'constant.numeric.isonym';
 const unit = 'keyword.other.unit.isonym';
 const substance = 'entity.name.type.substance.isonym';
 const term = 'support.constant.term.isonym';
+
+/** How the value of a key is coloured, unless it is a quantity. */
+const fieldScopes: Partial<Record<FieldKey, string>> = {
+  label: 'label',
+  name: 'name',
+  synonyms: 'name',
+  SMILES: 'smiles',
+  formula: 'identifier',
+  InChI: 'identifier',
+  InChIKey: 'identifier',
+  'CAS RN': 'identifier',
+  isomers: 'isomers',
+  allow: 'allow',
+  charged: 'substances',
+  obtained: 'substances',
+  solvent: 'substances',
+  scheme: 'scheme',
+  appearance: 'text',
+  source: 'text',
+  notes: 'text',
+  reference: 'text',
+};
 
 suite('grammar', () => {
   test('identity of a compound', () =>
@@ -45,7 +69,7 @@ suite('grammar', () => {
       ),
       [
         [0, 'compound', 'fenced_code.block.language.markdown'],
-        [1, 'label', key],
+        [1, 'label', keyScope],
         [1, '4', 'variable.other.constant.label.isonym'],
         [2, '1-(4-methoxyphenyl)ethan-1-ol', substance],
         [3, 'COc', 'string.unquoted.smiles.isonym'],
@@ -54,7 +78,7 @@ suite('grammar', () => {
         [3, '/', 'keyword.operator.bond.smiles.isonym'],
         [4, 'C11H14O2', 'string.unquoted.identifier.isonym'],
         [5, 'racemate', 'constant.language.isomers.isonym'],
-        [6, 'cas rn', key],
+        [6, 'cas rn', keyScope],
         [6, '64-17-5', 'string.unquoted.identifier.isonym'],
         [8, '-', 'punctuation.definition.list.begin.isonym'],
         [8, 'p-anisyl', substance],
@@ -76,7 +100,7 @@ suite('grammar', () => {
         [1, '95–97', number],
         [1, '°C', unit],
         [1, 'mmHg', unit],
-        [2, '1H NMR', key],
+        [2, '1H NMR', keyScope],
         [2, 'MHz', unit],
         [2, 'J', term],
         [4, '4.85', number],
@@ -85,7 +109,7 @@ suite('grammar', () => {
         [5, 'm/z', term],
         [5, '[M + Na]+', 'constant.other.ion.isonym'],
         [5, '175.0730', number],
-        [6, '[α]D', key],
+        [6, '[α]D', keyScope],
         [6, '−12.3', number],
       ],
     ));
@@ -118,9 +142,37 @@ suite('grammar', () => {
         [4, 'solvent', 'storage.modifier.role.isonym'],
         [5, '[1,1′-bi(cyclopentyl)]-2-ol', substance],
         [5, 'mol%', unit],
-        [6, 'obtained', key],
+        [6, 'obtained', keyScope],
         [7, '4', substance],
         [7, '%', unit],
+      ],
+    ));
+
+  test('every spelling of a key is coloured as the key that it stands for', async () => {
+    const spellings = [
+      ...compoundKeys.map((key) => ({ kind: 'compound', key, aliases: compoundKeyAliases[key] })),
+      ...reactionKeys.map((key) => ({ kind: 'reaction', key, aliases: reactionKeyAliases[key] })),
+    ];
+    const wrong: string[] = [];
+    for (const { kind, key, aliases } of spellings) {
+      for (const spelling of [key, key.toUpperCase(), ...(aliases ?? [])]) {
+        const field = (await tokenize(block(kind, `${spelling}: x`)))[1]!;
+        const wanted = `meta.field.${fieldScopes[key] ?? 'quantities'}.isonym`;
+        const whole = field[0]?.text === spelling && field[0].scopes.at(-1) === keyScope;
+        if (!whole || !field[0]!.scopes.includes(wanted)) wrong.push(`${spelling} (${key})`);
+      }
+    }
+    assert.deepEqual(wrong, []);
+  });
+
+  test('a block that is indented as a whole', () =>
+    scopesIn(
+      block('compound', '  label: 4', '  M.W.: 152.19', '  1H NMR: 7.30 (d),', '    4.85 (q)', '  bp: 81 °C'),
+      [
+        [1, '4', 'variable.other.constant.label.isonym'],
+        [2, 'M.W.', keyScope],
+        [4, '4.85', number],
+        [5, 'bp', keyScope],
       ],
     ));
 
@@ -137,7 +189,7 @@ suite('grammar', () => {
         '- step',
         '  ```compound',
         '  label: 9',
-        '  1H NMR: 7.30 (d, J = 8.7 Hz, 2H),',
+        '  1H NMR (CDCl3): 7.30 (d, J = 8.7 Hz, 2H),',
         '    4.85 (q, J = 6.4 Hz, 1H)',
         '  name: bicyclo[2.2.1]heptane',
         '  ```',
@@ -145,8 +197,9 @@ suite('grammar', () => {
       ],
       [
         [2, '9', 'variable.other.constant.label.isonym'],
+        [3, '1H NMR (CDCl3)', keyScope],
         [4, '4.85', number],
-        [5, 'name', key],
+        [5, 'name', keyScope],
         [5, 'bicyclo', substance],
         [6, '```', 'punctuation.definition.markdown'],
         [7, '9 mmol', 'meta.paragraph.markdown'],
@@ -168,7 +221,7 @@ suite('grammar', () => {
       [
         [1, '7', 'variable.other.constant.label.isonym'],
         [3, '760', number],
-        [5, 'mp', key],
+        [5, 'mp', keyScope],
         [6, '~~~~~', 'punctuation.definition.markdown'],
         [7, '5 °C', 'meta.paragraph.markdown'],
       ],

@@ -13,6 +13,11 @@ import {
 } from './support.ts';
 
 suite('settings', () => {
+  test('isonym.json may hold comments, as the server reads them', async () => {
+    const document = await workspace.openTextDocument(Uri.joinPath(notebookFolder(), 'isonym.json'));
+    assert.equal(document.languageId, 'jsonc');
+  });
+
   test('a severity in isonym.json counts from the moment it is saved until it is gone', async () => {
     const { document } = await openPage('with-settings/page.md', fiveBonds('S-1'));
     await finding(document, 'valence');
