@@ -7,6 +7,7 @@ import type { NameReading, Reading } from '../chemistry/nomenclature/reading.ts'
 import { canonicalSmiles } from '../chemistry/structure/canonical-smiles.ts';
 import { compositionOf } from '../chemistry/structure/composition-of.ts';
 import type { Molecule } from '../chemistry/structure/molecule.ts';
+import { valenceProblems } from '../chemistry/structure/valence.ts';
 import type { CompoundModel } from '../checks/model.ts';
 import { mostAtoms } from '../toolkit/toolkit.ts';
 import { mostDrawings, type Drawing, type HoverCard } from './hover-card.ts';
@@ -42,6 +43,13 @@ export function structureCard(
   smiles?: string,
   highlight?: readonly number[],
 ): HoverCard {
+  if (valenceProblems(molecule).length > 0) {
+    // What cannot exist has no formula and no mass, least of all under the name of something that does.
+    return {
+      title: title ?? 'An impossible structure',
+      lines: ['No formula and no mass: an atom has too many bonds.'],
+    };
+  }
   const composition = compositionOf(molecule);
   const formula = prettyFormula(composition);
   const card: HoverCard = {
