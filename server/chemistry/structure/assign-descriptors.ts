@@ -72,22 +72,24 @@ export function assignDescriptors(molecule: Molecule, wanted: readonly WantedDes
     };
   }
 
+  const elementsOf = (number: number) =>
+    dependent.map(({ candidate }, bit) => elementFor(candidate, Math.floor(number / 2 ** bit) % 2 === 1));
   const solutions = new Map<string, Molecule>();
-  let anyLetter = false;
   for (let number = 0; number < 2 ** dependent.length; number++) {
-    const elements = dependent.map(({ candidate }, bit) =>
-      elementFor(candidate, Math.floor(number / 2 ** bit) % 2 === 1),
+    const trial = withStereo(molecule, [...base, ...elementsOf(number)]);
+    const fits = elementsOf(number).every(
+      (element, position) => letterOf(trial, element, kinds) === dependent[position]!.letter,
     );
-    const trial = withStereo(molecule, [...base, ...elements]);
-    const letters = elements.map((element) => letterOf(trial, element, kinds));
-    anyLetter ||= letters.some((letter) => letter !== undefined);
-    if (letters.every((letter, position) => letter === dependent[position]!.letter)) {
-      solutions.set(canonicalForm(trial).key, trial);
-    }
+    if (fits) solutions.set(canonicalForm(trial).key, trial);
   }
   const [only, ...others] = solutions.values();
   if (only !== undefined && others.length === 0) return { molecule: only, refused };
-  const reason: Refusal = only !== undefined ? 'undetermined' : anyLetter ? 'impossible' : 'ligands alike';
+  const hasLetters = () =>
+    Array.from({ length: 2 ** dependent.length }, (_, number) => elementsOf(number)).some((elements) => {
+      const trial = withStereo(molecule, [...base, ...elements]);
+      return elements.some((element) => letterOf(trial, element, kinds) !== undefined);
+    });
+  const reason: Refusal = only !== undefined ? 'undetermined' : hasLetters() ? 'impossible' : 'ligands alike';
   return {
     molecule: withStereo(molecule, base),
     refused: [...refused, ...dependent.map(({ index }) => ({ index, reason }))],
@@ -99,9 +101,9 @@ function holds(candidate: StereoCandidate, atom: number, letter: DescriptorLette
     case 'tetrahedral':
       return candidate.centre === atom && 'RSrs'.includes(letter);
     case 'double-bond':
-      return candidate.ends.includes(atom) && 'EZ'.includes(letter);
+      return candidate.ends.includes(atom) && 'EZez'.includes(letter);
     case 'axis':
-      return candidate.ends.includes(atom) && 'MP'.includes(letter);
+      return candidate.ends.includes(atom) && 'MPmp'.includes(letter);
   }
 }
 

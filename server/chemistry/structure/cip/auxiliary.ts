@@ -41,15 +41,28 @@ export class AuxiliaryLetters {
   /** By the constitution, and where that leaves ties, by what is known of the spheres beyond `sphere`. */
   rank(branches: readonly Branch[], sphere: number): Ranking {
     const ranking = this.constitutional.rank(branches);
-    if (!ranking.tied || this.molecule.stereo.length === 0) return ranking;
+    if (!ranking.tied || !branches.some((branch) => this.holdsUnit(branch, sphere))) return ranking;
     return this.rankerBeyond(sphere).rank(branches);
+  }
+
+  /** Whether a stated unit in a branch lies beyond a sphere; without any, rules 3 to 5 need not be tried. */
+  private holdsUnit(branch: Branch, sphere: number): boolean {
+    if (this.molecule.stereo.length === 0) return false;
+    const stack = [branch];
+    for (let at = stack.pop(); at !== undefined; at = stack.pop()) {
+      const { node } = at;
+      const states = node.duplicate === false && (this.centres.has(node.atom) || this.bonds.has(node.atom));
+      if (states && node.sphere > sphere) return true;
+      stack.push(...this.tree.onward(at));
+    }
+    return false;
   }
 
   rankerBeyond(sphere: number): Ranker {
     let ranker = this.rankers.get(sphere);
     if (ranker === undefined) {
       const letterAt: LetterAt = (node) => (node.sphere > sphere ? this.letterAt(node) : undefined);
-      this.rankers.set(sphere, (ranker = fullRanker(this.constitutional, letterAt)));
+      this.rankers.set(sphere, (ranker = fullRanker(this.constitutional, letterAt, this.bonds.size > 0)));
     }
     return ranker;
   }

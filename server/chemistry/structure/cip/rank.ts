@@ -33,7 +33,8 @@ export class Ranker {
 
   constructor(
     readonly tree: CipTree,
-    private readonly rules: readonly (NodeKey | BranchRule)[],
+    /** Undefined for a rule that cannot tell anything apart in this structure. */
+    private readonly rules: readonly (NodeKey | BranchRule | undefined)[],
     private readonly below?: Ranker,
   ) {
     this.firstOwn = below?.ruleCount ?? 0;

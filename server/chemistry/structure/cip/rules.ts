@@ -33,14 +33,17 @@ const keyed =
     return letter === undefined ? 0 : (values[letter] ?? 0);
   };
 
-/** All rules; `constitutional` must be about the same tree. */
-export function fullRanker(constitutional: Ranker, letterAt: LetterAt): Ranker {
+/** Stands for a rule that cannot tell anything apart in the structure at hand. */
+const idle: BranchRule = { compare: () => 0 };
+
+/** All rules; `constitutional` must be about the same tree. Without stated double bonds rule 3 is spared. */
+export function fullRanker(constitutional: Ranker, letterAt: LetterAt, hasDoubleBonds: boolean): Ranker {
   const { tree } = constitutional;
   const upTo4a = new Ranker(
     tree,
     [
       // Rule 3: Z before E before none.
-      keyed(letterAt, { Z: 2, E: 1 }),
+      hasDoubleBonds ? keyed(letterAt, { Z: 2, E: 1 }) : idle,
       // Rule 4a: chiral before pseudoasymmetric before none.
       keyed(letterAt, { R: 2, S: 2, M: 2, P: 2, z: 2, e: 2, r: 1, s: 1, m: 1, p: 1 }),
     ],
