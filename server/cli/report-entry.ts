@@ -7,6 +7,7 @@ import type { NameReading } from '../chemistry/nomenclature/reading.ts';
 import { canonicalSmiles } from '../chemistry/structure/canonical-smiles.ts';
 import { compositionOf } from '../chemistry/structure/composition-of.ts';
 import type { Molecule } from '../chemistry/structure/molecule.ts';
+import { valenceProblems } from '../chemistry/structure/valence.ts';
 import type { CompoundModel, EntryModel } from '../checks/model.ts';
 import type { Field } from '../notebook/model.ts';
 import { mostAtoms } from '../toolkit/toolkit.ts';
@@ -57,8 +58,10 @@ type CompoundPart = Omit<EntryDescription, 'label' | 'fields' | 'accepted'>;
 
 function describeCompound(model: CompoundModel): CompoundPart {
   const name = textOrNone(model.entry.name?.text.text);
-  // Nobody draws a structure beyond that, and its canonical form would take minutes.
-  const structures = structuresOf(model).filter(({ molecule }) => molecule.atoms.length <= mostAtoms);
+  // Nobody draws a structure beyond that, and its canonical form would take minutes; one that cannot exist is not drawn.
+  const structures = structuresOf(model).filter(
+    ({ molecule }) => molecule.atoms.length <= mostAtoms && valenceProblems(molecule).length === 0,
+  );
   const [only] = structures;
   const composition =
     only !== undefined && structures.every((each) => sameFormula(each.molecule, only.molecule))
