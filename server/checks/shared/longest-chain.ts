@@ -26,7 +26,8 @@ export function alkaneParent(
   const lower = name.toLowerCase();
   const found = stems
     .map((stem, index) => ({ word: `${stem}ane`, carbons: index + 1 }))
-    .filter(({ word }) => lower.endsWith(word))
+    // `tricosane` is no icosane: what stands before the parent must be a substituent prefix or a locant.
+    .filter(({ word }) => lower.endsWith(word) && /(?:^|yl|o|[-\d)\]}])$/.test(lower.slice(0, -word.length)))
     .sort((first, second) => second.word.length - first.word.length)[0];
   return (
     found && { carbons: found.carbons, range: { start: name.length - found.word.length, end: name.length } }

@@ -7,6 +7,8 @@ it.each([
   ['2-ethylpentane', 5],
   ['2-Methylundecane', 11],
   ['heptadecane', 17],
+  ['tricosane', undefined],
+  ['2-methyl-n-heptane', 7],
   ['dichloromethane', 1],
   ['cyclohexanol', undefined],
   ['trimethylsilane', undefined],
