@@ -3,7 +3,8 @@ import { assignDescriptors } from '../structure/assign-descriptors.ts';
 import { cipDescriptors } from '../structure/cip/descriptors.ts';
 import type { Molecule, StereoElement } from '../structure/molecule.ts';
 import { enumerateStereoisomers, type StereoisomerList } from '../structure/stereoisomers.ts';
-import type { Draft } from './build/draft.ts';
+import type { Draft, Owner } from './build/draft.ts';
+import type { Described } from './readings.ts';
 import { relativeFilter } from './relative.ts';
 import type { NameRemark, Reading } from './reading.ts';
 import type { StereoWord } from './tree.ts';
@@ -18,7 +19,7 @@ export interface Arranged {
 }
 
 export function arrangedReading(
-  name: string,
+  complete: Complete,
   molecule: Molecule,
   draft: Draft | undefined,
   prepared: PreparedName,
@@ -76,23 +77,31 @@ export function arrangedReading(
   const bare = isomers.length === 1 && relative.length > 0 ? isomers[0]! : list.molecule;
   if (racemic && isomers.length === 1) {
     const mirror = mirrored(isomers[0]!);
-    return { reading: openReading(name, molecule, [isomers[0]!, mirror], 2, cap, draft), remarks };
+    return { reading: openReading(complete, molecule, [isomers[0]!, mirror], 2, cap, draft), remarks };
   }
   const open = isomers.length > 1 || (count ?? 2) > 1 ? isomers : [];
-  return { reading: openReading(name, bare, open, count, cap, draft), remarks };
+  return { reading: openReading(complete, bare, open, count, cap, draft), remarks };
 }
 
 function openReading(
-  name: string,
+  complete: Complete,
   molecule: Molecule,
   open: readonly Molecule[],
   count: number | undefined,
   cap: number,
   draft: Draft | undefined,
 ): Reading {
-  const stereoisomers = open
-    .slice(0, cap)
-    .map((isomer) => ({ name: describedName(name, isomer, molecule, draft), molecule: isomer }));
+  const stereoisomers = open.slice(0, cap).map((isomer) => {
+    let isomerName: string | undefined;
+    return {
+      // Worked out when asked for: a check that counts isomers does not need it.
+      get name() {
+        return (isomerName ??= describedName(complete, isomer, molecule, draft));
+      },
+      molecule: isomer,
+    };
+  });
+  const name = complete([]);
   const total = count ?? open.length;
   return {
     name,
@@ -102,20 +111,50 @@ function openReading(
   };
 }
 
-/** The name with the descriptors of what it left open in front (P-91.2): `(2R)-butan-2-ol`. */
-function describedName(name: string, isomer: Molecule, before: Molecule, draft: Draft | undefined): string {
+/** Writes the name with what it left open, and with descriptors where they belong. */
+type Complete = (described: readonly Described[]) => string;
+
+/** The name with the descriptors of what it left open, in front of their units (P-91.3): `(2R)-butan-2-ol`. */
+function describedName(
+  complete: Complete,
+  isomer: Molecule,
+  before: Molecule,
+  draft: Draft | undefined,
+): string {
   const stated = new Set(before.stereo.map((element) => elementAtoms(element).join(' ')));
-  const words: { text: string; number: number }[] = [];
+  const units = new Map<Owner, { text: string; number: number }[]>();
+  const all: string[] = [];
+  let told = true;
   for (const { element, letter } of cipDescriptors(isomer)) {
     const atoms = elementAtoms(element);
-    if (letter === undefined || stated.has(atoms.join(' '))) continue;
-    const locants = atoms.flatMap((atom) => draft?.named.get(atom)?.locant ?? []);
-    locants.sort((first, second) => Number.parseInt(first, 10) - Number.parseInt(second, 10));
-    words.push({ text: `${locants[0] ?? ''}${letter}`, number: Number.parseInt(locants[0] ?? '0', 10) });
+    if (stated.has(atoms.join(' '))) continue;
+    all.push(letter ?? '?');
+    const places = atoms.flatMap((atom) => draft?.named.get(atom) ?? []);
+    places.sort(
+      (first, second) =>
+        first.owner.depth - second.owner.depth || numberOf(first.locant) - numberOf(second.locant),
+    );
+    const place = places[0];
+    if (letter === undefined || !place || place.owner.repeated) {
+      told = false;
+      continue;
+    }
+    const word = { text: `${place.locant ?? ''}${letter}`, number: numberOf(place.locant) };
+    units.set(place.owner, [...(units.get(place.owner) ?? []), word]);
   }
-  if (words.length === 0) return name;
-  words.sort((first, second) => first.number - second.number);
-  return `(${words.map((word) => word.text).join(',')})-${name}`;
+  // Descriptors without a place in the name are given after it.
+  if (!told) return `${complete([])}, ${all.join(',')} form`;
+  return complete(
+    [...units].map(([owner, words]) => {
+      words.sort((first, second) => first.number - second.number);
+      return { owner, text: `(${words.map((word) => word.text).join(',')})-` };
+    }),
+  );
+}
+
+function numberOf(locant: string | undefined): number {
+  const number = Number.parseInt(locant ?? '', 10);
+  return Number.isNaN(number) ? 1000 : number;
 }
 
 function elementAtoms(element: StereoElement): readonly number[] {

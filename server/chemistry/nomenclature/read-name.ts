@@ -3,7 +3,7 @@
  * 2013 (Favre, Powell: Nomenclature of Organic Chemistry) and the usage of 1979 and 1993 still met in notebooks.
  */
 import type { NameReading, NameRemark, Reading } from './reading.ts';
-import { completedName, meaningsOf, type Meaning } from './readings.ts';
+import { completedName, meaningsOf, type Described, type Meaning } from './readings.ts';
 import { createCommonNames, type CommonNames } from './common-names.ts';
 import { arrangedReading } from './arrange.ts';
 import { unknownName } from './unknown.ts';
@@ -69,7 +69,7 @@ function read(text: string, limits: NameLimits, lexicon: Lexicon, common: Common
       ? { kind: 'mixture', message: known.message, components: [] }
       : {
           kind: 'understood',
-          readings: [arrangedReading(text, known.molecule, undefined, prepared, limits).reading],
+          readings: [arrangedReading(() => text, known.molecule, undefined, prepared, limits).reading],
           remarks: [],
         };
   }
@@ -81,8 +81,9 @@ function read(text: string, limits: NameLimits, lexicon: Lexicon, common: Common
   const cap = limits.readings ?? 32;
   const remarks = new Map<string, NameRemark>();
   const readings = meanings.slice(0, cap).map((meaning): Reading => {
-    const name = meanings.length === 1 ? text : completed(text, prepared, meaning);
-    const arranged = arrangedReading(name, meaning.molecule, meaning.draft, prepared, limits);
+    const complete = (described: readonly Described[]) =>
+      completed(text, prepared, meaning, meanings.length > 1, described);
+    const arranged = arrangedReading(complete, meaning.molecule, meaning.draft, prepared, limits);
     for (const remark of arranged.remarks)
       remarks.set(`${String(remark.range.start)} ${remark.message}`, remark);
     return arranged.reading;
@@ -96,16 +97,29 @@ function read(text: string, limits: NameLimits, lexicon: Lexicon, common: Common
 }
 
 /** What is missing is written into the text as typed, or into the prepared one where that has another order. */
-function completed(text: string, prepared: PreparedName, meaning: Meaning): string {
+function completed(
+  text: string,
+  prepared: PreparedName,
+  meaning: Meaning,
+  locants: boolean,
+  described: readonly Described[],
+): string {
+  if (!locants && described.length === 0) return text;
   const { insertions, draft } = meaning;
-  const inOrder = prepared.origin.every(
-    (place, index) => index === 0 || place >= prepared.origin[index - 1]!,
-  );
-  if (!inOrder) return completedName(prepared.text, insertions, draft.brackets);
-  const place = (offset: number) => prepared.origin[offset] ?? text.length;
+  const inOrder = prepared.origin.every((from, index) => index === 0 || from >= prepared.origin[index - 1]!);
+  const base = inOrder ? text : prepared.text;
+  const place = (offset: number) => (inOrder ? (prepared.origin[offset] ?? text.length) : offset);
   return completedName(
-    text,
-    insertions.map((one) => ({ ...one, at: place(one.at) })),
-    draft.brackets.map(({ at, end }) => ({ at: place(at), end: place(end) })),
+    base,
+    locants ? insertions.map((one) => ({ ...one, at: place(one.at) })) : [],
+    locants ? draft.brackets.map(({ at, end }) => ({ at: place(at), end: place(end) })) : [],
+    described.map(({ owner, text: letters }) => ({
+      text: letters,
+      owner: {
+        ...owner,
+        at: place(owner.at),
+        ...(owner.wrapTo === undefined ? {} : { wrapTo: place(owner.wrapTo) }),
+      },
+    })),
   );
 }

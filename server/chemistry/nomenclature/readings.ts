@@ -4,7 +4,7 @@ import type { Molecule } from '../structure/molecule.ts';
 import type { TextRange } from '../text.ts';
 import { buildSentence } from './build/build-sentence.ts';
 import { Choices } from './build/choices.ts';
-import { Draft, type Insertion } from './build/draft.ts';
+import { Draft, type Insertion, type Owner } from './build/draft.ts';
 import { finished } from './build/finish.ts';
 import { isLongestChain } from './build/proper-chain.ts';
 import type { Part } from './words/sentence.ts';
@@ -72,17 +72,33 @@ function constitution(molecule: Molecule): string {
   return canonicalForm(molecule, { stereo: false }).key;
 }
 
-/** The name with the missing locants and brackets written in. */
+/** Descriptors to be written in front of one unit of the name. */
+export interface Described {
+  readonly owner: Owner;
+  /** `(2R,3S)-` */
+  readonly text: string;
+}
+
+/** The name with missing locants, brackets and descriptors written in. */
 export function completedName(
   text: string,
   insertions: readonly Insertion[],
   brackets: readonly { readonly at: number; readonly end: number }[] = [],
+  described: readonly Described[] = [],
 ): string {
-  // At one place: a closing bracket, then locants, then an opening bracket.
+  // At one place: closing brackets, descriptors of the outer unit, locants, opening brackets, descriptors inside them.
   const all = [
     ...insertions.map(({ at, text: added }, order) => ({ at, text: added, order: order + 1000 })),
     ...brackets.map(({ at }) => ({ at, text: '(', order: 1e6 })),
-    ...brackets.map(({ end }) => ({ at: end, text: ')', order: 0 })),
+    ...brackets.map(({ end }) => ({ at: end, text: ')', order: 1 })),
+    ...described.flatMap(({ owner, text: letters }) =>
+      owner.wrapTo === undefined
+        ? [{ at: owner.at, text: letters, order: 500 + owner.depth }]
+        : [
+            { at: owner.at, text: `[${letters}`, order: 2e6 + owner.depth },
+            { at: owner.wrapTo, text: ']', order: 0 },
+          ],
+    ),
   ];
   all.sort((first, second) => first.at - second.at || first.order - second.order);
   let name = '';
@@ -90,15 +106,16 @@ export function completedName(
   for (const one of all) {
     name += text.slice(last, one.at);
     last = one.at;
-    let added = one.text;
-    if (added === '(' || added === ')') {
-      name += added;
-      continue;
-    }
-    if (added.startsWith('-') && /[-\s([]$|^$/.test(name)) added = added.slice(1);
-    else if (!added.startsWith('-') && /[\p{L}\d')\]]$/u.test(name)) added = `-${added}`;
-    if (added.endsWith('-') && text[one.at] === '-') added = added.slice(0, -1);
-    name += added;
+    name += fitted(one.text, name, text[one.at]);
   }
   return name + text.slice(last);
+}
+
+/** An insertion with just the hyphens that its surroundings need. */
+function fitted(inserted: string, before: string, next: string | undefined): string {
+  if (/^[()[\]]/.test(inserted)) return inserted;
+  let added = inserted;
+  if (added.startsWith('-') && /[-\s([]$|^$/.test(before)) added = added.slice(1);
+  else if (!added.startsWith('-') && /[\p{L}\d')\]]$/u.test(before)) added = `-${added}`;
+  return added.endsWith('-') && next === '-' ? added.slice(0, -1) : added;
 }

@@ -67,6 +67,9 @@ export interface Substitution extends OpenPlace {
   readonly range: TextRange;
   /** The group was written without brackets that would belong here, up to the end of `range`. */
   readonly bracketAt?: number;
+  /** Where the group itself begins, after locants. */
+  readonly bodyAt: number;
+  readonly bracketed?: boolean;
 }
 
 /** One way of understanding a stretch of substituents; the ways with the lowest cost are meant. */

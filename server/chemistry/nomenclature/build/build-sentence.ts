@@ -8,6 +8,12 @@ import type { Choices } from './choices.ts';
 import type { Draft } from './draft.ts';
 import { skeletonFromSmiles } from './skeleton.ts';
 
+/** Builds a word of the sentence, whose descriptors are written at its beginning. */
+function buildWord(unit: Unit, draft: Draft, choices: Choices, copies = 1): BuiltUnit | undefined {
+  draft.owner = { at: unit.range.start, depth: 0, repeated: copies > 1 };
+  return buildUnit(unit, draft, choices);
+}
+
 interface Word {
   readonly unit: Unit;
   readonly count: number;
@@ -111,8 +117,8 @@ function anhydride(word: Word, draft: Draft, choices: Choices): boolean {
     suffix: { ...ending.suffix, name: 'oyl', group: '=O', radical: true, anion: false },
   };
   if (ending.count === 1) {
-    const acid = buildUnit(word.unit, draft, choices);
-    const other = acid && buildUnit({ ...word.unit, endings: [acyl] }, draft, choices);
+    const acid = buildWord(word.unit, draft, choices);
+    const other = acid && buildWord({ ...word.unit, endings: [acyl] }, draft, choices);
     return other !== undefined && join(draft, acid!.sites[0]!, other.free[0]!);
   }
   if (ending.count !== 2 || !ending.locants) return false;
@@ -120,7 +126,7 @@ function anhydride(word: Word, draft: Draft, choices: Choices): boolean {
     { ...ending, count: 1, locants: [ending.locants[0]!] },
     { ...acyl, count: 1, locants: [ending.locants[1]!] },
   ];
-  const built = buildUnit({ ...word.unit, endings: halves }, draft, choices);
+  const built = buildWord({ ...word.unit, endings: halves }, draft, choices);
   return built?.free.length === 1 && join(draft, built.sites[0]!, built.free[0]!);
 }
 
@@ -149,7 +155,7 @@ function functionalClass(
   const built: { free: BuiltUnit['free'] }[] = [];
   for (const radical of radicals) {
     for (let copy = 0; copy < radical.count; copy++) {
-      const one = buildUnit(radical.unit, draft, choices);
+      const one = buildWord(radical.unit, draft, choices, radical.count);
       if (!one || one.free.length === 0) return false;
       built.push(one);
     }
@@ -183,7 +189,7 @@ function functionalClass(
 
 /** `ethyl ether` is diethyl ether in older usage. */
 function again(radical: Word, draft: Draft, choices: Choices): BuiltUnit['free'] {
-  return buildUnit(radical.unit, draft, choices)?.free ?? [];
+  return buildWord(radical.unit, draft, choices, radical.count)?.free ?? [];
 }
 
 interface Ion {
@@ -225,7 +231,7 @@ function salt(
 
 function makeCation(base: Word, draft: Draft, choices: Choices): boolean {
   const from = draft.atoms.length;
-  if (!buildUnit(base.unit, draft, choices)) return false;
+  if (!buildWord(base.unit, draft, choices)) return false;
   let charge = 0;
   for (let atom = from; atom < draft.atoms.length; atom++) charge += draft.atoms[atom]!.charge;
   return charge === 1;
@@ -259,7 +265,7 @@ function acidsAndBases(
   const said: (Site | undefined)[] = [];
   for (const radical of radicals) {
     for (let copy = 0; copy < radical.count; copy++) {
-      const built = buildUnit(radical.unit, draft, choices);
+      const built = buildWord(radical.unit, draft, choices, radical.count);
       if (!built || built.free.length === 0) return false;
       groups.push(built.free);
       said.push(...built.free.map(() => radical.site));
@@ -269,7 +275,7 @@ function acidsAndBases(
   const copies = acid.count;
   const acids: BuiltUnit[] = [];
   for (let copy = 0; copy < copies; copy++) {
-    const built = buildUnit(acid.unit, draft, choices);
+    const built = buildWord(acid.unit, draft, choices, acid.count);
     if (!built) return false;
     acids.push(built);
   }
@@ -328,7 +334,7 @@ function acidsAndBases(
     else if (!makeCation(only!.base!, draft, choices)) return false;
   }
   for (let copy = 1; copy < counts[1]; copy++) {
-    if (valences.length + hydrogens > 0 || !buildUnit(acid.unit, draft, choices)) return false;
+    if (valences.length + hydrogens > 0 || !buildWord(acid.unit, draft, choices, acid.count)) return false;
   }
   return true;
 }

@@ -22,6 +22,16 @@ export interface Insertion {
   readonly text: string;
 }
 
+/** Where descriptors of a unit's atoms are written. */
+export interface Owner {
+  readonly at: number;
+  /** With brackets round the group up to here, where it has none. */
+  readonly wrapTo?: number;
+  readonly depth: number;
+  /** The group stands for several, so that a descriptor cannot be about one of them. */
+  readonly repeated: boolean;
+}
+
 /** A chain whose name holds only while no longer chain can be found; see `proper-chain.ts`. */
 export interface ChainClaim {
   readonly atoms: readonly number[];
@@ -46,7 +56,9 @@ export class Draft {
   /** Usual indicated hydrogen, used when nothing else settles the double bonds. */
   readonly usualHydrogen: number[] = [];
   /** For atoms of a parent: its locant, and where the parent's name begins. */
-  readonly named = new Map<number, { locant: Locant; parentAt: number }>();
+  readonly named = new Map<number, { locant: Locant | undefined; parentAt: number; owner: Owner }>();
+  /** The unit now being built. */
+  owner: Owner = { at: 0, depth: 0, repeated: false };
   /** Bonds that belong to the skeletons of mancude rings, as pairs of atoms, the lower first. */
   readonly ringBonds = new Set<string>();
   cost = 0;

@@ -75,7 +75,8 @@ function placeDoubleBonds(draft: Draft, choices: Choices, whole: TextRange): boo
     if (options.length > 0) {
       const atom = options[choices.pick(options.length)]!;
       const name = draft.named.get(atom);
-      if (name && options.length > 1) draft.insertions.push({ at: name.parentAt, text: `${name.locant}H-` });
+      if (name?.locant !== undefined && options.length > 1)
+        draft.insertions.push({ at: name.parentAt, text: `${name.locant}H-` });
       draft.atoms[atom]!.saturated = true;
       match = matching(
         draft,

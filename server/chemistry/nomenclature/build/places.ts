@@ -27,8 +27,8 @@ export class Places {
   ) {
     skeleton.atoms.forEach((atom, index) => {
       for (const locant of atom.locants) if (locant !== '@') this.name(locant, atoms[index]!);
-      const first = atom.locants[0];
-      if (first !== undefined) draft.named.set(atoms[index]!, { locant: first, parentAt: unit.parentAt });
+      const place = { locant: atom.locants[0], parentAt: unit.parentAt, owner: draft.owner };
+      draft.named.set(atoms[index]!, place);
     });
     this.fresh = this.alike && unit.attach === undefined;
   }

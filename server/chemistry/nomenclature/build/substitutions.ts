@@ -2,8 +2,10 @@
 import type { Locant, Substitution, Unit } from '../tree.ts';
 import { noSuchPlace, type BuiltUnit, type UnitBuilder } from './built-unit.ts';
 import type { Choices } from './choices.ts';
-import type { Draft } from './draft.ts';
+import type { Draft, Owner } from './draft.ts';
 import { fifthBond } from './endings.ts';
+
+const halogens: ReadonlySet<number> = new Set([9, 17, 35, 53]);
 
 export function placeSubstitution(
   substitution: Substitution,
@@ -30,10 +32,17 @@ export function placeSubstitution(
   let from = 0;
   for (let index = 0; index < substitution.count; index++) {
     const before = draft.atoms.length;
+    const { owner } = draft;
+    draft.owner = ownerOf(substitution, owner);
     const child = build(substitution.unit, draft, choices);
+    draft.owner = owner;
     const [free, ...others] = child?.free ?? [];
     if (!child || !free || others.length > 0) {
       draft.fail(substitution.range, 'This group has no single free valence with which it could be bound.');
+      return false;
+    }
+    if (unit.needsLink === true && halogens.has(draft.atoms[free.atom]!.atomicNumber)) {
+      draft.fail(substitution.range, 'A halogen does not form a name together with this group.');
       return false;
     }
     let host = hosts[index];
@@ -124,4 +133,11 @@ function takesCarbon(built: BuiltUnit, atom: number): boolean {
   return (
     places.atoms.includes(atom) || places.unit.endings.some((ending) => ending.suffix.name.endsWith('amide'))
   );
+}
+
+/** Descriptors of a bracketed group stand inside its bracket; round another group, brackets are written first. */
+function ownerOf(substitution: Substitution, outer: Owner): Owner {
+  const shared = { depth: outer.depth + 1, repeated: outer.repeated || substitution.count > 1 };
+  if (substitution.bracketed === true) return { ...shared, at: substitution.unit.range.start };
+  return { ...shared, at: substitution.bodyAt, wrapTo: substitution.range.end };
 }

@@ -28,6 +28,8 @@ function substitution(item: GroupItem, locants = item.locants): Substitution {
     unit: item.unit,
     at: item.start,
     range: { start: item.start, end: item.end },
+    bodyAt: item.bodyAt,
+    bracketed: item.bracketed,
     ...(locants ? { locants } : {}),
   };
 }
@@ -47,6 +49,7 @@ function compound(
     at: first.start,
     range: { start: first.start, end },
     bracketAt: inner ? first.start : first.bodyAt,
+    bodyAt: inner ? first.start : first.bodyAt,
     ...(locants ? { locants } : {}),
   };
 }
@@ -96,8 +99,8 @@ export function groupingsOf(
 }
 
 function withoutLocants(item: GroupItem): GroupItem {
-  const { kind, count, unit, role, joins, bracketed, start, bodyAt, end } = item;
-  return { kind, count, unit, role, joins, bracketed, start, bodyAt, end };
+  const { kind, count, unit, role, joins, bracketed, bodyAt, end } = item;
+  return { kind, count, unit, role, joins, bracketed, start: bodyAt, bodyAt, end };
 }
 
 /** A locant written before a group can be about the next one only if that has several places: not `methoxy`, `amino`. */
@@ -126,18 +129,23 @@ export function linkedGroupings(
   if (apart && base.needsLink !== true) return eachRun(groups, nest);
   const found: Grouping[] = [];
   const range = { start: groups[0]!.start, end: groups[groups.length - 1]!.end };
+  // `ethylmethylamino`: two alkyl groups on the nitrogen; `carboxymethylamino`: one group.
+  const alkyls =
+    groups.length > 1 &&
+    base.needsLink !== true &&
+    groups.every((group) => group.unit.skeletons.every((one) => one.kind === 'chain'));
   const whole = nest(before);
   if (whole) {
-    found.push({
-      substitutions: [{ count: 1, unit: whole, locants: ['→'], at: range.start, range }],
-      cost: 0,
-    });
+    const bodyAt = groups[0]!.locants ? range.start : groups[0]!.bodyAt;
+    const bracketed = groups.length === 1 && groups[0]!.bracketed;
+    const one = { count: 1, unit: whole, locants: ['→'], at: range.start, range, bodyAt, bracketed };
+    found.push({ substitutions: [one], cost: alkyls ? 1 : 0 });
   }
   if (base.needsLink === true) return found.length > 0 ? found : undefined;
   const located = groups.some((group) => group.locants?.some((locant) => /^\d/.test(locant)));
   const several = groups.length > 1 || groups[0]!.count > 1 || groups[0]!.locants !== undefined;
   if (!located && several && groups.every(canStand)) {
-    found.push({ substitutions: groups.map(onLink), cost: 0 });
+    found.push({ substitutions: groups.map(onLink), cost: alkyls || !whole ? 0 : 1 });
   }
   return found.length > 0 ? found : undefined;
 }

@@ -129,8 +129,11 @@ export class ItemReader {
   /** Ends of words like `disulfanyl` that begin where a multiplier could be read as well. */
   #radicalEnds(start: number, locants: readonly Locant[] | undefined): ReadonlySet<number> {
     const from = locants === undefined ? start : (locantsAt(this.name.text, start)?.end ?? start);
-    const words = wordsAt(this.lexicon.words, this.name.lower, from);
-    return new Set(words.filter((word) => word.value.kind === 'radical').map((word) => word.end));
+    const { text, lower } = this.name;
+    const words = wordsAt(this.lexicon.words, lower, from).filter((word) => word.value.kind === 'radical');
+    // `tridecyl` is one group of thirteen carbons, not three of ten.
+    const alkyls = lower.startsWith('tri', from) ? groupsAt(text, lower, from, this.lexicon) : [];
+    return new Set([...words, ...alkyls].map((one) => one.end));
   }
 
   *#groupsAt(

@@ -44,7 +44,7 @@ export function stereoAt(text: string, offset: number): Written<StereoWord[]> | 
     let at = offset + 1;
     for (const part of match[1]!.split(/[,;]/)) {
       const lead = part.length - part.trimStart().length;
-      const own = /^(\d+[a-z]?'*|[NSP](?=[RS]))?(.)(\*?)$/.exec(part.trim());
+      const own = /^(\d+[a-z]?'*|[NSP](?=[RSEZ]))?(.)(\*?)$/.exec(part.trim());
       if (!own) return undefined;
       const range = { start: at + lead, end: at + part.length };
       words.push({

@@ -96,6 +96,9 @@ export function structured(items: readonly Item[], name: PreparedName, depth = 0
 }
 
 function withRange(unit: Unit, items: readonly Item[]): Unit {
+  const [only] = items;
+  // What a bracket holds begins inside it.
+  if (items.length === 1 && only?.kind === 'group' && only.bracketed) return unit;
   const start = Math.min(items[0]?.start ?? unit.range.start, unit.range.start);
   return { ...unit, range: { start, end: unit.range.end } };
 }
