@@ -28,6 +28,9 @@ import { documentSymbols } from './symbols.ts';
 /** Keystrokes that follow each other this closely are looked at together, in ms. */
 const pauseMs = 12;
 
+/** The first findings go before the toolkit, which wants a processor for half a second. */
+const loadDelayMs = 300;
+
 export class Session {
   private readonly connection: Connection;
   private readonly traits: ClientTraits;
@@ -36,6 +39,7 @@ export class Session {
   private readonly edited = new Map<string, TextDocument>();
   private readonly published = new Map<string, string>();
   private pause: ReturnType<typeof setTimeout> | undefined;
+  private loading: ReturnType<typeof setTimeout> | undefined;
   private failureTold = false;
 
   /** `traits` may change while the session lasts: the editor can take another theme. */
@@ -110,6 +114,7 @@ export class Session {
 
   async dispose(): Promise<void> {
     clearTimeout(this.pause);
+    clearTimeout(this.loading);
     await this.toolkit.dispose();
   }
 
@@ -128,6 +133,7 @@ export class Session {
   }
 
   private publish(page: OpenPage): void {
+    this.expectHovers(page);
     const { uri, version } = page.document;
     const diagnostics = diagnosticsOf(this.documents, page);
     // The same findings at the same places need not travel again, but the version must keep up.
@@ -135,6 +141,15 @@ export class Session {
     if (this.published.get(uri) === text) return;
     this.published.set(uri, text);
     void this.connection.sendDiagnostics({ uri, version, diagnostics });
+  }
+
+  /** Whoever opens a page with compounds will rest the mouse on one: the toolkit loads ahead, in its own thread. */
+  private expectHovers({ page }: OpenPage): void {
+    if (this.loading !== undefined || this.toolkit.state !== 'not-loaded') return;
+    if (!page.blocks.some((block) => block.read.model.kind === 'compound')) return;
+    this.loading = setTimeout(() => {
+      void this.toolkit.load().then(() => this.tellFailure());
+    }, loadDelayMs);
   }
 
   private tellFailure(): void {

@@ -14,12 +14,13 @@ import { modelOf, type EntryModel } from '../checks/model.ts';
 import { analyseEntry, analyseNotebook } from '../checks/run.ts';
 import type { Settings } from '../checks/settings.ts';
 import { readEntry } from '../notebook/entries.ts';
-import { findBlocks } from '../notebook/markdown.ts';
+import { parseMarkdown, type MarkdownPage } from '../notebook/markdown.ts';
 import type { Block, ValueReaders } from '../notebook/model.ts';
 import { readName } from './name-reader.ts';
 
 export interface Analysis {
-  readonly findBlocks: (text: string) => readonly Block[];
+  /** What `previous` has of the same text is not parsed again; the result is the same without it. */
+  readonly parse: (text: string, previous: MarkdownPage | undefined) => MarkdownPage;
   readonly read: (block: Block) => EntryModel;
   readonly check: (model: EntryModel, facts: ToolkitFactsOf) => readonly Finding[];
   readonly checkAcross: (
@@ -29,7 +30,7 @@ export interface Analysis {
 
 export function createAnalysis(settings: Settings): Analysis {
   return {
-    findBlocks,
+    parse: parseMarkdown,
     read: (block) => sharedByStructure(modelOf(readEntry(block, rememberingReaders), settings)),
     check: analyseEntry,
     checkAcross: (files) => analyseNotebook({ files, settings }),

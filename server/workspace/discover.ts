@@ -3,7 +3,7 @@
  * is not even entered, which a glob followed by a filter could not do.
  */
 import ignore, { type Ignore } from 'ignore';
-import { existsSync, readdirSync, readFileSync, statSync } from 'node:fs';
+import { existsSync, readdirSync, readFileSync, realpathSync, statSync } from 'node:fs';
 import { dirname, join, relative, sep } from 'node:path';
 
 export interface Discovery {
@@ -50,8 +50,7 @@ export function discoverNotebooks(folder: string): Discovery {
           waiting.push({ folder: path, ruleSets });
         }
       } else if (isNotebookFile(entry.name) && !isIgnored(path, false, ruleSets)) {
-        // A link to a file counts as the file; links to folders are not followed, they may go in circles.
-        if (entry.isFile() || (entry.isSymbolicLink() && isFile(path))) files.push(path);
+        if (entry.isFile() || (entry.isSymbolicLink() && leadsToFileOutside(path, folder))) files.push(path);
       }
     }
   }
@@ -120,9 +119,14 @@ function isIgnored(path: string, isFolder: boolean, ruleSets: readonly RuleSet[]
   return false;
 }
 
-function isFile(path: string): boolean {
+/**
+ * A link to a file counts as the file, unless the file is in the same folder tree: it would be there twice. Links to
+ * folders are not followed, they may go in circles.
+ */
+function leadsToFileOutside(link: string, folder: string): boolean {
   try {
-    return statSync(path).isFile();
+    const target = realpathSync(link);
+    return statSync(target).isFile() && !target.startsWith(realpathSync(folder) + sep);
   } catch {
     return false;
   }

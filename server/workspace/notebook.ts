@@ -2,14 +2,18 @@
  * All pages under one notebook root, analysed: the shared ground of editor and command. Same pages, settings and
  * facts, same findings in the same order.
  */
+import { LRUCache } from 'lru-cache';
 import type { Finding } from '../checks/finding.ts';
 import type { CompoundModel, EntryModel } from '../checks/model.ts';
 import { byPlace } from '../checks/run.ts';
 import type { Settings } from '../checks/settings.ts';
+import type { MarkdownPage } from '../notebook/markdown.ts';
 import type { Toolkit } from '../toolkit/toolkit.ts';
 import { createAnalysis, type Analysis } from './analysis.ts';
 import { FactDesk } from './fact-desk.ts';
 import { Addresses, buildPage, findingInText, rebased, type Page, type ReadBlock } from './page.ts';
+
+const mostUnderEdit = 8;
 
 export class Notebook {
   readonly settings: Settings;
@@ -17,6 +21,8 @@ export class Notebook {
   private readonly desk: FactDesk;
   private readonly addresses = new Addresses();
   private readonly pages = new Map<string, Page>();
+  /** How the pages under edit were parsed; others are hardly ever read twice. */
+  private readonly parsed = new LRUCache<string, MarkdownPage>({ max: mostUnderEdit });
   /** Findings that need all pages, by file. */
   private acrossPages: ReadonlyMap<string, readonly Finding[]> = new Map();
   /** Whether a page has changed since. */
@@ -33,7 +39,9 @@ export class Notebook {
   setPage(file: string, text: string): Page {
     const previous = this.pages.get(file);
     if (previous?.text === text) return previous;
-    const page = buildPage(text, this.analysis.findBlocks(text), previous, (block, source, lineOffsets) => {
+    const markdown = this.analysis.parse(text, this.parsed.get(file));
+    this.parsed.set(file, markdown);
+    const page = buildPage(text, markdown.blocks, previous, (block, source, lineOffsets) => {
       const address = this.addresses.take();
       const model = this.analysis.read(rebased(block, address));
       const read = { address, source, lineOffsets, model, findings: [], waits: false };

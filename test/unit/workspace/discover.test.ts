@@ -69,10 +69,12 @@ describe('finding notebook pages', () => {
     expect(found(root, 'drafts')).toEqual(['drafts/a.md', 'drafts/b/c.md']);
   });
 
-  it('follows links to files, not to folders', () => {
+  it('follows links to files elsewhere, not to folders or to files that it finds anyway', () => {
+    const elsewhere = tree({ 'shared.md': '' });
     const root = tree({ 'a/real.md': '' });
     symlinkSync(join(root, 'a'), join(root, 'a', 'loop'));
-    symlinkSync(join(root, 'a', 'real.md'), join(root, 'link.md'));
+    symlinkSync(join(root, 'a', 'real.md'), join(root, 'again.md'));
+    symlinkSync(join(elsewhere, 'shared.md'), join(root, 'link.md'));
     symlinkSync(join(root, 'nowhere.md'), join(root, 'broken.md'));
     expect(found(root)).toEqual(['a/real.md', 'link.md']);
   });

@@ -1,3 +1,5 @@
+import fc from 'fast-check';
+import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { defaultSettings } from '../../../server/checks/settings.ts';
 import type { Toolkit, ToolkitFacts } from '../../../server/toolkit/toolkit.ts';
@@ -112,5 +114,37 @@ describe('a notebook', () => {
     const silent = new Notebook({ ...defaultSettings, severity: { 'formula-mismatch': 'off' } }, undefined);
     silent.setPage('a.md', page);
     expect(checksIn(silent, 'a.md')).toEqual([]);
+  });
+
+  it('survives any text and any edit of a real page, its ranges always inside the text', () => {
+    const pages = ['02-floral-alcohols', '03-fruit-esters', '04-pentylbiphenyl'].map((name) =>
+      readFileSync(new URL(`../../../examples/linden-row/2026/${name}.md`, import.meta.url), 'utf8'),
+    );
+    const cuts = fc.tuple(
+      fc.constantFrom(...pages),
+      fc.nat(),
+      fc.nat(200),
+      fc.string({ unit: 'binary', maxLength: 12 }),
+    );
+    const broken = cuts.map(([page, at, length, inserted]) => {
+      const start = at % page.length;
+      return page.slice(0, start) + inserted + page.slice(start + length);
+    });
+    const notebook = new Notebook(defaultSettings, undefined);
+    fc.assert(
+      fc.property(broken, (text) => {
+        notebook.setPage('a.md', text);
+        for (const { range, message, check, fixes } of notebook.findings('a.md')) {
+          const ranges = [range, ...fixes.flatMap((fix) => fix.edits.map((edit) => edit.range))];
+          for (const { start, end } of ranges) {
+            expect(start).toBeGreaterThanOrEqual(0);
+            expect(end).toBeGreaterThanOrEqual(start);
+            expect(end).toBeLessThanOrEqual(text.length);
+          }
+          expect(`${check}: ${message}`).not.toMatch(/broke down/);
+        }
+      }),
+      { seed: 1, numRuns: 150 },
+    );
   });
 });
