@@ -31,11 +31,12 @@ export function freeChoices(
     });
   }
   const leaders = [...new Set(leader)].filter((of) => of >= 0).sort((first, second) => first - second);
+  const place = leader.map((of) => 2 ** leaders.indexOf(of));
   return {
     count: leaders.length,
     valuesOf: (number) =>
       leader.map((of, index) => {
-        const value = of === -1 || Math.floor(number / 2 ** leaders.indexOf(of)) % 2 === 1;
+        const value = of === -1 || Math.floor(number / place[index]!) % 2 === 1;
         return value !== against[index];
       }),
   };

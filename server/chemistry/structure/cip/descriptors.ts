@@ -9,7 +9,7 @@ import type { Molecule, StereoElement, TetrahedralStereo } from '../molecule.ts'
 import { AuxiliaryLetters, ligandBranches } from './auxiliary.ts';
 import { Ranker, type Ranking } from './rank.ts';
 import { constitutionalRanker, type DescriptorLetter } from './rules.ts';
-import { type Branch, CipTree, TreeTooLarge } from './tree.ts';
+import { type Branch, CipTree, type StepBudget, stepBudget, TreeTooLarge } from './tree.ts';
 import { centreLetter, endsLetter } from './unit-letter.ts';
 
 export type { DescriptorLetter } from './rules.ts';
@@ -24,7 +24,8 @@ export interface Descriptor {
 export function cipDescriptors(molecule: Molecule): Descriptor[] {
   if (molecule.stereo.length === 0) return [];
   const kinds = bondKinds(molecule);
-  return molecule.stereo.map((element) => ({ element, letter: letterOf(molecule, element, kinds) }));
+  const budget = stepBudget();
+  return molecule.stereo.map((element) => ({ element, letter: letterOf(molecule, element, kinds, budget) }));
 }
 
 /** The letter of one arrangement as if it stood in the molecule, whose own statements count for the ligands. */
@@ -32,15 +33,16 @@ export function letterOf(
   molecule: Molecule,
   element: StereoElement,
   kinds: readonly number[] = bondKinds(molecule),
+  budget: StepBudget = stepBudget(),
 ): DescriptorLetter | undefined {
   try {
     switch (element.kind) {
       case 'tetrahedral':
-        return letterOfCentre(molecule, element, kinds);
+        return letterOfCentre(molecule, element, kinds, budget);
       case 'double-bond':
       case 'axis': {
-        const first = rankingAtEnd(molecule, element.ends[0], kinds);
-        const second = first && rankingAtEnd(molecule, element.ends[1], kinds);
+        const first = rankingAtEnd(molecule, element.ends[0], kinds, budget);
+        const second = first && rankingAtEnd(molecule, element.ends[1], kinds, budget);
         return first && second && endsLetter(element, [first, second]);
       }
       default:
@@ -56,8 +58,9 @@ function letterOfCentre(
   molecule: Molecule,
   element: TetrahedralStereo,
   kinds: readonly number[],
+  budget: StepBudget,
 ): DescriptorLetter | undefined {
-  const tree = new CipTree(molecule, element.centre, kinds, true);
+  const tree = new CipTree(molecule, element.centre, kinds, true, budget);
   const letters = new AuxiliaryLetters(molecule, tree, constitutionalRanker(tree));
   const branches = ligandBranches(tree, tree.root).filter(
     ({ node }) => node.atom < 0 || element.ligands.includes(node.atom),
@@ -97,8 +100,13 @@ function letterByReference(
 }
 
 /** The ligands at one end of a double bond, cumulene or axis, or undefined when they rank alike. */
-function rankingAtEnd(molecule: Molecule, end: number, kinds: readonly number[]): Ranking | undefined {
-  const tree = new CipTree(molecule, end, kinds);
+function rankingAtEnd(
+  molecule: Molecule,
+  end: number,
+  kinds: readonly number[],
+  budget: StepBudget,
+): Ranking | undefined {
+  const tree = new CipTree(molecule, end, kinds, false, budget);
   const branches = ligandBranches(tree, tree.root).filter(
     ({ node }) => !isDoublyBound(molecule, end, node.atom),
   );

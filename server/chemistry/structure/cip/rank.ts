@@ -30,6 +30,7 @@ export class Ranker {
   readonly ruleCount: number;
   private readonly firstOwn: number;
   private readonly profiles = new Map<Branch, number[][][]>();
+  private readonly groups = new Map<Branch, (readonly (readonly Branch[])[])[]>();
 
   constructor(
     readonly tree: CipTree,
@@ -66,15 +67,11 @@ export class Ranker {
     if (own !== undefined && !isKey(own)) return own.compare(first, second);
     if (own === undefined && this.below !== undefined) return this.below.compareBy(rule, first, second);
     for (let depth = 0; ; depth++) {
+      this.tree.step();
       const one = this.profile(first, rule, depth);
       const sign = compareLists(one, this.profile(second, rule, depth));
       if (sign !== 0 || one.length === 0) return sign;
     }
-  }
-
-  private comparesNodes(rule: number): boolean {
-    const own = this.ownRule(rule);
-    return own === undefined ? this.below!.comparesNodes(rule) : isKey(own);
   }
 
   private ownRule(rule: number): NodeKey | BranchRule | undefined {
@@ -97,7 +94,7 @@ export class Ranker {
     const key = this.ownRule(rule) as NodeKey;
     this.tree.step();
     if (depth === 0) return [key(branch.node)];
-    const onward = this.sorted(this.tree.onward(branch), rule, depth - 1);
+    const onward = this.sorted(branch, rule, depth - 1);
     if (depth === 1) return [...onward.map(({ node }) => key(node)), endOfSet];
     const values: number[] = [];
     for (const next of onward) for (const value of this.profile(next, rule, depth - 1)) values.push(value);
@@ -105,21 +102,43 @@ export class Ranker {
     return values;
   }
 
-  /** By all rules before this one, then by this one as far as the spheres that are being compared. */
-  private sorted(branches: readonly Branch[], rule: number, depth: number): readonly Branch[] {
-    if (branches.length < 2) return branches;
-    return [...branches].sort((first, second) => {
-      for (let earlier = 0; earlier < rule; earlier++) {
-        // Rules about whole branches count at the root only.
-        if (!this.comparesNodes(earlier)) continue;
-        const sign = this.compareBy(earlier, first, second);
-        if (sign !== 0) return -sign;
-      }
-      for (let at = 0; at <= depth; at++) {
-        const sign = compareLists(this.profile(first, rule, at), this.profile(second, rule, at));
-        if (sign !== 0) return -sign;
-      }
-      return 0;
+  /** The onward branches by all rules before this one, then by this one as far as the spheres that are being compared. */
+  private sorted(branch: Branch, rule: number, depth: number): readonly Branch[] {
+    return this.groupsBefore(branch, rule).flatMap((group) => {
+      if (group.length < 2) return group;
+      return [...group].sort((first, second) => {
+        for (let at = 0; at <= depth; at++) {
+          this.tree.step();
+          const sign = compareLists(this.profile(first, rule, at), this.profile(second, rule, at));
+          if (sign !== 0) return -sign;
+        }
+        return 0;
+      });
+    });
+  }
+
+  /** The onward branches in sets that the rules before this one leave tied, highest first. */
+  private groupsBefore(branch: Branch, rule: number): readonly (readonly Branch[])[] {
+    if (this.below !== undefined && rule <= this.firstOwn) return this.below.groupsBefore(branch, rule);
+    if (rule === 0) return [this.tree.onward(branch)];
+    let ofBranch = this.groups.get(branch);
+    if (ofBranch === undefined) this.groups.set(branch, (ofBranch = []));
+    return (ofBranch[rule] ??= this.refined(this.groupsBefore(branch, rule - 1), rule - 1));
+  }
+
+  private refined(groups: readonly (readonly Branch[])[], rule: number): readonly (readonly Branch[])[] {
+    const own = this.ownRule(rule)!;
+    // Rules about whole branches count at the root only.
+    if (!isKey(own) || groups.every((group) => group.length < 2)) return groups;
+    return groups.flatMap((group) => {
+      const order = [...group].sort((first, second) => -this.compareBy(rule, first, second));
+      const parts: Branch[][] = [];
+      order.forEach((each, index) => {
+        if (index > 0 && this.compareBy(rule, order[index - 1]!, each) === 0)
+          parts[parts.length - 1]!.push(each);
+        else parts.push([each]);
+      });
+      return parts;
     });
   }
 }

@@ -7,8 +7,17 @@ import { elementWithNumber } from '../../composition/elements.ts';
 import { bondKinds, RESONANT } from '../canonical-graph.ts';
 import type { Molecule } from '../molecule.ts';
 
-/** Nodes made and looked at after which a ranking is given up. */
+/** Steps of one ranking after which it is given up. */
 const stepLimit = 100_000;
+
+/** Steps that the rankings of one structure may take together. */
+export interface StepBudget {
+  left: number;
+}
+
+export function stepBudget(): StepBudget {
+  return { left: 400_000 };
+}
 
 export interface TreeNode {
   /** The atom of the molecule, also for a duplicate of it; −1 for an implied hydrogen. */
@@ -53,6 +62,7 @@ export class CipTree {
      * memory). So sulfoxides and phosphine oxides keep their letters when they are drawn with charges.
      */
     private readonly rootIsCentre = false,
+    private readonly budget = stepBudget(),
   ) {
     this.root = this.node(root, undefined, false, 0);
   }
@@ -72,7 +82,8 @@ export class CipTree {
   /** Counts the work of a search over this tree. */
   step(count = 1): void {
     this.steps += count;
-    if (this.steps > stepLimit) throw new TreeTooLarge();
+    this.budget.left -= count;
+    if (this.steps > stepLimit || this.budget.left < 0) throw new TreeTooLarge();
   }
 
   childrenOf(node: TreeNode): readonly TreeNode[] {
