@@ -2,9 +2,7 @@
  * From a text to its findings, step by step, for one notebook's settings: what `notebook.ts` caches and what it
  * runs again are the results of these steps.
  */
-import { LRUCache } from 'lru-cache';
 
-import type { NameReading } from '../chemistry/nomenclature/reading.ts';
 import type { Molecule } from '../chemistry/structure/molecule.ts';
 import { readSmiles } from '../chemistry/structure/read-smiles.ts';
 import type { Read } from '../chemistry/text.ts';
@@ -17,6 +15,7 @@ import { readEntry } from '../notebook/entries.ts';
 import { parseMarkdown, type MarkdownPage } from '../notebook/markdown.ts';
 import type { Block, ValueReaders } from '../notebook/model.ts';
 import { readName } from './name-reader.ts';
+import { remembering } from './remembering.ts';
 
 export interface Analysis {
   /** What `previous` has of the same text is not parsed again; the result is the same without it. */
@@ -31,37 +30,19 @@ export interface Analysis {
 export function createAnalysis(settings: Settings): Analysis {
   return {
     parse: parseMarkdown,
-    read: (block) => sharedByStructure(modelOf(readEntry(block, rememberingReaders), settings)),
+    read: (block) => sharedByStructure(modelOf(readEntry(block, readers), settings)),
     check: analyseEntry,
     checkAcross: (files) => analyseNotebook({ files, settings }),
   };
 }
 
-/** Names and structures recur: the same solvents and reagents in every entry, the same text at every keystroke. */
-const mostRemembered = 5000;
-
-/** Longer texts are rare, dear to keep and never the same twice. */
-const longestRemembered = 2000;
-
 /** What was read depends on the text alone, so all notebooks share it. */
-const rememberingReaders: ValueReaders = {
+const readers: ValueReaders = {
   readSmiles: remembering<Read<Molecule>>(readSmiles, (text, message) => ({
     problem: { range: { start: 0, end: text.length }, message },
   })),
-  readName: remembering<NameReading>(readName, (text, message) => ({
-    kind: 'unknown',
-    stoppedAt: 0,
-    range: { start: 0, end: text.length },
-    message,
-    suggestions: [],
-  })),
+  readName,
 };
-
-/** Readers do not throw; should one do so all the same, it must not take the other entries with it. */
-function breakdown(error: unknown): string {
-  const reason = error instanceof Error ? error.message : String(error);
-  return `The program broke down on this text (${reason}) and says nothing of it; please report it.`;
-}
 
 /** What follows from a structure alone, however many entries have it. Gone with the structure itself. */
 const ofStructure = new WeakMap<Molecule, Map<string, unknown>>();
@@ -69,7 +50,7 @@ const ofStructure = new WeakMap<Molecule, Map<string, unknown>>();
 const derivedFromStructure = ['structureSmiles', 'stereo'] as const;
 
 /**
- * Equal SMILES texts are one molecule here (see `rememberingReaders`), so the dear things that a model works out
+ * Equal SMILES texts are one molecule here (see `readers`), so the dear things that a model works out
  * from its structure when they are asked for are worked out once for all its entries.
  */
 function sharedByStructure(model: EntryModel): EntryModel {
@@ -89,27 +70,4 @@ function sharedByStructure(model: EntryModel): EntryModel {
     Object.defineProperty(model, property, { get, enumerable: true });
   }
   return model;
-}
-
-function remembering<T extends object>(
-  read: (text: string) => T,
-  broken: (text: string, message: string) => T,
-): (text: string) => T {
-  const known = new LRUCache<string, T>({ max: mostRemembered });
-  const safely = (text: string) => {
-    try {
-      return read(text);
-    } catch (error) {
-      return broken(text, breakdown(error));
-    }
-  };
-  return (text) => {
-    if (text.length > longestRemembered) return safely(text);
-    let value = known.get(text);
-    if (value === undefined) {
-      value = safely(text);
-      known.set(text, value);
-    }
-    return value;
-  };
 }
