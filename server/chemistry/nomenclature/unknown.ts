@@ -57,5 +57,20 @@ function nearest(word: string, vocabulary: readonly string[]): string[] {
     if (distance <= limit && distance > 0) scored.push({ known, distance });
   }
   scored.sort((a, b) => a.distance - b.distance || (a.known < b.known ? -1 : 1));
-  return [...new Set(scored.map((one) => one.known))].slice(0, 3);
+  const whole = [...new Set(scored.map((one) => one.known))].slice(0, 3);
+  return whole.length > 0 ? whole : withBeginningMended(word, vocabulary);
+}
+
+/** Words run together in names: the beginning alone may be misspelt by a letter, as in metylpropan. */
+function withBeginningMended(word: string, vocabulary: readonly string[]): string[] {
+  const mended: { text: string; length: number }[] = [];
+  for (const known of vocabulary) {
+    if (known.length < 4 || known.length >= word.length) continue;
+    for (const length of [known.length - 1, known.length, known.length + 1]) {
+      if (length >= word.length || leven(word.slice(0, length), known) !== 1) continue;
+      mended.push({ text: known + word.slice(length), length: known.length });
+    }
+  }
+  mended.sort((a, b) => b.length - a.length || (a.text < b.text ? -1 : 1));
+  return [...new Set(mended.map((one) => one.text))].slice(0, 3);
 }

@@ -87,7 +87,7 @@ export function createLexicon(): Lexicon {
   const list: string[] = [];
   const put = (word: string, value: Word) => {
     add(words, word, value);
-    if (word.length > 2) list.push(word);
+    if (word.length > 2) list.push(...shownForms(word, value));
   };
   for (let count = 2; count <= 30; count++) {
     put(numericalTerm(count), { kind: 'multiplier', count, grouped: false });
@@ -153,6 +153,20 @@ export function createLexicon(): Lexicon {
     if (suffix.name.length > 2) list.push(suffix.name);
   }
   return { words, suffixes: endings, list };
+}
+
+/** A word as people write it: `methyl` and `methane` for the stem, `toluene` with its final e. */
+function shownForms(word: string, value: Word): string[] {
+  if (value.kind === 'alkane') return value.size > 30 ? [] : [`${word}yl`, `${word}ane`, `${word}oxy`];
+  if (value.kind === 'branched') return [`${word}yl`];
+  if (value.kind === 'acid')
+    return value.form === 'acid' ? [`${word}ic acid`, `${word}ate`] : [`${word}amide`];
+  if (value.kind !== 'ring' && value.kind !== 'parent') return [word];
+  const silent =
+    /(?:furan|pyran|phenol|cresol|thymol|catechol|resorcinol|glycerol|glycol|naphthol|[^nl])$/.test(word);
+  return [
+    silent || /(?:guaiacol|pinacol|gallol|glucinol|carvacrol|acetal|glyoxal)$/.test(word) ? word : `${word}e`,
+  ];
 }
 
 /** Names with siblings (`xylene`) stand for all of them, and with `o-`, `m-`, `p-` or `ortho-` … for one. */
