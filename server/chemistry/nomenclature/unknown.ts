@@ -56,7 +56,11 @@ function nearest(word: string, vocabulary: readonly string[]): string[] {
     const distance = leven(word, known);
     if (distance <= limit && distance > 0) scored.push({ known, distance });
   }
-  scored.sort((a, b) => a.distance - b.distance || (a.known < b.known ? -1 : 1));
+  // Whoever misspells a word mostly gets its first letter right.
+  const begins = (known: string) => (known[0] === word[0] ? 0 : 1);
+  scored.sort(
+    (a, b) => a.distance - b.distance || begins(a.known) - begins(b.known) || (a.known < b.known ? -1 : 1),
+  );
   const whole = [...new Set(scored.map((one) => one.known))].slice(0, 3);
   return whole.length > 0 ? whole : withBeginningMended(word, vocabulary);
 }
@@ -71,6 +75,7 @@ function withBeginningMended(word: string, vocabulary: readonly string[]): strin
       mended.push({ text: known + word.slice(length), length: known.length });
     }
   }
-  mended.sort((a, b) => b.length - a.length || (a.text < b.text ? -1 : 1));
+  const begins = (text: string) => (text[0] === word[0] ? 0 : 1);
+  mended.sort((a, b) => begins(a.text) - begins(b.text) || b.length - a.length || (a.text < b.text ? -1 : 1));
   return [...new Set(mended.map((one) => one.text))].slice(0, 3);
 }

@@ -18,7 +18,7 @@ function understood(name: string): UnderstoodName {
 }
 
 describe('a name with one structure', () => {
-  test.each([
+  test.each<[rule: string, name: string, smiles: string, open?: boolean]>([
     ['P-21.2.1', 'dodecane', 'CCCCCCCCCCCC'],
     ['P-29.4.1', '4-ethyl-2-methylhexane', 'CC(C)CC(CC)CC'],
     ['P-29.6.1', '4-(propan-2-yl)heptane', 'CCCC(C(C)C)CCC'],
