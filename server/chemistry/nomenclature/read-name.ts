@@ -6,6 +6,8 @@ import type { NameReading, NameRemark, Reading } from './reading.ts';
 import { completedName, meaningsOf, type Described, type Meaning } from './readings.ts';
 import { createCommonNames, type CommonNames } from './common-names.ts';
 import { arrangedReading } from './arrange.ts';
+import { isLongestChain } from './build/proper-chain.ts';
+import { improperRemark, properAlkaneName } from './proper-name.ts';
 import { unknownName } from './unknown.ts';
 import { ItemReader } from './words/items.ts';
 import { createLexicon, type Lexicon } from './words/lexicon.ts';
@@ -84,6 +86,12 @@ function read(text: string, limits: NameLimits, lexicon: Lexicon, common: Common
     const complete = (described: readonly Described[]) =>
       completed(text, prepared, meaning, meanings.length > 1, described);
     const arranged = arrangedReading(complete, meaning.molecule, meaning.draft, prepared, limits);
+    for (const chain of meaning.draft.chains) {
+      if (!chain.plain || isLongestChain(chain, meaning.draft)) continue;
+      const proper = properAlkaneName(meaning.molecule);
+      const remark = improperRemark(chain.range, prepared, text, proper);
+      remarks.set('improper', remark);
+    }
     for (const remark of arranged.remarks)
       remarks.set(`${String(remark.range.start)} ${remark.message}`, remark);
     return arranged.reading;

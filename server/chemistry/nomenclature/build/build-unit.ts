@@ -85,6 +85,11 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
       atoms: atoms.filter((atom) => draft.atoms[atom]!.atomicNumber === 6),
       principal,
       open: places.opened,
+      plain:
+        draft.owner.depth === 0 &&
+        built.free.length === 0 &&
+        unit.unsaturations.length === 0 &&
+        unit.replacements.length === 0,
       range: unit.range,
     });
   }

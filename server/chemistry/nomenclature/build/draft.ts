@@ -39,6 +39,8 @@ export interface ChainClaim {
   readonly principal: readonly number[];
   /** The places on it were chosen here, not given by the name. */
   readonly open: boolean;
+  /** Parent of a whole word, saturated, so that the rule of the longest chain is not in dispute. */
+  readonly plain: boolean;
   readonly range: TextRange;
 }
 

@@ -207,3 +207,26 @@ it.each([
 ])('is bounded on long nonsense %#', (text) => {
   expect(readName(text).kind).toBe('unknown');
 });
+
+it.each([
+  ['2-ethylpentane', '3-methylhexane'],
+  ['2-ethyl-4-methylpentane', '2,4-dimethylhexane'],
+  ['1-chloro-1-methylpropane', '2-chlorobutane'],
+  ['3-propylbutane', '3-methylhexane'],
+])('%s is improper for %s', (name, proper) => {
+  const read = readName(name);
+  if (read.kind !== 'understood') throw new Error(read.kind);
+  expect(read.remarks).toMatchObject([{ kind: 'improper', fixes: [{ edits: [{ newText: proper }] }] }]);
+  expect(canonicalSmiles(readingsOf(proper)[0]!.molecule)).toBe(canonicalSmiles(read.readings[0]!.molecule));
+});
+
+it.each([
+  '3-methylhexane',
+  '2-propylpentanoic acid',
+  '2-ethylbut-1-ene',
+  'methylpropane',
+  '4-(1-methylethyl)heptane',
+])('%s is not called improper', (name) => {
+  const read = readName(name);
+  expect(read.kind === 'understood' && read.remarks).toEqual([]);
+});
