@@ -8,7 +8,7 @@ import { bondKinds, type CanonicalGraph, canonicalGraph, RESONANT } from './cano
 import { initialColouring } from './canonical-refine.ts';
 import { canonicalLabelling } from './canonical-search.ts';
 import { IMPLICIT_LIGAND, type Molecule, type StereoElement, withStereo } from './molecule.ts';
-import { connectedParts } from './rings.ts';
+import { connectedParts, smallestRingThrough } from './rings.ts';
 
 /** The elements of `molecule.stereo` that matter, in their order. The molecule must be in its normal spelling. */
 export function effectiveStereo(molecule: Molecule): StereoElement[] {
@@ -22,13 +22,8 @@ export function effectiveStereo(molecule: Molecule): StereoElement[] {
     const { colours } = initialColouring(graph, { steps: 0 });
     graph.atoms.forEach((atom, vertex) => (classes[atom] = colours[vertex]!));
   }
-  // A double bond that another Kekulé form moves away has no sides of its own.
   let kept = molecule.stereo.filter(
-    (element) =>
-      element.kind !== 'double-bond' ||
-      !molecule.neighbours[element.ends[0]]!.some(
-        ({ atom, bond }) => atom === element.ends[1] && kinds[bond] === RESONANT,
-      ),
+    (element) => element.kind !== 'double-bond' || hasSides(molecule, element.ends, kinds),
   );
   // Dropping one statement can make another meaningless, so this goes on until nothing changes.
   for (let before = -1; before !== kept.length;) {
@@ -42,6 +37,16 @@ export function effectiveStereo(molecule: Molecule): StereoElement[] {
     }
   }
   return kept;
+}
+
+/**
+ * A double bond that another Kekulé form moves away has no sides of its own, and in a ring of fewer than eight atoms
+ * there is only one way for it to be.
+ */
+function hasSides(molecule: Molecule, ends: readonly [number, number], kinds: readonly number[]): boolean {
+  const link = molecule.neighbours[ends[0]]!.find(({ atom }) => atom === ends[1]);
+  if (link === undefined) return true;
+  return kinds[link.bond] !== RESONANT && smallestRingThrough(molecule, link.bond, 7) === undefined;
 }
 
 /** Exchanges of ligands that would turn the statement round, as pairs of lists: these ligands onto those. */

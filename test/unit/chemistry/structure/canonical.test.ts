@@ -24,6 +24,7 @@ describe('one compound in several spellings', () => {
     ['written hydrogens', '[H]C([H])([H])O[H]', 'CO'],
     ['bond shift in o-xylene', 'CC1=C(C)C=CC=C1', 'CC1=CC=CC=C1C'],
     ['azulene', 'c1ccc2cccc2cc1', 'C1=CC=C2C=CC=C2C=C1'],
+    ['a double bond in a small ring', 'O=C1/C=C\\C(=O)O1', 'O=C1C=CC(=O)O1'],
     ['parts in another order', '[Na+].[Cl-]', '[Cl-].[Na+]'],
   ])('%s', (_title, first, second) => {
     expect(canonical(first)).toBe(canonical(second));
