@@ -14,8 +14,7 @@ if (!existsSync(join(root, 'dist', 'client.cjs'))) {
 const extensionTestsPath = await bundleSuite();
 try {
   await runTests({
-    // The oldest one that package.json promises to run in.
-    version: process.env.VSCODE_VERSION ?? '1.91.1',
+    version: process.env.VSCODE_VERSION ?? 'stable',
     extensionDevelopmentPath: root,
     extensionTestsPath,
     launchArgs: [

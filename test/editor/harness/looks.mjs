@@ -3,7 +3,7 @@
 // pictures for human eyes.
 import { mkdirSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
-import { hover, leave, openInWorkbench, rest, squiggleUnder } from './page.mjs';
+import { hover, leave, openInWorkbench, rest, restUntilDrawn, squiggleUnder } from './page.mjs';
 import { screenshotFolder } from './paths.mjs';
 import { writeFolderSettings } from './workbench.mjs';
 
@@ -23,7 +23,6 @@ const leastContrast = 3;
  */
 async function drawingInHover(page) {
   const picture = page.locator(`${hover} img`).first();
-  await picture.waitFor();
   return picture.evaluate(async (img) => {
     await img.decode();
     const canvas = document.createElement('canvas');
@@ -69,7 +68,9 @@ async function drawingInHover(page) {
 export async function checkLooks(tally, browser, workbench, extension, folder, file) {
   rmSync(screenshotFolder, { recursive: true, force: true });
   mkdirSync(screenshotFolder, { recursive: true });
-  const shoot = (page, name) => page.screenshot({ path: join(screenshotFolder, `${name}.png`) });
+  // Hovers fade in; the picture is of the end of it.
+  const shoot = (page, name, clip) =>
+    page.screenshot({ path: join(screenshotFolder, `${name}.png`), animations: 'disabled', clip });
   writeFolderSettings(folder, { 'workbench.colorTheme': themes[0].name });
   const page = await openInWorkbench(browser, workbench, folder, file, {
     extensionDevelopmentPath: workbench.uriOf(extension),
@@ -92,7 +93,7 @@ export async function checkLooks(tally, browser, workbench, extension, folder, f
     await tally.test(`look: the drawing stands out in a ${kind} theme, changed while running`, async () => {
       writeFolderSettings(folder, { 'workbench.colorTheme': name });
       await page.locator(`.monaco-workbench.${bodyClass}`).waitFor();
-      await rest(page, 'COc1ccc(cc1)C(C)O');
+      await restUntilDrawn(page, 'COc1ccc(cc1)C(C)O');
       const drawing = await drawingInHover(page);
       await shoot(page, `hover-${kind}`);
       await leave(page);
@@ -134,7 +135,6 @@ async function showPage(page, folder, shoot) {
   await page.locator('.monaco-workbench.vs').waitFor();
   await page.keyboard.press('Control+b');
   await page.locator('.monaco-editor .minimap').waitFor({ state: 'hidden' });
-  await rest(page, 'COc1ccc(cc1)C(C)O');
-  await drawingInHover(page);
-  await shoot(page, 'page');
+  await restUntilDrawn(page, 'COc1ccc(cc1)C(C)O');
+  await shoot(page, 'page', { x: 0, y: 35, width: 840, height: 650 });
 }

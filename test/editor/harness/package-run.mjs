@@ -1,7 +1,7 @@
 // What users get: the extension packed, installed into an editor that knows nothing of this repository, and used.
 import { readdirSync, statSync } from 'node:fs';
 import { join } from 'node:path';
-import { hover, openInWorkbench, rest, squiggleUnder } from './page.mjs';
+import { openInWorkbench, restUntilDrawn, squiggleUnder } from './page.mjs';
 import { cache, root } from './paths.mjs';
 import { output } from './processes.mjs';
 import { installExtension, scratchFolder, Workbench } from './workbench.mjs';
@@ -58,8 +58,7 @@ export async function checkPackage(tally, browser, editor, folder, file) {
     const workbench = await Workbench.start(editor, { extensionsFolder });
     const page = await openInWorkbench(browser, workbench, folder, file);
     await squiggleUnder(page, 'CC(C)(C)(C)C', 1);
-    await rest(page, 'COc1ccc(cc1)C(C)O');
-    await page.locator(`${hover} img`).first().waitFor();
+    await restUntilDrawn(page, 'COc1ccc(cc1)C(C)O');
     await page.close();
     await workbench.stop();
   });

@@ -66,6 +66,25 @@ export async function rest(page, text, character = Math.floor(text.length / 2)) 
 
 export const hover = '.monaco-hover:not(.hidden)';
 
+/**
+ * Rests the mouse on a text until the hover has a picture: the first hovers after a start come without, while the
+ * toolkit is loading, and a person comes back to the word.
+ */
+export async function restUntilDrawn(page, text) {
+  const picture = page.locator(`${hover} img`).first();
+  const deadline = Date.now() + patienceMs;
+  do {
+    await rest(page, text);
+    const drawn = await picture.waitFor({ timeout: 4000 }).then(
+      () => true,
+      () => false,
+    );
+    if (drawn) return;
+    await leave(page);
+  } while (Date.now() < deadline);
+  throw new Error(`the hover on ${text} never had a drawing`);
+}
+
 export async function leave(page) {
   await page.keyboard.press('Escape');
   await page.mouse.move(5, 5, { steps: 4 });
