@@ -36,7 +36,8 @@ show(
 
 const molecules = texts.map((smiles) => readSmiles(smiles).value!);
 const canonical = timed(5, () => {
-  for (const molecule of molecules) canonicalSmiles(molecule);
+  // A new object each time: the canonical form of a molecule is remembered.
+  for (const molecule of molecules) canonicalSmiles({ ...molecule, bonds: [...molecule.bonds] });
 });
 show('our canonical SMILES', perMolecule(canonical), 'µs a structure');
 const descriptors = timed(3, () => {
