@@ -16,7 +16,6 @@ const shared = {
   platform: 'node',
   target: 'node20',
   minify: !watch,
-  keepNames: true,
   sourcemap: watch ? 'inline' : false,
   legalComments: 'linked',
   logLevel: 'warning',

@@ -8,7 +8,7 @@ import { installExtension, scratchFolder, Workbench } from './workbench.mjs';
 
 const limitBytes = 12_000_000;
 const allowed =
-  /^(?:dist\/|syntaxes\/|client\/icon\.png$|README\.md$|readme\.md$|LICENSE\.txt$|package\.json$|\.vsixmanifest$)/;
+  /^(?:dist\/|syntaxes\/|client\/icon\.png$|examples\/linden-row\/editor\.png$|README\.md$|readme\.md$|LICENSE\.txt$|package\.json$|\.vsixmanifest$)/;
 
 function filesUnder(folder) {
   return readdirSync(folder, { recursive: true, withFileTypes: true })
