@@ -6,6 +6,7 @@ import { symbolOf } from '../composition/elements.ts';
 import { range, type Problem } from '../text.ts';
 import { maximumMatching } from './kekulize.ts';
 import type { Atom, Bond, MoleculeBuilder } from './molecule.ts';
+import { cyclicBonds } from './rings.ts';
 import type { Mutable, SmilesDraft } from './read-smiles.ts';
 import { usualValences } from './valence-model.ts';
 
@@ -14,9 +15,10 @@ export function settleAromatic(draft: SmilesDraft): Problem | undefined {
   const { atoms, bonds } = builder;
   if (!atoms.some((atom) => atom.aromatic)) return undefined;
 
-  const bridges = bridgesAmong(builder, perhapsAromatic);
-  for (const index of perhapsAromatic) {
-    if (!bridges.has(index)) (bonds[index] as Mutable<Bond>).aromatic = true;
+  // An unmarked bond is aromatic on a ring of such bonds, and single between two rings (biphenyl).
+  if (perhapsAromatic.size > 0) {
+    const inCycle = cyclicBonds(builder, (bond) => perhapsAromatic.has(bond) || bonds[bond]!.aromatic);
+    for (const index of perhapsAromatic) (bonds[index] as Mutable<Bond>).aromatic = inCycle[index]!;
   }
 
   const vertexOf = new Map<number, number>();
@@ -64,44 +66,6 @@ function doubleBondNeed({ builder, implied }: SmilesDraft, index: number): 'need
   const valence = valences.find((usual) => usual >= bonds);
   // A valence that is full leaves a lone pair (pyrrole, furan) or an empty orbital (borole) for the ring.
   return valence === undefined || valence === bonds ? 'none' : 'needed';
-}
-
-/** The bonds of `among` that lie on no ring made of such bonds and of those written aromatic. */
-function bridgesAmong(builder: MoleculeBuilder, among: ReadonlySet<number>): Set<number> {
-  const usable = (bond: number) => among.has(bond) || builder.bonds[bond]!.aromatic;
-  const { atoms, neighbours } = builder;
-  const order = new Int32Array(atoms.length).fill(-1);
-  const low = new Int32Array(atoms.length);
-  const by = new Int32Array(atoms.length);
-  const next = new Int32Array(atoms.length);
-  const bridges = new Set<number>();
-  const stack: number[] = [];
-  let clock = 0;
-  for (let root = 0; root < atoms.length; root++) {
-    if (order[root] !== -1 || !atoms[root]!.aromatic) continue;
-    order[root] = low[root] = clock++;
-    by[root] = -1;
-    stack.push(root);
-    while (stack.length > 0) {
-      const atom = stack[stack.length - 1]!;
-      const neighbour = neighbours[atom]![next[atom]!++];
-      if (neighbour === undefined) {
-        stack.pop();
-        const below = stack[stack.length - 1];
-        if (below === undefined) continue;
-        if (low[atom]! < low[below]!) low[below] = low[atom]!;
-        if (low[atom]! > order[below]!) bridges.add(by[atom]!);
-      } else if (neighbour.bond !== by[atom] && usable(neighbour.bond)) {
-        const seen = order[neighbour.atom]!;
-        if (seen === -1) {
-          order[neighbour.atom] = low[neighbour.atom] = clock++;
-          by[neighbour.atom] = neighbour.bond;
-          stack.push(neighbour.atom);
-        } else if (seen < low[atom]!) low[atom] = seen;
-      }
-    }
-  }
-  return bridges;
 }
 
 function cannotKekulize(builder: MoleculeBuilder, atom: number): Problem {

@@ -3,6 +3,7 @@
  * in the order in which the text shows them: the atom before, the implied hydrogen, ring closures, branches.
  */
 import { range, type Problem } from '../text.ts';
+import { doubleBondNeighbours, walkCumulene, type CumuleneEnd } from './cumulene.ts';
 import { IMPLICIT_LIGAND, type MoleculeBuilder, type PolyhedralStereo } from './molecule.ts';
 import type { SmilesDraft } from './read-smiles.ts';
 
@@ -55,11 +56,11 @@ function settleChirality(draft: SmilesDraft, atom: number, statement: string): v
   }
   const ends = cumuleneEnds(builder, atom);
   if (ends !== undefined) {
-    const [first, second] = ends.map((end) => ligandsInTextOrder(draft, end.atom, [end.inward]));
-    if (first?.length === 2 && second?.length === 2 && builder.atoms[ends[0].atom]!.hydrogens < 2) {
+    const [first, second] = ends.map(({ end, inward }) => ligandsInTextOrder(draft, end, [inward]));
+    if (first?.length === 2 && second?.length === 2 && builder.atoms[ends[0].end]!.hydrogens < 2) {
       builder.stereo.push({
         kind: 'axis',
-        ends: [ends[0].atom, ends[1].atom],
+        ends: [ends[0].end, ends[1].end],
         ligands: [first[0]!, first[1]!, second[0]!, second[1]!],
         clockwise,
       });
@@ -95,49 +96,19 @@ function settlePolyhedron(
   else draft.builder.stereo.push({ kind, centre, ligands, permutation: Number(statement.slice(3)) });
 }
 
-interface CumuleneEnd {
-  readonly atom: number;
-  /** Its neighbour inside the cumulene. */
-  readonly inward: number;
-}
-
 /** The two ends of the cumulene whose middle atom this is, if it is one. */
 function cumuleneEnds(
   builder: MoleculeBuilder,
   middle: number,
 ): readonly [CumuleneEnd, CumuleneEnd] | undefined {
-  const doubles = doubleNeighbours(builder, middle);
+  const doubles = doubleBondNeighbours(builder, middle);
   if (doubles.length !== 2 || builder.neighbours[middle]!.length !== 2) return undefined;
   const [first, second] = doubles.sort(
     (one, other) => builder.atoms[one]!.range.start - builder.atoms[other]!.range.start,
   );
   const left = walkCumulene(builder, middle, first!);
   const right = walkCumulene(builder, middle, second!);
-  return left.length === right.length ? [left.end, right.end] : undefined;
-}
-
-function doubleNeighbours(builder: MoleculeBuilder, atom: number): number[] {
-  return builder.neighbours[atom]!.filter((neighbour) => builder.bonds[neighbour.bond]!.order === 2).map(
-    (neighbour) => neighbour.atom,
-  );
-}
-
-/** Follows double bonds from `from` through `through` until the chain ends. */
-function walkCumulene(
-  builder: MoleculeBuilder,
-  from: number,
-  through: number,
-): { end: CumuleneEnd; length: number } {
-  let inward = from;
-  let atom = through;
-  for (let length = 1; ; length++) {
-    const onward = doubleNeighbours(builder, atom).filter((next) => next !== inward);
-    if (onward.length !== 1 || builder.neighbours[atom]!.length !== 2 || length > builder.atoms.length) {
-      return { end: { atom, inward }, length };
-    }
-    inward = atom;
-    atom = onward[0]!;
-  }
+  return left.length === right.length ? [left, right] : undefined;
 }
 
 /** 1 when the ligand at the other side of the bond lies above the atom, −1 below, undefined when nothing is said. */
@@ -156,16 +127,16 @@ function settleDirections(draft: SmilesDraft): Problem | undefined {
     const right = walkCumulene(builder, bond.from, bond.to);
     const doubles = left.length + right.length - 1;
     // Each cumulene once, from its first bond; an even number of double bonds has an axis, not sides.
-    if (doubles % 2 === 0 || (left.length > 1 && left.end.atom !== bond.from)) continue;
-    const first = referenceLigand(draft, left.end);
-    const second = referenceLigand(draft, right.end);
+    if (doubles % 2 === 0 || left.length > 1) continue;
+    const first = referenceLigand(draft, left);
+    const second = referenceLigand(draft, right);
     // With nothing said at one end, slashes at the other belong to the double bonds beyond it.
     if (first === undefined || second === undefined) continue;
     if ('message' in first) return first;
     if ('message' in second) return second;
     builder.stereo.push({
       kind: 'double-bond',
-      ends: [left.end.atom, right.end.atom],
+      ends: [left.end, right.end],
       ligands: [first.ligand, second.ligand],
       sameSide: first.side === second.side,
     });
@@ -175,12 +146,12 @@ function settleDirections(draft: SmilesDraft): Problem | undefined {
 
 function referenceLigand(
   draft: SmilesDraft,
-  end: CumuleneEnd,
+  { end, inward }: CumuleneEnd,
 ): { ligand: number; side: 1 | -1 } | Problem | undefined {
   let found: { ligand: number; side: 1 | -1; bond: number } | undefined;
-  for (const { atom, bond } of draft.builder.neighbours[end.atom]!) {
-    if (atom === end.inward) continue;
-    const side = sideOf(draft, end.atom, bond);
+  for (const { atom, bond } of draft.builder.neighbours[end]!) {
+    if (atom === inward) continue;
+    const side = sideOf(draft, end, bond);
     if (side === undefined) continue;
     if (found !== undefined && found.side === side) {
       const place = draft.builder.bonds[bond]!.range;

@@ -1,10 +1,20 @@
 /** Which bonds lie in rings, and how small those rings are. */
 import type { Molecule } from './molecule.ts';
 
-/** For each bond whether it is part of a cycle. Iterative search for bridges (Tarjan 1974), linear in the bonds. */
-export function ringBonds(molecule: Molecule): boolean[] {
-  const { atoms, bonds, neighbours } = molecule;
-  const inRing = new Array<boolean>(bonds.length).fill(true);
+/** For each bond whether it is part of a cycle. */
+export function ringBonds(molecule: Pick<Molecule, 'atoms' | 'bonds' | 'neighbours'>): boolean[] {
+  return cyclicBonds(molecule, () => true);
+}
+
+/**
+ * For each bond whether it is part of a cycle of usable bonds; false for the others. Iterative search for bridges
+ * (Tarjan 1974), linear in the bonds.
+ */
+export function cyclicBonds(
+  { atoms, bonds, neighbours }: Pick<Molecule, 'atoms' | 'bonds' | 'neighbours'>,
+  isUsable: (bond: number) => boolean,
+): boolean[] {
+  const inCycle = bonds.map((_, bond) => isUsable(bond));
   const order = new Int32Array(atoms.length).fill(-1);
   const low = new Int32Array(atoms.length);
   const next = new Int32Array(atoms.length);
@@ -23,8 +33,8 @@ export function ringBonds(molecule: Molecule): boolean[] {
         const below = stack[stack.length - 1];
         if (below === undefined) continue;
         if (low[atom]! < low[below]!) low[below] = low[atom]!;
-        if (low[atom]! > order[below]!) inRing[by[atom]!] = false;
-      } else if (neighbour.bond !== by[atom]) {
+        if (low[atom]! > order[below]!) inCycle[by[atom]!] = false;
+      } else if (neighbour.bond !== by[atom] && isUsable(neighbour.bond)) {
         const seen = order[neighbour.atom]!;
         if (seen === -1) {
           order[neighbour.atom] = low[neighbour.atom] = clock++;
@@ -34,12 +44,7 @@ export function ringBonds(molecule: Molecule): boolean[] {
       }
     }
   }
-  return inRing;
-}
-
-/** For each atom whether one of its bonds is in a ring. */
-export function ringAtoms(molecule: Molecule, inRing: readonly boolean[] = ringBonds(molecule)): boolean[] {
-  return molecule.neighbours.map((list) => list.some((neighbour) => inRing[neighbour.bond]));
+  return inCycle;
 }
 
 /**

@@ -11,6 +11,7 @@
  * covered.
  */
 import { bondKinds, RESONANT } from './canonical-graph.ts';
+import { walkCumulene } from './cumulene.ts';
 import type { Molecule } from './molecule.ts';
 import { ringBonds, smallestRingThrough } from './rings.ts';
 
@@ -49,8 +50,8 @@ export function stereoCandidates(molecule: Molecule): StereoCandidate[] {
   for (let index = 0; index < molecule.bonds.length; index++) {
     const bond = molecule.bonds[index]!;
     if (bond.order !== 2 || kinds[index] === RESONANT) continue;
-    const left = walk(molecule, bond.to, bond.from);
-    const right = walk(molecule, bond.from, bond.to);
+    const left = walkCumulene(molecule, bond.to, bond.from);
+    const right = walkCumulene(molecule, bond.from, bond.to);
     // Each cumulene once, from its first double bond.
     if (left.length > 1) continue;
     const doubles = right.length;
@@ -147,22 +148,6 @@ function hasTwinOfDoubleBond(molecule: Molecule, centre: number): boolean {
           (other.atom.hydrogens > 0 || other.atom.charge < 0),
       ),
   );
-}
-
-/** Follows double bonds from `from` through `through`; `length` counts the bonds walked. */
-function walk(
-  molecule: Molecule,
-  from: number,
-  through: number,
-): { end: number; inward: number; length: number } {
-  let [inward, end] = [from, through];
-  for (let length = 1; ; length++) {
-    const neighbours = molecule.neighbours[end]!;
-    const onward = neighbours.find(({ atom, bond }) => atom !== inward && molecule.bonds[bond]!.order === 2);
-    if (onward === undefined || neighbours.length !== 2 || length > molecule.atoms.length)
-      return { end, inward, length };
-    [inward, end] = [end, onward.atom];
-  }
 }
 
 /** The two ligands at an end, −1 for a hydrogen or lone pair; undefined where an end cannot tell its sides apart. */
