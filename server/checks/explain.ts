@@ -2,6 +2,7 @@
 import type { Check } from './finding.ts';
 import { checks } from './index.ts';
 
+/** Undefined when there is no such check. */
 export function checkWithId(id: string): Check | undefined {
   return checks.find((check) => check.id === id);
 }

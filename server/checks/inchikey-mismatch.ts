@@ -1,5 +1,6 @@
 /** Recorded InChIKey against the structure. */
 import { canonicalSmiles } from '../chemistry/structure/canonical-smiles.ts';
+import { mirrorImage } from '../chemistry/structure/stereo-mirror.ts';
 import { enumerateStereoisomers } from '../chemistry/structure/stereoisomers.ts';
 import type { ToolkitFactsOf } from './facts.ts';
 import type { Check } from './finding.ts';
@@ -9,7 +10,6 @@ import {
   leavesStereoOpenOnPurpose,
   type DefiniteStructure,
 } from './shared/identity.ts';
-import { mirrorImageSmiles } from './shared/mirror-image.ts';
 import { inDocument, replacement } from './shared/values.ts';
 
 /** Stereoisomers whose keys are looked up. */
@@ -74,7 +74,7 @@ export const check: Check = {
     }
     const asDrawn = factsAsDrawn(structure, toolkit);
     if (asDrawn === 'pending' || (asDrawn !== 'unavailable' && asDrawn.inchiKey === recorded)) return;
-    const mirror = toolkit(mirrorImageSmiles(structure.molecule));
+    const mirror = toolkit(canonicalSmiles(mirrorImage(structure.molecule)));
     if (mirror === 'pending') return;
     const isMirror = mirror !== 'unavailable' && mirror.inchiKey === recorded;
     const isPossible =

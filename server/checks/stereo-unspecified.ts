@@ -1,6 +1,7 @@
 /** An entry that should be one stereoisomer, and whose structure or name leaves open which. */
 import type { Reading, Stereoisomer } from '../chemistry/nomenclature/reading.ts';
 import { canonicalSmiles } from '../chemistry/structure/canonical-smiles.ts';
+import { mirrorImage } from '../chemistry/structure/stereo-mirror.ts';
 import type { StereoisomerList } from '../chemistry/structure/stereoisomers.ts';
 import type { Fix } from '../chemistry/text.ts';
 import { insertionFor } from '../notebook/insertion.ts';
@@ -8,7 +9,6 @@ import type { ToolkitFactsOf } from './facts.ts';
 import type { Check, Report } from './finding.ts';
 import type { CompoundModel } from './model.ts';
 import { sameConstitution } from './shared/constitution.ts';
-import { mirrorImageSmiles } from './shared/mirror-image.ts';
 import { lettersAt, placesInWords, rangeOfPlace } from './shared/stereo-places.ts';
 import { stereoFixes } from './shared/stereo-fixes.ts';
 import { inDocument, listed, quoted, replacement } from './shared/values.ts';
@@ -169,7 +169,7 @@ function isPair(isomers: StereoisomerList['isomers'], count: number | undefined)
     count === 2 &&
     first !== undefined &&
     second !== undefined &&
-    mirrorImageSmiles(first) === canonicalSmiles(second)
+    canonicalSmiles(mirrorImage(first)) === canonicalSmiles(second)
   );
 }
 

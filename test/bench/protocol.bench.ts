@@ -1,4 +1,6 @@
 /** The built server as an editor meets it: start, first findings, a keystroke, hovers. */
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import { pathToFileURL } from 'node:url';
 import { Session } from '../protocol/session.ts';
 import { generatedNotebook } from '../support/generated-notebook.ts';
@@ -6,7 +8,7 @@ import { figuresOf, show } from './figures.ts';
 
 const text = generatedNotebook(300);
 const lines = text.split('\n');
-const uri = pathToFileURL('/tmp/isonym-bench/notebook.md').href;
+const uri = pathToFileURL(join(tmpdir(), 'isonym-bench', 'notebook.md')).href;
 
 const starts: number[] = [];
 for (let round = 0; round < 7; round++) {

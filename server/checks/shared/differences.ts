@@ -36,6 +36,7 @@ export function usualDifference(first: Composition, second: Composition): string
   return undefined;
 }
 
+/** What the difference suggests: `The difference is 2 × D for H: perhaps one of them is …`. */
 export function sentence(counterpart: Counterpart, times: number): string {
   const amount =
     times === 1 ? counterpart.difference : `${Number(times.toFixed(3))} × ${counterpart.difference}`;

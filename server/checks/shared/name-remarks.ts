@@ -3,6 +3,7 @@ import type { NameRemark } from '../../chemistry/nomenclature/reading.ts';
 import type { Check } from '../finding.ts';
 import { fixInDocument, inDocument } from './values.ts';
 
+/** The `run` of a check that passes on what the naming engine remarks about a name. */
 export function reportRemarks(kind: NameRemark['kind']): NonNullable<Check['run']> {
   return (model, report) => {
     if (model.kind !== 'compound' || model.entry.name === undefined) return;

@@ -2,11 +2,10 @@
 import { canonicalForm } from '../../chemistry/structure/canonical-form.ts';
 import { canonicalSmiles } from '../../chemistry/structure/canonical-smiles.ts';
 import { cipDescriptors } from '../../chemistry/structure/cip/descriptors.ts';
-import type { Molecule, StereoElement } from '../../chemistry/structure/molecule.ts';
+import { atomsOfPlace, type Molecule, type StereoElement } from '../../chemistry/structure/molecule.ts';
+import { mirrorImage } from '../../chemistry/structure/stereo-mirror.ts';
 import type { Reading } from '../../chemistry/nomenclature/reading.ts';
 import { enumerateStereoisomers } from '../../chemistry/structure/stereoisomers.ts';
-import { mirrorImageSmiles } from './mirror-image.ts';
-import { atomsOf } from './stereo-places.ts';
 
 /** More stereoisomers than this are not compared one by one. */
 const mostCompared = 64;
@@ -24,6 +23,7 @@ export function readingKeys(reading: Reading): ReadonlySet<string> | undefined {
   return new Set(reading.stereoisomers.map((isomer) => canonicalSmiles(isomer.molecule)));
 }
 
+/** Whether both hold one structure. */
 export function meet(first: ReadonlySet<string>, second: ReadonlySet<string>): boolean {
   return [...first].some((key) => second.has(key));
 }
@@ -32,7 +32,7 @@ export function meet(first: ReadonlySet<string>, second: ReadonlySet<string>): b
 export function areMirrored(structure: Molecule, reading: Reading): boolean {
   const keys = readingKeys(reading);
   const { isomers } = enumerateStereoisomers(structure, mostCompared);
-  return keys !== undefined && isomers.some((isomer) => keys.has(mirrorImageSmiles(isomer)));
+  return keys !== undefined && isomers.some((isomer) => keys.has(canonicalSmiles(mirrorImage(isomer))));
 }
 
 export interface Disagreement {
@@ -72,7 +72,7 @@ export function disagreements(
 
 function placeKey(element: StereoElement, rank: Int32Array): string {
   return String(
-    atomsOf(element)
+    atomsOfPlace(element)
       .map((atom) => rank[atom]!)
       .sort((first, second) => first - second),
   );

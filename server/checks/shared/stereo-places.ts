@@ -1,23 +1,19 @@
 /** Stereogenic places in words and in the text of the SMILES. */
 import { letterOf } from '../../chemistry/structure/cip/descriptors.ts';
 import type { StereoCandidate } from '../../chemistry/structure/stereo-candidates.ts';
-import type { Molecule, StereoElement } from '../../chemistry/structure/molecule.ts';
+import { atomsOfPlace, type Molecule, type StereoElement } from '../../chemistry/structure/molecule.ts';
 import type { TextRange } from '../../chemistry/text.ts';
 
 export type Place = StereoCandidate | StereoElement;
 
-/** The atoms of a place: the centre, or the two ends. */
-export function atomsOf(place: Place): readonly number[] {
-  return 'centre' in place ? [place.centre] : place.ends;
-}
-
+/** Whether both stand at the same atoms. */
 export function samePlace(first: Place, second: Place): boolean {
-  return String([...atomsOf(first)].sort()) === String([...atomsOf(second)].sort());
+  return String([...atomsOfPlace(first)].sort()) === String([...atomsOfPlace(second)].sort());
 }
 
 /** From the first to the last of its atoms in the text. */
 export function rangeOfPlace(molecule: Molecule, place: Place): TextRange {
-  const ranges = atomsOf(place).map((atom) => molecule.atoms[atom]!.range);
+  const ranges = atomsOfPlace(place).map((atom) => molecule.atoms[atom]!.range);
   return {
     start: Math.min(...ranges.map((range) => range.start)),
     end: Math.max(...ranges.map((range) => range.end)),

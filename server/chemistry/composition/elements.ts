@@ -54,6 +54,7 @@ const bySymbol: ReadonlyMap<string, Element> = new Map(
   byNumber.flatMap((element) => (element === undefined ? [] : [[element.symbol, element] as const])),
 );
 
+/** By its symbol in proper capitals, `Na`; undefined for anything else. */
 export function elementWithSymbol(symbol: string): Element | undefined {
   return bySymbol.get(symbol);
 }

@@ -53,6 +53,7 @@ export function readFormula(text: string): Read<Composition> {
   return read.problem === undefined ? { value: read.value.composition } : { problem: read.problem };
 }
 
+/** The same with every piece and part in its place, for whoever has to point at one. */
 export function readFormulaDetailed(text: string): Read<FormulaReading> {
   const reader = new FormulaReader(text);
   const problem = reader.read();

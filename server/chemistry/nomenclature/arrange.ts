@@ -1,7 +1,8 @@
 /** Settles a reading's arrangement in space from the descriptors of its name, and lists what they leave open. */
 import { assignDescriptors } from '../structure/assign-descriptors.ts';
 import { cipDescriptors } from '../structure/cip/descriptors.ts';
-import type { Molecule, StereoElement } from '../structure/molecule.ts';
+import { atomsOfPlace, type Molecule } from '../structure/molecule.ts';
+import { mirrorImage } from '../structure/stereo-mirror.ts';
 import { enumerateStereoisomers, type StereoisomerList } from '../structure/stereoisomers.ts';
 import type { Draft, Owner } from './build/draft.ts';
 import type { Described } from './readings.ts';
@@ -18,6 +19,10 @@ export interface Arranged {
   readonly remarks: readonly NameRemark[];
 }
 
+/**
+ * The reading of one structure that a name means: `complete` writes the name with descriptors, `draft` says where in the
+ * name its atoms are named (undefined for a name taken whole). Descriptors that say nothing become remarks.
+ */
 export function arrangedReading(
   complete: Complete,
   molecule: Molecule,
@@ -76,7 +81,7 @@ export function arrangedReading(
   }
   const bare = isomers.length === 1 && relative.length > 0 ? isomers[0]! : list.molecule;
   if (racemic && isomers.length === 1) {
-    const mirror = mirrored(isomers[0]!);
+    const mirror = mirrorImage(isomers[0]!);
     return { reading: openReading(complete, molecule, [isomers[0]!, mirror], 2, cap, draft), remarks };
   }
   const open = isomers.length > 1 || (count ?? 2) > 1 ? isomers : [];
@@ -121,12 +126,12 @@ function describedName(
   before: Molecule,
   draft: Draft | undefined,
 ): string {
-  const stated = new Set(before.stereo.map((element) => elementAtoms(element).join(' ')));
+  const stated = new Set(before.stereo.map((element) => atomsOfPlace(element).join(' ')));
   const units = new Map<Owner, { text: string; number: number }[]>();
   const all: string[] = [];
   let told = true;
   for (const { element, letter } of cipDescriptors(isomer)) {
-    const atoms = elementAtoms(element);
+    const atoms = atomsOfPlace(element);
     if (stated.has(atoms.join(' '))) continue;
     all.push(letter ?? '?');
     const places = atoms.flatMap((atom) => draft?.named.get(atom) ?? []);
@@ -155,21 +160,6 @@ function describedName(
 function numberOf(locant: string | undefined): number {
   const number = Number.parseInt(locant ?? '', 10);
   return Number.isNaN(number) ? 1000 : number;
-}
-
-function elementAtoms(element: StereoElement): readonly number[] {
-  return 'ends' in element ? element.ends : [element.centre];
-}
-
-function mirrored(molecule: Molecule): Molecule {
-  return {
-    ...molecule,
-    stereo: molecule.stereo.map((element) =>
-      element.kind === 'tetrahedral' || element.kind === 'axis'
-        ? { ...element, clockwise: !element.clockwise }
-        : element,
-    ),
-  };
 }
 
 /** The single place of a unit, or of the whole, that a descriptor without locant can be about. */

@@ -6,7 +6,7 @@ import { canonicalForm } from './canonical-form.ts';
 import { bondKinds } from './canonical-graph.ts';
 import { isOddPermutation } from './canonical-stereo.ts';
 import { type DescriptorLetter, letterOf } from './cip/descriptors.ts';
-import { type Molecule, type StereoElement, withStereo } from './molecule.ts';
+import { atomsOfPlace, type Molecule, type StereoElement, withStereo } from './molecule.ts';
 import { type StereoCandidate, stereoCandidates } from './stereo-candidates.ts';
 import { elementFor } from './stereo-elements.ts';
 
@@ -108,9 +108,7 @@ function holds(candidate: StereoCandidate, atom: number, letter: DescriptorLette
 }
 
 function placeOf(element: StereoElement): string {
-  return 'centre' in element
-    ? String(element.centre)
-    : [...element.ends].sort((first, second) => first - second).join('=');
+  return [...atomsOfPlace(element)].sort((first, second) => first - second).join('=');
 }
 
 /** A ligand of a ring atom, as in “the methyl group at C1”. */

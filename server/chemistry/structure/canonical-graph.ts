@@ -3,7 +3,8 @@
  * arrangements. The canonical labelling works on this.
  */
 import { resonantBonds } from './resonance.ts';
-import type { Bond, Molecule, StereoElement } from './molecule.ts';
+import { atomsOfPlace, type Bond, type Molecule, type StereoElement } from './molecule.ts';
+import { mappedElement } from './stereo-elements.ts';
 
 export interface CanonicalGraph {
   /** Atoms of the molecule, by vertex. */
@@ -66,43 +67,7 @@ export function canonicalGraph(
     options.stereo === false
       ? []
       : molecule.stereo
-          .map((element) => renumbered(element, vertex, vertexOf, whole))
-          .filter((element) => element !== undefined);
+          .filter((element) => whole || vertexOf.has(atomsOfPlace(element)[0]!))
+          .map((element) => mappedElement(element, vertex));
   return { atoms: members, colours, links, stereo };
-}
-
-function renumbered(
-  element: StereoElement,
-  vertex: (atom: number) => number,
-  vertexOf: ReadonlyMap<number, number>,
-  whole: boolean,
-): StereoElement | undefined {
-  const place = 'centre' in element ? element.centre : element.ends[0];
-  if (!whole && !vertexOf.has(place)) return undefined;
-  switch (element.kind) {
-    case 'tetrahedral': {
-      const [a, b, c, d] = element.ligands;
-      return {
-        ...element,
-        centre: vertex(element.centre),
-        ligands: [vertex(a), vertex(b), vertex(c), vertex(d)],
-      };
-    }
-    case 'double-bond':
-      return {
-        ...element,
-        ends: [vertex(element.ends[0]), vertex(element.ends[1])],
-        ligands: [vertex(element.ligands[0]), vertex(element.ligands[1])],
-      };
-    case 'axis': {
-      const [a, b, c, d] = element.ligands;
-      return {
-        ...element,
-        ends: [vertex(element.ends[0]), vertex(element.ends[1])],
-        ligands: [vertex(a), vertex(b), vertex(c), vertex(d)],
-      };
-    }
-    default:
-      return { ...element, centre: vertex(element.centre), ligands: element.ligands.map(vertex) };
-  }
 }

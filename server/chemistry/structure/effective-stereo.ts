@@ -7,7 +7,7 @@
 import { bondKinds, type CanonicalGraph, canonicalGraph, RESONANT } from './canonical-graph.ts';
 import { initialColouring } from './canonical-refine.ts';
 import { canonicalLabelling } from './canonical-search.ts';
-import { IMPLICIT_LIGAND, type Molecule, type StereoElement, withStereo } from './molecule.ts';
+import { atomsOfPlace, IMPLICIT_LIGAND, type Molecule, type StereoElement, withStereo } from './molecule.ts';
 import { connectedParts, smallestRingThrough } from './rings.ts';
 
 /** The elements of `molecule.stereo` that matter, in their order. The molecule must be in its normal spelling. */
@@ -129,13 +129,13 @@ function hasSymmetry(
   element: StereoElement,
   [from, to]: Swap,
 ): boolean {
-  const [place] = placesOf(element);
+  const [place] = atomsOfPlace(element);
   const members = connectedParts(molecule).find((part) => part.includes(place!))!;
   const graph = canonicalGraph(molecule, members, kinds);
   const vertexOf = new Map(members.map((atom, vertex) => [atom, vertex]));
   const ownColours = [...new Set(graph.colours)].sort((first, second) => first - second);
   const colourOf = new Map(ownColours.map((colour, index) => [colour, index]));
-  const fixed = [place!, ...molecule.stereo.flatMap(placesOf)];
+  const fixed = [place!, ...molecule.stereo.flatMap(atomsOfPlace)];
   if (from.some((ligand, index) => ligand !== to[index] && fixed.includes(ligand))) return false;
   const marked = (atoms: readonly number[]) => {
     const colours = graph.colours.map((colour) => colourOf.get(colour)!);
@@ -148,8 +148,4 @@ function hasSymmetry(
     return canonicalLabelling({ ...graph, colours } satisfies CanonicalGraph).certificate.join(' ');
   };
   return marked(from) === marked(to);
-}
-
-function placesOf(element: StereoElement): readonly number[] {
-  return 'centre' in element ? [element.centre] : element.ends;
 }

@@ -169,6 +169,13 @@ export function bondBetween(molecule: Molecule, first: number, second: number): 
   return found && molecule.bonds[found.bond];
 }
 
+/** The atoms at which an arrangement stands: its centre, or its two ends. */
+export function atomsOfPlace(
+  place: { readonly centre: number } | { readonly ends: readonly [number, number] },
+): readonly number[] {
+  return 'centre' in place ? [place.centre] : place.ends;
+}
+
 /** The same atoms and bonds with other stereo statements. */
 export function withStereo(molecule: Molecule, stereo: readonly StereoElement[]): Molecule {
   return { atoms: molecule.atoms, bonds: molecule.bonds, neighbours: molecule.neighbours, stereo };

@@ -1,6 +1,6 @@
 /** A stereoisomer in the words of a name: `2R,3S`, and whether it is meso. */
 import { cipDescriptors, type DescriptorLetter } from './cip/descriptors.ts';
-import type { Molecule, StereoElement } from './molecule.ts';
+import { atomsOfPlace, type Molecule } from './molecule.ts';
 import { isOwnMirrorImage } from './stereo-mirror.ts';
 
 export interface StereoWords {
@@ -24,7 +24,7 @@ export function describeStereo(
   const letters = new Set(descriptors.map(({ letter }) => letter));
   const described = descriptors.flatMap(({ element, letter }) => {
     if (letter === undefined) return [];
-    const [locant = ''] = atomsOf(element)
+    const [locant = ''] = atomsOfPlace(element)
       .map((atom) => locantOf(atom) ?? '')
       .sort(byLocant);
     return [{ locant, text: `${locant}${words[letter] ?? letter}` }];
@@ -35,10 +35,6 @@ export function describeStereo(
     // Without opposite centres it is achiral, not meso: cis-1,4-dimethylcyclohexane.
     meso: letters.has('R') && letters.has('S') && isOwnMirrorImage(molecule),
   };
-}
-
-function atomsOf(element: StereoElement): readonly number[] {
-  return 'centre' in element ? [element.centre] : element.ends;
 }
 
 /** Numbers before letters, 3 before 3a before 10, plain before primed. */

@@ -11,7 +11,7 @@ import { type StereoCandidate, stereoCandidates } from './stereo-candidates.ts';
 import { type FreeChoices, freeChoices } from './stereo-choices.ts';
 import { elementFor, valueAt } from './stereo-elements.ts';
 import { leastEquivalents, symmetryMoves } from './stereo-symmetry.ts';
-import { type Molecule, type StereoElement, withStereo } from './molecule.ts';
+import { atomsOfPlace, type Molecule, type StereoElement, withStereo } from './molecule.ts';
 import { normalise } from './normalise.ts';
 
 export interface StereogenicUnit {
@@ -124,14 +124,10 @@ function distinctCandidates(molecule: Molecule): StereoCandidate[] {
   let candidates = stereoCandidates(molecule);
   for (let before = -1; before !== candidates.length;) {
     before = candidates.length;
-    const places = candidates.flatMap(placesOf);
+    const places = candidates.flatMap(atomsOfPlace);
     candidates = candidates.filter((candidate) => !isIdle(molecule, candidate, classes, places));
   }
   return candidates;
-}
-
-function placesOf(candidate: StereoCandidate): readonly number[] {
-  return candidate.kind === 'tetrahedral' ? [candidate.centre] : candidate.ends;
 }
 
 function isIdle(
@@ -140,7 +136,7 @@ function isIdle(
   classes: Int32Array,
   places: readonly number[],
 ): boolean {
-  const own = placesOf(candidate);
+  const own = atomsOfPlace(candidate);
   const groups =
     candidate.kind === 'tetrahedral'
       ? [{ hub: candidate.centre, ligands: candidate.ligands }]

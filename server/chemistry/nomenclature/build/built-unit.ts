@@ -12,6 +12,7 @@ export interface BuiltUnit {
   readonly sites: number[];
 }
 
+/** Says that a locant names no place of its parent. */
 export function noSuchPlace(locant: Locant): string {
   return `The parent has no position ${locant}. Check the locant, or the parent's name.`;
 }

@@ -5,6 +5,7 @@ import type { Choices } from './choices.ts';
 import type { Draft } from './draft.ts';
 import { groupSkeleton } from './group-skeleton.ts';
 
+/** Puts a suffix on its places, chosen where the name leaves them open; false when that cannot be. */
 export function placeEnding(ending: Ending, built: BuiltUnit, draft: Draft, choices: Choices): boolean {
   const atoms = endingAtoms(ending, built, draft, choices);
   if (!atoms) return false;
@@ -23,6 +24,7 @@ export function placeEnding(ending: Ending, built: BuiltUnit, draft: Draft, choi
   return draft.failure === undefined;
 }
 
+/** Says that an atom cannot take one more group. */
 export function fifthBond(built: BuiltUnit, atom: number): string {
   const locant = built.places.locantOf(atom);
   return `The atom${locant === undefined ? '' : ` at position ${locant}`} has no valence left for this group. Check the locants.`;

@@ -1,6 +1,5 @@
 /** A whole name as words: substitutive names alone, or joined by function words, ions and adducts (P-51.3). */
 import { adducts, cations, functionWords } from '../vocabulary/functions.ts';
-import type { Unit } from '../tree.ts';
 import type { ItemReader, Stretch } from './items.ts';
 import { numericalTerm } from '../vocabulary/numbers.ts';
 
@@ -134,15 +133,4 @@ function* plainWords(lower: string, offset: number): Generator<Part & { end: num
     const oxime = ends('oxime');
     if (oxime !== undefined) yield { kind: 'oxime', start: offset, end: oxime };
   }
-}
-
-/** The unit with the endings changed; used for oximes and anhydrides. */
-export function withEndings(
-  unit: Unit,
-  change: (ending: Unit['endings'][number]) => Unit['endings'][number] | undefined,
-): Unit | undefined {
-  const endings = unit.endings.map(change);
-  return endings.some((one) => one === undefined)
-    ? undefined
-    : { ...unit, endings: endings as Unit['endings'] };
 }
