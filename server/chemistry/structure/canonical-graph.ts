@@ -53,12 +53,11 @@ export function canonicalGraph(
   const colours = members.map((index) => {
     const atom = molecule.atoms[index]!;
     const isotope = options.isotopes === false ? 0 : atom.isotope;
-    // Every member is small: the packing is exact well within 53 bits.
-    return (
-      (((atom.atomicNumber * 512 + isotope) * 64 + (atom.charge + 32)) * 32 + Math.min(atom.hydrogens, 31)) *
-        64 +
-      Math.min(molecule.neighbours[index]!.length, 63)
-    );
+    // Multiplied, not shifted: 118 elements, mass numbers and hydrogens below 2^17 as the reader bounds them, charges
+    // within ±31 and the degree stay exact within 53 bits.
+    const nuclide = atom.atomicNumber * 2 ** 17 + isotope;
+    const charged = nuclide * 64 + (atom.charge + 32);
+    return (charged * 2 ** 17 + atom.hydrogens) * 64 + Math.min(molecule.neighbours[index]!.length, 63);
   });
   const links = members.map((index) =>
     molecule.neighbours[index]!.map(({ atom, bond }) => ({ vertex: vertex(atom), kind: kinds[bond]! })),

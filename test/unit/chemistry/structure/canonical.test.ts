@@ -34,6 +34,9 @@ describe('one compound in several spellings', () => {
 test('tautomers and isotopologues stay apart', () => {
   expect(canonical('Oc1ccccn1')).not.toBe(canonical('O=c1cccc[nH]1'));
   expect(canonical('C[2H]')).not.toBe(canonical('C'));
+  // Absurd numbers are read, so they must not spill into their neighbours: key and key, not name and name.
+  expect(canonicalForm(molecule('[512C]')).key).not.toBe(canonicalForm(molecule('[N]')).key);
+  expect(canonicalForm(molecule('[CH40]')).key).not.toBe(canonicalForm(molecule('[CH35]')).key);
 });
 
 describe('symmetric structures', () => {
