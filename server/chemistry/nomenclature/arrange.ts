@@ -1,12 +1,12 @@
 /** Settles a reading's arrangement in space from the descriptors of its name, and lists what they leave open. */
 import { assignDescriptors } from '../structure/assign-descriptors.ts';
 import { cipDescriptors } from '../structure/cip/descriptors.ts';
-import { atomsOfPlace, type Molecule } from '../structure/molecule.ts';
+import { atomsOfPlace, type Molecule, withStereo } from '../structure/molecule.ts';
 import { mirrorImage } from '../structure/stereo-mirror.ts';
 import { enumerateStereoisomers, type StereoisomerList } from '../structure/stereoisomers.ts';
 import type { Draft, Owner } from './build/draft.ts';
 import type { Described } from './readings.ts';
-import { relativeFilter } from './relative.ts';
+import { relativeStatement, type RelativeStatement } from './relative.ts';
 import type { NameRemark, Reading } from './reading.ts';
 import type { StereoWord } from './tree.ts';
 import type { PreparedName } from './words/prepared.ts';
@@ -42,6 +42,8 @@ export function arrangedReading(
     });
   };
   let settled = molecule;
+  /** Atoms whose descriptors the name spells out. */
+  const spelt = new Set<number>();
   let racemic = false;
   const relative: { word: StereoWord; atoms: readonly number[] }[] = [];
   if (draft && draft.wanted.length + draft.loose.length > 0) {
@@ -62,6 +64,7 @@ export function arrangedReading(
       }
     }
     const asked = wanted.map(({ atom, word }) => ({ atom, letter: word.letter as Letter }));
+    for (const { atom } of asked) spelt.add(atom);
     const { molecule: assigned, refused } = assignDescriptors(molecule, asked);
     settled = assigned;
     for (const { index, reason } of refused)
@@ -70,14 +73,23 @@ export function arrangedReading(
   const list = enumerateStereoisomers(settled, Math.max(cap, 64));
   let isomers = list.isomers;
   let count = list.count;
-  for (const { word, atoms } of relative) {
-    const filter = relativeFilter(list, word.letter, atoms);
-    if (!filter)
-      remark(word, `“${word.letter}” says nothing about this structure, which has no two such arrangements.`);
-    else {
-      isomers = isomers.filter(filter);
-      count = isomers.length;
-    }
+  const statements = relative.flatMap(({ word, atoms }) => {
+    const statement = relativeStatement(list, word.letter, atoms);
+    if (statement) return [statement];
+    remark(word, `“${word.letter}” says nothing about this structure, which has no two such arrangements.`);
+    return [];
+  });
+  if (statements.length > 0) {
+    const agree = (isomer: Molecule) => statements.every(({ agrees }) => agrees(isomer));
+    isomers = isomers.filter(agree);
+    if (isomers.length === 0) isomers = isomersWithoutImplied(settled, statements, spelt, cap).filter(agree);
+    if (isomers.length === 0)
+      for (const { word } of relative)
+        remark(
+          word,
+          `“${word.letter}” contradicts the descriptors that the name gives; one of them is wrong.`,
+        );
+    count = isomers.length;
   }
   const bare = isomers.length === 1 && relative.length > 0 ? isomers[0]! : list.molecule;
   if (racemic && isomers.length === 1) {
@@ -86,6 +98,24 @@ export function arrangedReading(
   }
   const open = isomers.length > 1 || (count ?? 2) > 1 ? isomers : [];
   return { reading: openReading(complete, bare, open, count, cap, draft), remarks };
+}
+
+/**
+ * What a retained name implies gives way to what the whole name says: cinnamic acid is the trans acid, cis-cinnamic acid
+ * is not.
+ */
+function isomersWithoutImplied(
+  molecule: Molecule,
+  statements: readonly RelativeStatement[],
+  spelt: ReadonlySet<number>,
+  cap: number,
+): readonly Molecule[] {
+  const said = new Set(statements.flatMap(({ atoms }) => atoms));
+  const kept = molecule.stereo.filter((element) => {
+    const atoms = atomsOfPlace(element);
+    return atoms.some((atom) => spelt.has(atom)) || !atoms.some((atom) => said.has(atom));
+  });
+  return enumerateStereoisomers(withStereo(molecule, kept), Math.max(cap, 64)).isomers;
 }
 
 function openReading(

@@ -5,12 +5,19 @@ import { smallestRingThrough } from '../structure/rings.ts';
 import type { StereoisomerList } from '../structure/stereoisomers.ts';
 import type { StereoWord } from './tree.ts';
 
-/** A test for the isomers that agree with the word, or undefined when there is no place that it can be about. */
-export function relativeFilter(
+/** What `cis` or `trans` says of a structure. */
+export interface RelativeStatement {
+  /** The atoms whose arrangement it is about. */
+  readonly atoms: readonly number[];
+  readonly agrees: (isomer: Molecule) => boolean;
+}
+
+/** What the word says of the isomers, or undefined when there is no place that it can be about. */
+export function relativeStatement(
   list: StereoisomerList,
   letter: StereoWord['letter'],
   atoms: readonly number[],
-): ((isomer: Molecule) => boolean) | undefined {
+): RelativeStatement | undefined {
   if (letter !== 'cis' && letter !== 'trans') return undefined;
   const cis = letter === 'cis';
   const { molecule } = list;
@@ -23,7 +30,10 @@ export function relativeFilter(
   if (bond && centres.filter((one) => atoms.includes(one)).length < 2) {
     const ligands = bond.ends.map((end) => singleLigand(molecule, end, bond.ends));
     if (ligands.some((one) => one === undefined)) return undefined;
-    return (isomer) => onSameSideOfDoubleBond(isomer, bond.ends, ligands as [number, number]) === cis;
+    return {
+      atoms: bond.ends,
+      agrees: (isomer) => onSameSideOfDoubleBond(isomer, bond.ends, ligands as [number, number]) === cis,
+    };
   }
   const inUnit = centres.filter((one) => atoms.includes(one));
   const pair = inUnit.length === 2 ? inUnit : centres.length === 2 ? centres : undefined;
@@ -37,13 +47,16 @@ export function relativeFilter(
     return outside.length === 1 ? outside[0]! : undefined;
   });
   if (ligands.some((one) => one === undefined)) return undefined;
-  return (isomer) =>
-    onSameSideOfRing(
-      isomer,
-      ring,
-      { centre: pair[0]!, ligand: ligands[0]! },
-      { centre: pair[1]!, ligand: ligands[1]! },
-    ) === cis;
+  return {
+    atoms: pair,
+    agrees: (isomer) =>
+      onSameSideOfRing(
+        isomer,
+        ring,
+        { centre: pair[0]!, ligand: ligands[0]! },
+        { centre: pair[1]!, ligand: ligands[1]! },
+      ) === cis,
+  };
 }
 
 /** The only group, beside hydrogen, on one end of a double bond. */

@@ -109,6 +109,11 @@ describe('a name with several structures', () => {
 describe('descriptors', () => {
   test.each([
     ['(2R)-butan-2-ol', 'CC[C@@H](C)O'],
+    // P-65.1.1.2.2 (from memory): cinnamic acid by itself is the E acid; a prefix says otherwise.
+    ['cinnamic acid', 'OC(=O)/C=C/c1ccccc1'],
+    ['trans-cinnamic acid', 'OC(=O)/C=C/c1ccccc1'],
+    ['cis-cinnamic acid', 'OC(=O)/C=C\\c1ccccc1'],
+    ['cis-but-2-ene', 'C/C=C\\C'],
     ['(S)-butan-2-ol', 'CC[C@H](C)O'],
     ['(E)-but-2-ene', 'C/C=C/C'],
     ['(2Z)-but-2-ene', 'C/C=C\\C'],
