@@ -171,7 +171,6 @@ export class ItemReader {
           end,
         };
       }
-      return;
     }
     for (const word of wordsAt(this.lexicon.words, lower, from)) {
       if (word.value.kind === 'hydro')
