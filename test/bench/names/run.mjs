@@ -22,4 +22,5 @@ await build({
   packages: 'external',
   logLevel: 'warning',
 });
-process.exitCode = spawnSync(process.execPath, [outfile, ...process.argv.slice(2)], { stdio: 'inherit' }).status ?? 1;
+process.exitCode =
+  spawnSync(process.execPath, [outfile, ...process.argv.slice(2)], { stdio: 'inherit' }).status ?? 1;

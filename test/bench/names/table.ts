@@ -30,7 +30,8 @@ function keyOf(smiles: string): string {
 const keyOfMolecule = (molecule: Molecule) => keyOf(writeSmiles(molecule));
 const block = (key: string) => key.slice(0, 14);
 
-type Outcome = 'right' | 'right, stereo left open' | 'stereo differs' | 'among several' | 'wrong' | 'unknown' | 'mixture';
+type Outcome =
+  'right' | 'right, stereo left open' | 'stereo differs' | 'among several' | 'wrong' | 'unknown' | 'mixture';
 const order: readonly Outcome[] = [
   'right',
   'right, stereo left open',
@@ -67,13 +68,20 @@ function judge(name: string, smiles: string): Failure {
   if (same.key === wanted) return { outcome: 'right', name, smiles, cause };
   const open = same.one.stereoisomers;
   const among = open.length > 0 && open.some((isomer) => keyOfMolecule(isomer.molecule) === wanted);
-  return { outcome: among || open.length > 0 ? 'right, stereo left open' : 'stereo differs', name, smiles, cause };
+  return {
+    outcome: among || open.length > 0 ? 'right, stereo left open' : 'stereo differs',
+    name,
+    smiles,
+    cause,
+  };
 }
 
 const [target, ...files] = process.argv.slice(2);
 const failures: Failure[] = [];
 for (const file of files) {
-  const [heading, ...lines] = readFileSync(file, 'utf8').split(/\r?\n/).filter((line) => line !== '');
+  const [heading, ...lines] = readFileSync(file, 'utf8')
+    .split(/\r?\n/)
+    .filter((line) => line !== '');
   const columns = heading!.split('\t');
   const [nameAt, smilesAt] = [columns.indexOf('name'), columns.indexOf('smiles')];
   const tally = new Map<Outcome, number>();
@@ -97,15 +105,24 @@ for (const file of files) {
       causes.set(word, (causes.get(word) ?? 0) + 1);
     }
   }
-  console.log(`\n${file}: ${String(rows)} names, ${(time / rows).toFixed(3)} ms a name, ${((performance.now() - start) / 1000).toFixed(1)} s with the toolkit`);
+  console.log(
+    `\n${file}: ${String(rows)} names, ${(time / rows).toFixed(3)} ms a name, ${((performance.now() - start) / 1000).toFixed(1)} s with the toolkit`,
+  );
   for (const outcome of order) {
     const count = tally.get(outcome) ?? 0;
-    console.log(`  ${outcome.padEnd(24)} ${String(count).padStart(6)}  ${((100 * count) / rows).toFixed(2)} %`);
+    console.log(
+      `  ${outcome.padEnd(24)} ${String(count).padStart(6)}  ${((100 * count) / rows).toFixed(2)} %`,
+    );
   }
-  const constitution = (tally.get('right') ?? 0) + (tally.get('right, stereo left open') ?? 0) + (tally.get('stereo differs') ?? 0);
+  const constitution =
+    (tally.get('right') ?? 0) +
+    (tally.get('right, stereo left open') ?? 0) +
+    (tally.get('stereo differs') ?? 0);
   console.log(`  right constitution       ${((100 * constitution) / rows).toFixed(2)} %`);
   const often = [...causes].sort((a, b) => b[1] - a[1]).slice(0, 12);
-  console.log(`  stops most often at: ${often.map(([word, count]) => `${word} ${String(count)}`).join(', ')}`);
+  console.log(
+    `  stops most often at: ${often.map(([word, count]) => `${word} ${String(count)}`).join(', ')}`,
+  );
 }
 if (target !== undefined && target !== '-') {
   const lines = failures.map(({ outcome, name, smiles, cause }) => [outcome, name, smiles, cause].join('\t'));

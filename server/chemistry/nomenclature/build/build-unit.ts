@@ -14,6 +14,7 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
   if (unit.skeletons.length > 1 && skeleton.mark !== undefined) {
     draft.insertions.push({ at: unit.parentAt, text: skeleton.mark });
   }
+  draft.cost += skeleton.cost ?? 0;
   const atoms = draft.addSkeleton(skeleton, unit.range);
   const places = new Places(skeleton, atoms, unit, draft);
   const built: BuiltUnit = { places, free: [], sites: [] };

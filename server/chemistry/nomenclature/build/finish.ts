@@ -26,8 +26,11 @@ export function finished(draft: Draft, choices: Choices, whole: TextRange): Mole
 }
 
 function placeDoubleBonds(draft: Draft, choices: Choices, whole: TextRange): boolean {
-  const ring = draft.atoms.flatMap((atom, index) =>
-    atom.mancude && !atom.saturated && draft.free(index) > 0 ? [index] : [],
+  const ring = withoutLonely(
+    draft,
+    draft.atoms.flatMap((atom, index) =>
+      atom.mancude && !atom.saturated && draft.free(index) > 0 ? [index] : [],
+    ),
   );
   if (ring.length === 0) return true;
   let match = matching(draft, ring);
@@ -96,6 +99,20 @@ function placeDoubleBonds(draft: Draft, choices: Choices, whole: TextRange): boo
     draft.bonds[bond]!.order = 2;
   }
   return true;
+}
+
+/**
+ * An atom whose neighbours can never share a double bond with it has none: C-2 and C-4 between O and a 3-one. Where a
+ * neighbour was saturated by hydro prefixes or indicated hydrogen, the name is at odds with itself instead.
+ */
+function withoutLonely(draft: Draft, ring: readonly number[]): number[] {
+  const open = new Set(ring);
+  return ring.filter((atom) => {
+    const beside = draft.neighbours[atom]!.filter((one) => sameRing(draft, atom, one.atom));
+    const isLonely = beside.every((one) => !open.has(one.atom) && !draft.atoms[one.atom]!.saturated);
+    if (isLonely) draft.atoms[atom]!.saturated = true;
+    return !isLonely;
+  });
 }
 
 function matching(draft: Draft, ring: readonly number[]): { single: number[]; pairs: [number, number][] } {

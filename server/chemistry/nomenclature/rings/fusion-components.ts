@@ -64,8 +64,17 @@ export function basesAt(lower: string, offset: number): NamedComponents[] {
   return found;
 }
 
+/** `[7]annulene`, and `cycloheptene` where fusion names mean the ring with all its double bonds (index names). */
+const carbocycle = /^(?:(\d{1,2})-annulen|(cyclo[a-z]+)en)$/;
+
 /** Components with the whole of this name, its final e left out. */
 function named(name: string): Component[] {
+  const carbons = carbocycle.exec(name);
+  const size = carbons && (carbons[1] === undefined ? cycloalka.get(carbons[2]!) : Number(carbons[1]));
+  if (size !== null && size !== undefined) {
+    const component = size > 2 && size <= 30 ? componentOf(mancudeRing(size)) : undefined;
+    return component ? [component] : [];
+  }
   const retained = retainedComponent(name);
   if (retained) return [retained];
   const ruled = heterocycles(name);

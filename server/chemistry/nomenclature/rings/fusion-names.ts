@@ -35,6 +35,8 @@ const multipliers: readonly (readonly [word: string, count: number])[] = [
 /** Prefixes of one name, and combinations of meanings tried, at most. */
 const mostPrefixes = 6;
 const mostTrials = 64;
+/** A numbering beside the rules is meant only where the ruled one has no place for what is written. */
+const unruledNumbering = 5;
 
 const known = new Map<string, readonly FusionName[]>();
 
@@ -52,12 +54,16 @@ export function fusionNamesAt(lower: string, offset: number): readonly FusionNam
   return found.map(({ skeletons, end }) => ({ skeletons, end: end + offset }));
 }
 
+/** In `benzo[7]annulene` the bracket is the size of the ring, and all its sides are alike (P-25.3.4.2.1). */
+const annulene = /^\[\d{1,2}\]annulen/;
+const firstSide = (end: number) => ({ attachments: [{ own: [], sides: [0], other: [], copy: 0 }], end });
+
 /** Multiplied or not, the prefixes with a descriptor after them. */
 function prefixStarts(lower: string, offset: number): { prefix: Prefix; end: number }[] {
   return multipliers.flatMap(([word, count]) => {
     if (!lower.startsWith(word, offset)) return [];
     return prefixesAt(lower, offset + word.length).flatMap(({ components, end }) => {
-      const descriptor = fusionDescriptorAt(lower, end);
+      const descriptor = annulene.test(lower.slice(end)) ? firstSide(end) : fusionDescriptorAt(lower, end);
       if (!descriptor) return [];
       const { attachments } = descriptor;
       const places = attachments.some((one) => one.copy > 0) ? count : attachments.length;
@@ -74,17 +80,21 @@ function walk(lower: string, offset: number, before: readonly Prefix[], found: F
     for (const [word] of multiplier) {
       if (!lower.startsWith(word, end)) continue;
       for (const base of basesAt(lower, end + word.length)) {
-        const skeletons = meanings(prefixes, base.components, copies);
-        if (skeletons.length === 1) found.push({ skeletons, end: base.end });
+        const skeletons = meaning(prefixes, base.components, copies);
+        if (skeletons.length > 0) found.push({ skeletons, end: base.end });
       }
     }
     if (prefixes.length < mostPrefixes) walk(lower, end, prefixes, found);
   }
 }
 
-/** The different systems that the components can make. */
-function meanings(prefixes: readonly Prefix[], bases: readonly Component[], copies: number): SkeletonGraph[] {
-  const distinct = new Map<string, SkeletonGraph>();
+/** The one system that the components can make, in each numbering; nothing when they can make several, or none. */
+function meaning(
+  prefixes: readonly Prefix[],
+  bases: readonly Component[],
+  copies: number,
+): readonly SkeletonGraph[] {
+  const distinct = new Map<string, SkeletonGraph[]>();
   let combinations: Component[][] = bases.map((base) => [base]);
   for (const { components } of prefixes)
     combinations = combinations
@@ -92,11 +102,15 @@ function meanings(prefixes: readonly Prefix[], bases: readonly Component[], copi
       .slice(0, mostTrials);
   for (const [base, ...attached] of combinations) {
     const system = joined(prefixes, attached, base!, copies);
-    const locants = system && fusionLocants(system);
-    if (!locants) continue;
-    distinct.set(systemKey(system), skeletonOf(system, locants));
+    if (!system) continue;
+    const numberings = fusionLocants(system).map((locants, index) => ({
+      ...skeletonOf(system, locants),
+      ...(index > 0 ? { cost: unruledNumbering } : {}),
+    }));
+    if (numberings.length > 0) distinct.set(systemKey(system), numberings);
   }
-  return [...distinct.values()];
+  const [only, ...others] = distinct.values();
+  return only && others.length === 0 ? only : [];
 }
 
 function joined(

@@ -14,15 +14,29 @@ interface Numbering {
 
 /** Order of heteroatoms in fusion nomenclature (P-25.2.1, table 2.4): the earlier the more senior. */
 const senior = [9, 17, 35, 53, 8, 16, 34, 52, 7, 15, 33, 51, 83, 14, 32, 50, 82, 5, 13];
+/** Where among the criteria the locants of fusion carbon atoms stand: after heteroatoms together and one by one. */
+const fusionCarbonPlace = senior.length + 1;
 
 /**
- * The locants of all atoms, or undefined when the rules leave more than one numbering whose atoms are not alike, or the
- * rings cannot be drawn.
+ * The locants of all atoms by the rules, and then by the usage that puts low locants of fusion carbon atoms before those
+ * of heteroatoms, where that differs (met in computed names of larger systems; common practice, no source). Nothing when
+ * the rings cannot be drawn; a numbering is left out when the rules leave several whose atoms are not alike.
  */
-export function fusionLocants(system: FusedSystem): readonly string[] | undefined {
-  const outer = outerNeighbours(system);
-  if (!outer) return undefined;
+export function fusionLocants(system: FusedSystem): (readonly string[])[] {
+  if (!outerNeighbours(system)) return [];
   const numberings = bestDrawings(layoutsOf(system)).flatMap((layout) => numbered(system, layout) ?? []);
+  const ruled = lowest(system, numberings);
+  if (!ruled) return [];
+  const other = lowest(
+    system,
+    numberings.map((one) => ({ ...one, criteria: [one.criteria[fusionCarbonPlace]!, ...one.criteria] })),
+  );
+  const differs = other && compareLists(other.criteria[0]!, ruled.criteria[fusionCarbonPlace]!) < 0;
+  return differs ? [ruled.locants, other.locants] : [ruled.locants];
+}
+
+/** The numbering with the lowest criteria, or undefined when several that are not alike share them. */
+function lowest(system: FusedSystem, numberings: readonly Numbering[]): Numbering | undefined {
   let best: Numbering[] = [];
   for (const one of numberings) {
     const order = best.length === 0 ? -1 : compare(one.criteria, best[0]!.criteria);
@@ -30,8 +44,7 @@ export function fusionLocants(system: FusedSystem): readonly string[] | undefine
     else if (order === 0) best.push(one);
   }
   const [first, ...others] = best;
-  if (!first || others.some((other) => !alike(system, first.locants, other.locants))) return undefined;
-  return first.locants;
+  return first && others.every((other) => alike(system, first.locants, other.locants)) ? first : undefined;
 }
 
 interface Judged {

@@ -30,7 +30,7 @@ export const rings: readonly RingLine[] = [
   ['indan', 'C1CCc2ccccc12', '1 2 3 3a 4 5 6 7 7a'],
   ['tetralin', 'C1CCCc2ccccc12', '1 2 3 4 4a 5 6 7 8 8a'],
   ['decalin', 'C1CCCC2CCCCC12', '1 2 3 4 4a 5 6 7 8 8a'],
-  ['fluoren', 'C1CCC2C(C1)C3CCCCC3C2', '2 3 4 4a 9a 1 8a 8 7 6 5 4b 9', 'm', '9'],
+  ['fluoren', 'C1CCC2C(C1)C3CCCCC3C2', '3 2 1 9a 4a 4 4b 5 6 7 8 8a 9', 'm', '9'],
   ['anthracen', 'c1ccc2cc3ccccc3cc2c1', '2 3 4 4a 10 10a 5 6 7 8 8a 9 9a 1'],
   ['phenanthren', 'c1ccc2c(c1)ccc1ccccc12', '2 3 4 4a 10a 1 10 9 8a 8 7 6 5 4b'],
   ['pyren', 'c1cc2ccc3cccc4ccc(c1)c2c34', '2 3 3a 4 5 5a 6 7 8 8a 9 10 10a 1 10c 10b'],

@@ -70,9 +70,6 @@ const replacements: readonly (readonly [string, number])[] = [
   ['phospha', 15],
   ['sila', 14],
   ['bora', 5],
-  ['ox', 8],
-  ['thi', 16],
-  ['az', 7],
 ];
 
 export interface Lexicon {
