@@ -7,7 +7,7 @@ import { range, type Problem } from '../text.ts';
 import { maximumMatching } from './kekulize.ts';
 import type { Atom, Bond, MoleculeBuilder } from './molecule.ts';
 import { cyclicBonds } from './rings.ts';
-import type { Mutable, SmilesDraft } from './read-smiles.ts';
+import type { Mutable, SmilesDraft } from './smiles-draft.ts';
 import { usualValences } from './valence-model.ts';
 
 export function settleAromatic(draft: SmilesDraft): Problem | undefined {

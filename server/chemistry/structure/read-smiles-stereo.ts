@@ -5,7 +5,7 @@
 import { range, type Problem } from '../text.ts';
 import { doubleBondNeighbours, walkCumulene, type CumuleneEnd } from './cumulene.ts';
 import { IMPLICIT_LIGAND, type MoleculeBuilder, type PolyhedralStereo } from './molecule.ts';
-import type { SmilesDraft } from './read-smiles.ts';
+import type { SmilesDraft } from './smiles-draft.ts';
 
 export function settleStereo(draft: SmilesDraft): Problem | undefined {
   for (const [atom, statement] of draft.chirality) settleChirality(draft, atom, statement);

@@ -4,44 +4,22 @@
  * check's business. One pass over the characters, then the delocalised rings, the implied hydrogens and the
  * arrangement in space; no recursion, so the length of a text is not limited by the stack.
  */
-import { elementWithSymbol } from '../composition/elements.ts';
 import { problemAt, range, type Problem, type Read } from '../text.ts';
-import { type Atom, type Bond, type BondOrder, type Molecule, MoleculeBuilder } from './molecule.ts';
+import { type Atom, type Molecule, MoleculeBuilder } from './molecule.ts';
 import { readBracketAtom } from './read-bracket-atom.ts';
 import { settleAromatic } from './read-smiles-aromatic.ts';
 import { settleStereo } from './read-smiles-stereo.ts';
+import {
+  closeRing,
+  join,
+  readRingNumber,
+  type BondSymbol,
+  type Mutable,
+  type OpenRing,
+  type SmilesDraft,
+} from './smiles-draft.ts';
+import { danglingBond, unexpected } from './smiles-problems.ts';
 import { impliedHydrogens } from './valence-model.ts';
-
-export type Mutable<T> = { -readonly [Key in keyof T]: T[Key] };
-
-/** What is known of the text beyond the graph while it is being read. */
-export interface SmilesDraft {
-  readonly builder: MoleculeBuilder;
-  /** True for atoms whose hydrogens are implied: those written without brackets. */
-  readonly implied: boolean[];
-  /** Chirality as written, by atom. */
-  readonly chirality: Map<number, string>;
-  /** `/` is 1 and `\` is −1, as seen from `from` to `to`, by bond. */
-  readonly direction: Map<number, 1 | -1>;
-  /** For ring bonds: the offsets of the closure at `from` and at `to`. */
-  readonly ringMarks: Map<number, readonly [number, number]>;
-  /** Bonds without a symbol between two lower-case atoms: aromatic if in a ring of such atoms, else single. */
-  readonly perhapsAromatic: Set<number>;
-}
-
-interface BondSymbol {
-  readonly order: BondOrder;
-  readonly aromatic: boolean;
-  readonly direction: 0 | 1 | -1;
-  readonly at: number;
-}
-
-interface OpenRing {
-  readonly atom: number;
-  readonly symbol: BondSymbol | undefined;
-  readonly at: number;
-  readonly end: number;
-}
 
 /** Atomic number of the one-letter atoms that stand without brackets, by character code; 0 elsewhere. */
 const organicNumber = new Uint8Array(128);
@@ -244,108 +222,5 @@ function readGraph(text: string, start: number, end: number, draft: SmilesDraft)
   if (afterDot !== -1) {
     return problemAt(afterDot, afterDot + 1, 'A dot separates two parts; there is none after it.').problem;
   }
-  return undefined;
-}
-
-function danglingBond(symbol: BondSymbol, side: string): Problem {
-  return problemAt(symbol.at, symbol.at + 1, `This bond leads nowhere: there is no atom ${side}.`).problem;
-}
-
-function unexpected(text: string, at: number, end: number): Problem {
-  const length = (text.codePointAt(at) ?? 0) > 0xffff ? 2 : 1;
-  const shown = text.slice(at, at + length);
-  if (isSpace(shown)) {
-    return problemAt(at, end, 'A SMILES has no spaces; what follows the space is not read as part of it.')
-      .problem;
-  }
-  if (shown === ']')
-    return problemAt(at, at + 1, 'This bracket closes an atom that was never opened.').problem;
-  if (/^[A-Za-z]$/.test(shown)) {
-    // The capital before it may have been read as an atom of its own: Na, Si.
-    const before =
-      /^[A-Z][a-z]$/.test(text.slice(at - 1, at + 1)) && elementWithSymbol(text.slice(at - 1, at + 1));
-    const start = before ? at - 1 : at;
-    const two = /^[A-Z][a-z]/.exec(text.slice(start, start + 2))?.[0] ?? shown;
-    return problemAt(
-      start,
-      start + two.length,
-      `“${two}” cannot stand here without brackets; only B, C, N, O, P, S, F, Cl, Br, I and their aromatic lower-case forms can. Write it as a bracket atom, such as [${two}].`,
-    ).problem;
-  }
-  return problemAt(at, at + length, `“${shown}” has no meaning in a SMILES.`).problem;
-}
-
-/** One digit, `%nn`, or `%(nnnnn)`. */
-function readRingNumber(
-  text: string,
-  at: number,
-  end: number,
-): { number: number; end: number } | { problem: Problem } {
-  if (text[at] !== '%') return { number: text.charCodeAt(at) - 48, end: at + 1 };
-  const match = /^%(?:(\d\d)|\((\d{1,5})\))/.exec(text.slice(at, Math.min(end, at + 9)));
-  if (match === null) {
-    return problemAt(at, Math.min(end, at + 1), 'After % stand two digits, the number of the ring closure.');
-  }
-  return { number: Number(match[1] ?? match[2]), end: at + match[0].length };
-}
-
-function join(draft: SmilesDraft, from: number, to: number, symbol: BondSymbol | undefined): number {
-  const { builder } = draft;
-  const bothAromatic = builder.atoms[from]!.aromatic && builder.atoms[to]!.aromatic;
-  const place =
-    symbol === undefined
-      ? range(builder.atoms[to]!.range.start, builder.atoms[to]!.range.start)
-      : range(symbol.at, symbol.at + 1);
-  const bond = builder.addBond(from, to, symbol?.order ?? 1, symbol?.aromatic ?? false, place);
-  if (symbol === undefined && bothAromatic) draft.perhapsAromatic.add(bond);
-  if (symbol !== undefined && symbol.direction !== 0) draft.direction.set(bond, symbol.direction);
-  if (symbol?.aromatic) {
-    (builder.atoms[from] as Mutable<Atom>).aromatic = true;
-    (builder.atoms[to] as Mutable<Atom>).aromatic = true;
-  }
-  return bond;
-}
-
-function closeRing(
-  draft: SmilesDraft,
-  open: OpenRing,
-  atom: number,
-  symbol: BondSymbol | undefined,
-  at: number,
-  end: number,
-): Problem | undefined {
-  const here = symbol?.at ?? at;
-  if (open.atom === atom) {
-    return problemAt(here, end, 'This ring closure joins an atom with itself.').problem;
-  }
-  if (draft.builder.neighbours[atom]!.some((neighbour) => neighbour.atom === open.atom)) {
-    return problemAt(
-      here,
-      end,
-      'These two atoms are already bonded; a second bond between them is a double bond (=).',
-    ).problem;
-  }
-  const first = open.symbol;
-  if (
-    first !== undefined &&
-    symbol !== undefined &&
-    (first.order !== symbol.order ||
-      first.aromatic !== symbol.aromatic ||
-      (first.direction !== 0 && symbol.direction !== 0 && first.direction === symbol.direction))
-  ) {
-    return problemAt(
-      here,
-      end,
-      'The two ends of this ring closure give the bond different symbols; write it at one end only.',
-    ).problem;
-  }
-  // The direction at the closing end is seen from there; the bond runs from the opening end.
-  const turned = symbol === undefined ? undefined : { ...symbol, direction: -symbol.direction as 0 | 1 | -1 };
-  const chosen =
-    first === undefined || (first.direction === 0 && turned?.direction) ? (turned ?? first) : first;
-  const bond = join(draft, open.atom, atom, chosen);
-  draft.ringMarks.set(bond, [open.at, here]);
-  const made = draft.builder.bonds[bond] as Mutable<Bond>;
-  made.range = range(here, end);
   return undefined;
 }
