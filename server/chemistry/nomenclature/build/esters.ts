@@ -1,0 +1,129 @@
+/** Esters and salts of acids, and plain parents (P-65.6). */
+import type { Unit } from '../tree.ts';
+import type { Site } from '../words/sentence.ts';
+import type { BuiltUnit } from './built-unit.ts';
+import type { Choices } from './choices.ts';
+import type { Draft } from './draft.ts';
+import { oxidise } from './oxides.ts';
+import { addSmiles, buildGroups, buildWord, join, type Valence, type Word } from './words.ts';
+import { balanced, makeCation, type Ion } from './salts.ts';
+
+/** The words round an acid, or round a parent that is none. */
+export interface AcidWords {
+  readonly radicals: readonly Word[];
+  /** The acid, and before it an organic cation where there is one. */
+  readonly parents: readonly Word[];
+  readonly metals: readonly Ion[];
+  readonly hydrogens: number;
+  readonly oxides: number;
+}
+
+/** Puts an ester, a salt or a plain parent into the draft; false when the words do not make one. */
+export function buildAcidOrParent(words: AcidWords, draft: Draft, choices: Choices): boolean {
+  const { radicals, parents, metals, hydrogens, oxides } = words;
+  const groups = buildGroups(radicals, draft, choices);
+  if (!groups || parents.length > 2) return false;
+  const acid = parents[parents.length - 1]!;
+  const acids: BuiltUnit[] = [];
+  for (let copy = 0; copy < acid.count; copy++) {
+    const built = buildWord(acid.unit, draft, choices, acid.count);
+    if (!built) return false;
+    acids.push(built);
+  }
+  const sites = acids.flatMap((one) => one.sites);
+  const valences = groups.flatMap((group) => group.free.map((free) => ({ free, site: group.site })));
+  if (oxides > 0 && !oxidise(acids[0]!, oxides, draft)) return false;
+  if (sites.length === 0)
+    return valences.length + hydrogens + metals.length === 0 && parents.length === 1 && acid.count === 1;
+  if (valences.length + hydrogens > sites.length) return false;
+  const alone = metals.length === 0 && parents.length === 1;
+  if (acid.count > 1 && alone && (groups.length !== 1 || valences.length !== acid.count)) return false;
+  const alike = radicals.length === 1 && hydrogens + metals.length === 0;
+  let left = esterified(sites, valences, alike, draft, choices);
+  if (!left) return false;
+  left = protonated(left, hydrogens, draft, choices);
+  // An acid's anion by itself is an ion; half an ester is nothing definite.
+  if (alone) return left.length === 0 || (valences.length === 0 && hydrogens === 0 && namesAnion(acid.unit));
+  return left.length > 0 && addCounterions(words, left.length, valences.length, draft, choices);
+}
+
+/** Binds the groups to places of the acid; the answer lists the places left. */
+function esterified(
+  sites: readonly number[],
+  valences: readonly { readonly free: Valence; readonly site: Site | undefined }[],
+  alike: boolean,
+  draft: Draft,
+  choices: Choices,
+): number[] | undefined {
+  let left = [...sites];
+  for (const { free, site: said } of valences) {
+    const options = left.filter((site) => fits(site, said, sites, draft));
+    if (options.length === 0) return undefined;
+    const site = alike ? options[0]! : options[choices.pick(options.length)]!;
+    if (!join(draft, site, free)) return undefined;
+    left = left.filter((one) => one !== site);
+  }
+  return left;
+}
+
+/** `hydrogen`: acid places that keep their hydrogen. */
+function protonated(sites: readonly number[], hydrogens: number, draft: Draft, choices: Choices): number[] {
+  let left = [...sites];
+  for (let count = 0; count < hydrogens; count++) {
+    const site = left[choices.pick(left.length)]!;
+    draft.atoms[site]!.charge++;
+    draft.atoms[site]!.capacity++;
+    left = left.filter((one) => one !== site);
+  }
+  return left;
+}
+
+/** Cations for the places of the acid that stay negative. */
+function addCounterions(
+  { parents, metals, hydrogens }: AcidWords,
+  places: number,
+  groups: number,
+  draft: Draft,
+  choices: Choices,
+): boolean {
+  const acid = parents[parents.length - 1]!;
+  const bases = parents.slice(0, -1);
+  if (metals.length + bases.length > 1) {
+    const total = metals.reduce((sum, metal) => sum + metal.charge * (metal.count ?? 1), 0) + bases.length;
+    if (total !== places) return false;
+    for (const metal of metals)
+      for (let copy = 0; copy < (metal.count ?? 1); copy++) addSmiles(metal.smiles, draft);
+    return bases.every((base) => makeCation(base, draft, choices));
+  }
+  const [metal] = metals;
+  const [base] = bases;
+  const given = metal ? metal.count : base && base.count > 1 ? base.count : undefined;
+  const counts = balanced(metal?.charge ?? 1, given, places, acid.count > 1 ? 1 : undefined);
+  if (!counts) return false;
+  for (let copy = 0; copy < counts[0]; copy++) {
+    if (metal) addSmiles(metal.smiles, draft);
+    else if (!base || !makeCation(base, draft, choices)) return false;
+  }
+  for (let copy = 1; copy < counts[1]; copy++) {
+    if (groups + hydrogens > 0 || !buildWord(acid.unit, draft, choices, acid.count)) return false;
+  }
+  return true;
+}
+
+/** Whether a group said to be on O or S, and at a position, can be on this place; places stand in their order. */
+function fits(place: number, site: Site | undefined, all: readonly number[], draft: Draft): boolean {
+  if (site === undefined) return true;
+  if (draft.atoms[place]!.atomicNumber !== (site.element === 'O' ? 8 : 16)) return false;
+  return (
+    site.position === undefined || all.length < 2 || all.indexOf(place) === (site.position === 1 ? 0 : 1)
+  );
+}
+
+/** `2-phenylacetate` is the ion; `citrate` or `ethylhexanoate` alone may be an ester or the acid written badly. */
+function namesAnion(unit: Unit): boolean {
+  const chain = unit.skeletons.every((one) => one.kind === 'chain');
+  const located = unit.groupings.every((ways) =>
+    ways.every((way) => way.substitutions.every((one) => one.locants !== undefined)),
+  );
+  return located && (chain || unit.groupings.length > 0);
+}

@@ -1,0 +1,54 @@
+/** Groups with a function word: `ethyl methyl ether`, `benzyl chloride`, `ethylene dichloride` (P-51.3.3). */
+import { functionWords } from '../vocabulary/functions.ts';
+import type { Choices } from './choices.ts';
+import type { Draft } from './draft.ts';
+import { addSmiles, buildGroups, buildWord, join, type Valence, type Word } from './words.ts';
+
+/** A function word by its place in the vocabulary, and the multiplier written before it. */
+export interface FunctionWord {
+  readonly index: number;
+  readonly count: number | undefined;
+}
+
+/** Binds the groups to the function; false when they do not fill it. */
+export function buildFunctionalClass(
+  radicals: readonly Word[],
+  functional: FunctionWord,
+  draft: Draft,
+  choices: Choices,
+): boolean {
+  const [word, group, sites] = functionWords[functional.index]!;
+  const built = buildGroups(radicals, draft, choices);
+  if (!built || group === '') return false;
+  const valences = built.flatMap((one) => one.free);
+  // `ethylene dichloride`, `methylene chloride`: one group with several valences, as many halides.
+  const copies =
+    sites.length === 1 && built.length === 1 ? valences.reduce((sum, one) => sum + one.order, 0) : 1;
+  if (functional.count !== undefined && functional.count !== copies) return false;
+  if (copies > 1) return repeated(group, valences, draft);
+  if (word === 'ether' && valences.length === 1 && radicals[0]!.count === 1)
+    valences.push(...again(radicals[0]!, draft, choices));
+  if (valences.length !== sites.length) return false;
+  const atoms = addFunction(group, sites, draft);
+  return sites.every((site, index) => join(draft, atoms[site]!, valences[index]!));
+}
+
+/** The function once on every valence; a double one takes two. */
+function repeated(group: string, valences: readonly Valence[], draft: Draft): boolean {
+  const single = valences.flatMap(({ atom, order }) =>
+    Array.from({ length: order }, () => ({ atom, order: 1 })),
+  );
+  return single.every((valence) => join(draft, addFunction(group, [0], draft)[0]!, valence));
+}
+
+function addFunction(group: string, sites: readonly number[], draft: Draft): number[] {
+  const atoms = addSmiles(group, draft);
+  for (const place of new Set(sites))
+    draft.settleCapacity(atoms[place]!, undefined, sites.filter((site) => site === place).length);
+  return atoms;
+}
+
+/** `ethyl ether` is diethyl ether in older usage. */
+function again(radical: Word, draft: Draft, choices: Choices): readonly Valence[] {
+  return buildWord(radical.unit, draft, choices, radical.count)?.free ?? [];
+}
