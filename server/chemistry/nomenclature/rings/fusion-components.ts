@@ -4,7 +4,7 @@ import { contractedFusionPrefixes } from '../vocabulary/fusion-prefixes.ts';
 import { alkaneStem } from '../vocabulary/numbers.ts';
 import { rings } from '../vocabulary/rings.ts';
 import { componentOf, type Component } from './fused-system.ts';
-import { hantzschWidmanAt } from '../words/hantzsch-widman.ts';
+import { hantzschWidmanAt } from './hantzsch-widman.ts';
 
 export interface NamedComponents {
   /** What the name can mean; more than one where locants of heteroatoms are left out. */

@@ -5,7 +5,7 @@ import { acylWithYl } from '../vocabulary/acids.ts';
 import { alkoxySkeleton, wordsAt, type Lexicon, type Word } from './lexicon.ts';
 import { ringNameAt } from './ring-names.ts';
 import { chainTailsAt, endingsAt, type Tail } from './tails.ts';
-import { descriptorAt } from './von-baeyer.ts';
+import { descriptorAt } from '../rings/von-baeyer.ts';
 
 export interface Group {
   readonly unit: Unit;
