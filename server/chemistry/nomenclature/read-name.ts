@@ -6,6 +6,7 @@ import type { NameReading, NameRemark, Reading } from './reading.ts';
 import { completedName, meaningsOf, type Described, type Meaning } from './readings.ts';
 import { createCommonNames, type CommonNames } from './common-names.ts';
 import { arrangedReading } from './arrange.ts';
+import { knownName } from './known-names.ts';
 import { isLongestChain } from './build/proper-chain.ts';
 import { improperRemark, properAlkaneName } from './proper-name.ts';
 import { unknownName } from './unknown.ts';
@@ -65,7 +66,7 @@ function read(text: string, limits: NameLimits, lexicon: Lexicon, common: Common
     const message = tooLong ? 'This name is too long to be read.' : 'There is no name here.';
     return { kind: 'unknown', stoppedAt: 0, range: { start: 0, end: text.length }, message, suggestions: [] };
   }
-  const known = common.lookUp(prepared.lower);
+  const known = knownName(prepared, common);
   if (known) {
     return known.kind === 'mixture'
       ? { kind: 'mixture', message: known.message, components: [] }

@@ -1,0 +1,59 @@
+/**
+ * A formula as a name: what a chemist writes into a reaction table instead of one (`K2CO3`, `iPr2NEt`, `Pd(PPh3)4`,
+ * `MgSO4·7H2O`). Case counts. A formula that leaves the structure open (`C4H10O`) or can be read in two ways is not read.
+ */
+import { canonicalForm } from '../../structure/canonical-form.ts';
+import type { Molecule } from '../../structure/molecule.ts';
+import { readSmiles } from '../../structure/read-smiles.ts';
+import { elementReagents, wholeFormulas } from '../vocabulary/formula-whole.ts';
+import { formulaParts, plainFormula } from './formula-text.ts';
+import { wholeFormulas as lineFormulas, type Steps } from './line-formula.ts';
+import { saltFormula } from './salt-formula.ts';
+
+/** Steps of reading one formula. */
+const stepLimit = 4000;
+
+const known = new Map<string, string>([
+  ...wholeFormulas,
+  ...elementReagents.map((symbol) => [symbol, `[${symbol}]`] as const),
+]);
+
+/**
+ * The structure of a formula, or undefined where the text is none or is not certain. `wordOf` gives the SMILES of a
+ * vocabulary word, for parts like the THF of `BH3·THF`.
+ */
+export function readFormulaName(
+  text: string,
+  wordOf: (lower: string) => string | undefined,
+): Molecule | undefined {
+  const plain = plainFormula(text);
+  const parts = plain === undefined ? undefined : formulaParts(plain);
+  if (!parts) return undefined;
+  const steps: Steps = { left: stepLimit };
+  const written: string[] = [];
+  for (const part of parts) {
+    const smiles =
+      partSmiles(part.text, steps) ?? (parts.length > 1 ? wordOf(part.text.toLowerCase()) : undefined);
+    if (smiles === undefined) return undefined;
+    for (let copy = 0; copy < part.times; copy++) written.push(smiles);
+  }
+  return readSmiles(written.join('.')).value;
+}
+
+function partSmiles(text: string, steps: Steps): string | undefined {
+  const whole = known.get(text);
+  if (whole !== undefined) return whole;
+  const lines = distinct(lineFormulas(text, steps));
+  if (lines.length > 1 || steps.left <= 0) return undefined;
+  return lines[0] ?? saltFormula(text, steps);
+}
+
+/** One SMILES for each constitution. */
+function distinct(found: ReadonlySet<string>): string[] {
+  const byKey = new Map<string, string>();
+  for (const smiles of found) {
+    const molecule = readSmiles(smiles).value;
+    if (molecule) byKey.set(canonicalForm(molecule, { stereo: false }).key, smiles);
+  }
+  return [...byKey.values()];
+}
