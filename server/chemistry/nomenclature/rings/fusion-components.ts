@@ -27,27 +27,26 @@ const possibleLocants = ['1,2', '1,3', '1,4', '1,2,3', '1,2,4', '1,2,5', '1,3,5'
 const bracketedLocants = /\[(\d+(?:,\d+)*)\]/y;
 const locantsBefore = /(?:\[(\d+(?:,\d+)*)\]|(\d+(?:,\d+)*)-)/y;
 
-/** Attached components whose prefix begins at the offset, the longest first. */
+/** A prefix reaches up to the bracket of its fusion descriptor. */
+const prefixWord = /[a-z]{4,30}(?=[[(])/y;
+
+/** Attached components whose prefix begins at the offset. */
 export function prefixesAt(lower: string, offset: number): NamedComponents[] {
-  const found: NamedComponents[] = [];
   bracketedLocants.lastIndex = offset;
   const locants = bracketedLocants.exec(lower);
-  const from = locants ? bracketedLocants.lastIndex : offset;
-  const prefix = locants ? `${locants[1]!}-` : '';
-  for (let length = Math.min(longestWord, lower.length - from); length > 3; length--) {
-    const word = lower.slice(from, from + length);
-    const end = from + length;
-    const size = locants ? undefined : cycloalka.get(word);
-    if (size !== undefined) {
-      const component = componentOf(mancudeRing(size));
-      if (component) found.push({ components: [component], end });
-    }
-    const name = contracted.get(word) ?? (word.endsWith('o') ? word.slice(0, -1) : undefined);
-    if (name === undefined) continue;
-    const components = named(prefix + name);
-    if (components.length > 0) found.push({ components, end });
+  prefixWord.lastIndex = locants ? bracketedLocants.lastIndex : offset;
+  const word = prefixWord.exec(lower)?.[0];
+  if (word === undefined) return [];
+  const end = prefixWord.lastIndex;
+  const size = locants ? undefined : cycloalka.get(word);
+  if (size !== undefined) {
+    const component = componentOf(mancudeRing(size));
+    return component ? [{ components: [component], end }] : [];
   }
-  return found;
+  const name = contracted.get(word) ?? (word.endsWith('o') ? word.slice(0, -1) : undefined);
+  if (name === undefined) return [];
+  const components = named(locants ? `${locants[1]!}-${name}` : name);
+  return components.length > 0 ? [{ components, end }] : [];
 }
 
 /** The base component at the offset; `end` lies before its final e. */
