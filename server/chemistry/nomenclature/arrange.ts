@@ -91,7 +91,8 @@ export function arrangedReading(
         );
     count = isomers.length;
   }
-  const bare = isomers.length === 1 && relative.length > 0 ? isomers[0]! : list.molecule;
+  isomers = isomers.map((isomer) => asNamed(isomer, settled));
+  const bare = isomers.length === 1 && relative.length > 0 ? isomers[0]! : asNamed(list.molecule, settled);
   if (racemic && isomers.length === 1) {
     const mirror = mirrorImage(isomers[0]!);
     return { reading: openReading(complete, molecule, [isomers[0]!, mirror], 2, cap, draft), remarks };
@@ -116,6 +117,14 @@ function isomersWithoutImplied(
     return atoms.some((atom) => spelt.has(atom)) || !atoms.some((atom) => said.has(atom));
   });
   return enumerateStereoisomers(withStereo(molecule, kept), Math.max(cap, 64)).isomers;
+}
+
+/**
+ * The arrangement of an isomer on the structure as the name draws it: stereoisomers are listed in one spelling of charges,
+ * in which an ammonium salt is an amine and an acid.
+ */
+function asNamed(isomer: Molecule, named: Molecule): Molecule {
+  return isomer.atoms.length === named.atoms.length ? withStereo(named, isomer.stereo) : isomer;
 }
 
 function openReading(

@@ -54,7 +54,7 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
     for (const substitution of way.substitutions) {
       substitutions += substitution.count;
       used = substitution;
-      if (ways.length > 1 && substitution.bracketAt !== undefined) {
+      if (substitution.bracketAt !== undefined) {
         draft.brackets.push({ at: substitution.bracketAt, end: substitution.range.end });
       }
       if (!placeSubstitution(substitution, unit, built, draft, choices, buildUnit)) return undefined;

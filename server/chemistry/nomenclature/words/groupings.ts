@@ -56,6 +56,9 @@ function compound(
 
 const canStand = (item: GroupItem) =>
   item.unit.needsLink !== true || item.bracketed || item.unit.groupings.length > 0;
+/** `2-dimethylamino…`: one locant before several groups is that of the compound group which they begin. */
+export const isOuter = (item: GroupItem): boolean =>
+  item.locants?.length === 1 && item.count > 1 && !/^[omp]$/.test(item.locants[0]!);
 const links = (item: GroupItem) => item.unit.linkAt !== undefined && !item.bracketed;
 const joined = (items: readonly GroupItem[]) =>
   items.map((item, index) => (index === 0 ? item : { ...item, joins: true }));
@@ -68,7 +71,10 @@ export function groupingsOf(
   nest: Nest,
 ): Grouping[] {
   const first = run[0]!;
-  if (run.length === 1) return canStand(first) ? [{ substitutions: [substitution(first)], cost: 0 }] : [];
+  const outerLocant = isOuter(first);
+  if (run.slice(1).some(isOuter)) return [];
+  if (run.length === 1)
+    return canStand(first) && !outerLocant ? [{ substitutions: [substitution(first)], cost: 0 }] : [];
   const found: Grouping[] = [];
   const last = run[run.length - 1]!;
   const text = name.lower.slice(first.start, last.end);
@@ -82,9 +88,10 @@ export function groupingsOf(
       const cost = small && !links(last) && !perhalo && !run.slice(1).some(links) ? 2 : 0;
       found.push({ substitutions: [compound(outside, run, first.locants, false)], cost });
     }
-    const inside = first.locants && hasPlaces(run[1]!) ? nest(joined(run)) : undefined;
+    const inside = first.locants && !outerLocant && hasPlaces(run[1]!) ? nest(joined(run)) : undefined;
     if (inside) found.push({ substitutions: [compound(inside, run, undefined, true)], cost: 0 });
   }
+  if (outerLocant) return found;
   if (run.every(canStand) && !perhalo) {
     const cost = first.locants ? 2 : run.slice(1).some(links) ? 1 : 0;
     found.push({ substitutions: run.map((item) => substitution(item)), cost });
@@ -122,6 +129,7 @@ export function linkedGroupings(
   nest: Nest,
 ): Grouping[] | undefined {
   if (groups.length === 0) return base.needsLink === true ? undefined : [];
+  if (groups.some(isOuter)) return undefined;
   if (!last.joins && base.needsLink !== true) return [];
   const apart = groups
     .slice(1)

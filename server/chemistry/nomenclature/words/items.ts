@@ -113,12 +113,9 @@ export class ItemReader {
     for (const word of wordsAt(this.lexicon.words, lower, from)) {
       if (word.value.kind === 'multiplier') {
         const count = word.value.count;
-        if (
-          locants &&
-          locants.length !== count &&
-          !(locants.length === 1 && /^[omp]$/.test(locants[0]!) && count === 2)
-        )
-          continue;
+        // `2-dimethylaminoethyl`: the locant is that of the whole group which begins here.
+        const outer = locants?.length === 1 && count > 1 && !/^[omp]$/.test(locants[0]!);
+        if (locants && locants.length !== count && !outer && !(locants.length === 1 && count === 2)) continue;
         yield* this.#groupsAt(start, word.end, locants, count);
         // `di-tert-butyl`, `di-n-propyl`
         if (lower[word.end] === '-') yield* this.#groupsAt(start, word.end + 1, locants, count);

@@ -4,7 +4,7 @@
  * understandings with a cost; the cheapest that can be built are meant.
  */
 import type { Grouping, Locant, StereoWord, Unit } from '../tree.ts';
-import { groupingsOf, linkedGroupings, runsOf } from './groupings.ts';
+import { groupingsOf, isOuter, linkedGroupings, runsOf } from './groupings.ts';
 import type { GroupItem, Item } from './item.ts';
 import type { PreparedName } from './prepared.ts';
 
@@ -58,7 +58,7 @@ export function structured(items: readonly Item[], name: PreparedName, depth = 0
     } else {
       if (item.role !== 'radical') return undefined;
       const single = item.locants?.length === 1 && /^[omp]$/.test(item.locants[0]!);
-      if (item.locants && item.locants.length !== item.count && !single) return undefined;
+      if (item.locants && item.locants.length !== item.count && !single && !isOuter(item)) return undefined;
       groups.push(item);
     }
   }
