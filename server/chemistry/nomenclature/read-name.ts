@@ -121,7 +121,7 @@ function completed(
   return completedName(
     base,
     locants ? insertions.map((one) => ({ ...one, at: place(one.at) })) : [],
-    locants ? draft.brackets.map(({ at, end }) => ({ at: place(at), end: place(end) })) : [],
+    locants ? draft.brackets.map((one) => ({ ...one, at: place(one.at), end: place(one.end) })) : [],
     described.map(({ owner, text: letters }) => ({
       text: letters,
       owner: {

@@ -83,20 +83,24 @@ export interface Described {
 export function completedName(
   text: string,
   insertions: readonly Insertion[],
-  brackets: readonly { readonly at: number; readonly end: number }[] = [],
+  brackets: readonly { readonly at: number; readonly end: number; readonly depth: number }[] = [],
   described: readonly Described[] = [],
 ): string {
-  // At one place: closing brackets, descriptors of the outer unit, locants, opening brackets, descriptors inside them.
+  // At one place: closing brackets, the deepest first; then from the outside in the bracket, descriptors, locants.
   const all = [
-    ...insertions.map(({ at, text: added }, order) => ({ at, text: added, order: order + 1000 })),
-    ...brackets.map(({ at }) => ({ at, text: '(', order: 1e6 })),
-    ...brackets.map(({ end }) => ({ at: end, text: ')', order: 1 })),
+    ...insertions.map(({ at, text: added, depth }, order) => ({
+      at,
+      text: added,
+      order: depth + 0.5 + order / 1000,
+    })),
+    ...brackets.map(({ at, depth }) => ({ at, text: '(', order: depth })),
+    ...brackets.map(({ end, depth }) => ({ at: end, text: ')', order: -depth })),
     ...described.flatMap(({ owner, text: letters }) =>
       owner.wrapTo === undefined
-        ? [{ at: owner.at, text: letters, order: 500 + owner.depth }]
+        ? [{ at: owner.at, text: letters, order: owner.depth + 0.2 }]
         : [
-            { at: owner.at, text: `[${letters}`, order: 2e6 + owner.depth },
-            { at: owner.wrapTo, text: ']', order: 0 },
+            { at: owner.at, text: `[${letters}`, order: owner.depth + 0.1 },
+            { at: owner.wrapTo, text: ']', order: -owner.depth + 0.1 },
           ],
     ),
   ];

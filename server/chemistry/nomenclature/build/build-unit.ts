@@ -12,7 +12,7 @@ import { placeUnsaturations } from './unsaturations.ts';
 export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit | undefined {
   const skeleton = unit.skeletons[choices.pick(unit.skeletons.length)]!;
   if (unit.skeletons.length > 1 && skeleton.mark !== undefined) {
-    draft.insertions.push({ at: unit.parentAt, text: skeleton.mark });
+    draft.insert(unit.parentAt, skeleton.mark);
   }
   draft.cost += skeleton.cost ?? 0;
   const atoms = draft.addSkeleton(skeleton, unit.range);
@@ -55,7 +55,11 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
       substitutions += substitution.count;
       used = substitution;
       if (substitution.bracketAt !== undefined) {
-        draft.brackets.push({ at: substitution.bracketAt, end: substitution.range.end });
+        draft.brackets.push({
+          at: substitution.bracketAt,
+          end: substitution.range.end,
+          depth: draft.owner.depth + 1,
+        });
       }
       if (!placeSubstitution(substitution, unit, built, draft, choices, buildUnit)) return undefined;
     }
@@ -139,7 +143,7 @@ function saturate(unit: Unit, places: Places, draft: Draft, choices: Choices): b
         draft.atoms[options[which]!]!.saturated = true;
         chosen.push(places.locantOf(options[which]!) ?? '?');
       }
-      draft.insertions.push({ at, text: chosen.join(',') + '-' });
+      draft.insert(at, `${chosen.join(',')}-`);
       places.opened = true;
     }
   }

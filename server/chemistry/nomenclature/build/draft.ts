@@ -20,6 +20,8 @@ export interface DraftAtom {
 export interface Insertion {
   readonly at: number;
   readonly text: string;
+  /** How deep in the name's brackets it belongs: what is said of a group stands inside the bracket round it. */
+  readonly depth: number;
 }
 
 /** Where descriptors of a unit's atoms are written. */
@@ -51,7 +53,7 @@ export class Draft {
   readonly stereo: StereoElement[] = [];
   readonly insertions: Insertion[] = [];
   /** Brackets to be written in round compound groups. */
-  readonly brackets: { readonly at: number; readonly end: number }[] = [];
+  readonly brackets: { readonly at: number; readonly end: number; readonly depth: number }[] = [];
   readonly wanted: { atom: number; word: StereoWord }[] = [];
   readonly loose: { atoms: readonly number[]; word: StereoWord }[] = [];
   readonly chains: ChainClaim[] = [];
@@ -69,6 +71,13 @@ export class Draft {
   fail(range: TextRange, message: string): undefined {
     this.failure ??= { range, message };
     return undefined;
+  }
+
+  /** Writes what was chosen into the unit now being built; the answer can be taken back. */
+  insert(at: number, text: string): Insertion {
+    const insertion = { at, text, depth: this.owner.depth };
+    this.insertions.push(insertion);
+    return insertion;
   }
 
   bond(from: number, to: number, order: number): void {

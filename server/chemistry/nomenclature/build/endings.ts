@@ -125,10 +125,7 @@ function endingAtoms(ending: Ending, built: BuiltUnit, draft: Draft, choices: Ch
     chosen.push(atom);
   }
   if (atoms.length > 1) {
-    draft.insertions.push({
-      at: ending.at,
-      text: `-${chosen.map((atom) => places.locantOf(atom)!).join(',')}-`,
-    });
+    draft.insert(ending.at, `-${chosen.map((atom) => places.locantOf(atom)!).join(',')}-`);
     places.opened = true;
   }
   return chosen;

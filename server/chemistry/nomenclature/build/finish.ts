@@ -79,7 +79,7 @@ function placeDoubleBonds(draft: Draft, choices: Choices, whole: TextRange): boo
       const atom = options[choices.pick(options.length)]!;
       const name = draft.named.get(atom);
       if (name?.locant !== undefined && options.length > 1)
-        draft.insertions.push({ at: name.parentAt, text: `${name.locant}H-` });
+        draft.insertions.push({ at: name.parentAt, text: `${name.locant}H-`, depth: name.owner.depth });
       draft.atoms[atom]!.saturated = true;
       match = matching(
         draft,

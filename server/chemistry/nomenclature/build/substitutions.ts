@@ -67,9 +67,7 @@ export function placeSubstitution(
     draft.bond(host, free.atom, free.order);
   }
   if (!given && (offered > 1 || substitution.count > 1) && places.atoms.length > 1) {
-    const insertion = { at: substitution.at, text: `${chosen.join(',')}-` };
-    draft.insertions.push(insertion);
-    places.inserted.push(insertion);
+    places.inserted.push(draft.insert(substitution.at, `${chosen.join(',')}-`));
     places.opened = true;
   }
   return true;

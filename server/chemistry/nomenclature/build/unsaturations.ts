@@ -47,7 +47,7 @@ export function placeUnsaturations(unit: Unit, places: Places, draft: Draft, cho
       from = bond.position + 1;
       chosen.push(places.locantOf(bond.from)!);
     }
-    draft.insertions.push({ at, text: `${count > 1 ? '' : ''}-${chosen.join(',')}-` });
+    draft.insert(at, `-${chosen.join(',')}-`);
     places.opened ||= count > 1 || !places.alike;
   }
   return true;
