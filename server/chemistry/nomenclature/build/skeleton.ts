@@ -38,13 +38,21 @@ const carbon = (locants: readonly string[]): SkeletonAtom => ({
 
 /** An unbranched chain of carbon, numbered from one end (P-21.2.1). */
 export function chain(length: number): SkeletonGraph {
-  return {
-    kind: 'chain',
-    atoms: Array.from({ length }, (_, index) => carbon([String(index + 1)])),
-    bonds: Array.from({ length: length - 1 }, (_, index) => ({ from: index, to: index + 1, order: 1 })),
-    indicated: [],
-    stereo: [],
-  };
+  const bonds = Array.from({ length: length - 1 }, (_, index) => ({ from: index, to: index + 1, order: 1 }));
+  return { ...carbonSkeleton(length, bonds), kind: 'chain' };
+}
+
+/** A saturated ring system of carbon atoms numbered in order from 1; undefined when two atoms are joined twice. */
+export function carbonSystem(size: number, bonds: SkeletonGraph['bonds']): SkeletonGraph | undefined {
+  const pairs = new Set(
+    bonds.map(({ from, to }) => `${String(Math.min(from, to))} ${String(Math.max(from, to))}`),
+  );
+  return pairs.size === bonds.length ? carbonSkeleton(size, bonds) : undefined;
+}
+
+function carbonSkeleton(size: number, bonds: SkeletonGraph['bonds']): SkeletonGraph {
+  const atoms = Array.from({ length: size }, (_, index) => carbon([String(index + 1)]));
+  return { kind: 'ring', atoms, bonds, indicated: [], stereo: [] };
 }
 
 /** A saturated ring of carbon (P-22.1.1). */

@@ -9,8 +9,7 @@ export function placeUnsaturations(unit: Unit, places: Places, draft: Draft, cho
   for (const { order, count, locants, at, range } of unit.unsaturations) {
     if (locants) {
       for (const locant of locants) {
-        const from = places.at(locant);
-        const to = from === undefined ? undefined : next(places, locant);
+        const { from, to } = endsOf(places, locant);
         if (from === undefined || to === undefined) {
           draft.fail(range, noSuchPlace(locant));
           return false;
@@ -51,6 +50,14 @@ export function placeUnsaturations(unit: Unit, places: Places, draft: Draft, cho
     places.opened ||= count > 1 || !places.alike;
   }
   return true;
+}
+
+/** The bond that a locant means: to the next place, or with `4(9)` to the one in brackets. */
+function endsOf(places: Places, locant: Locant): { from?: number | undefined; to?: number | undefined } {
+  const compound = /^([^(]+)\(([^)]+)\)$/.exec(locant);
+  if (compound) return { from: places.at(compound[1]!), to: places.at(compound[2]!) };
+  const from = places.at(locant);
+  return { from, to: from === undefined ? undefined : next(places, locant) };
 }
 
 /** The atom that follows in the numbering and is bound to this one; from the last of a ring back to 1. */

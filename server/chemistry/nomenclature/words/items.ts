@@ -24,6 +24,17 @@ export interface Stretch {
 }
 
 const rowCap = 24;
+/** P-15.4.1.1: the multiplier loses its a before `aza`, `oxa`; common practice, no source. */
+const elidedMultiplier = /(tetr|pent|hex|hept|oct|non|dec)(?=az|ox)/y;
+const elidedCounts: Readonly<Record<string, number>> = {
+  tetr: 4,
+  pent: 5,
+  hex: 6,
+  hept: 7,
+  oct: 8,
+  non: 9,
+  dec: 10,
+};
 const boundary = /[\s()[\];:,·*.+/]|$/y;
 
 export class ItemReader {
@@ -121,6 +132,24 @@ export class ItemReader {
         if (lower[word.end] === '-') yield* this.#groupsAt(start, word.end + 1, locants, count);
       }
     }
+    elidedMultiplier.lastIndex = from;
+    const elided = elidedMultiplier.exec(lower);
+    const count = elidedCounts[elided?.[1] ?? ''];
+    if (elided && locants?.length === count)
+      yield* this.#replacementsAt(start, elidedMultiplier.lastIndex, locants);
+  }
+
+  *#replacementsAt(
+    start: number,
+    from: number,
+    locants: readonly Locant[] | undefined,
+    count = locants?.length ?? 1,
+  ): Generator<{ item: Item; end: number }> {
+    const place = { ...(locants ? { locants } : {}), count, start };
+    for (const { value, end } of wordsAt(this.lexicon.words, this.name.lower, from)) {
+      if (value.kind === 'replacement')
+        yield { item: { kind: 'replacement', ...place, atomicNumber: value.atomicNumber, end }, end };
+    }
   }
 
   /** Ends of words like `disulfanyl` that begin where a multiplier could be read as well. */
@@ -172,11 +201,8 @@ export class ItemReader {
     for (const word of wordsAt(this.lexicon.words, lower, from)) {
       if (word.value.kind === 'hydro')
         yield { item: { kind: 'hydro', ...place, end: word.end }, end: word.end };
-      if (word.value.kind === 'replacement') {
-        const { atomicNumber } = word.value;
-        yield { item: { kind: 'replacement', ...place, atomicNumber, end: word.end }, end: word.end };
-      }
     }
+    yield* this.#replacementsAt(start, from, locants, count);
     const direct = count > 1 ? this.#radicalEnds(start, locants) : undefined;
     const plain = count > 1 && lower.startsWith('n-', from) ? from + 2 : from;
     const groups = groupsAt(text, lower, plain, this.lexicon).filter(

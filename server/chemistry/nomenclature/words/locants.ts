@@ -1,7 +1,9 @@
 /** Locants and stereodescriptors as they are written in front of words. */
 import type { Locant, StereoWord } from '../tree.ts';
 
-const one = "(?:\\d+(?:[a-z](?![a-z]))?'*(?:-N'*(?![a-z]))?|[NnOSP]\\d*'*|[αβγδεω]'*|[omp])";
+/** `2(10)`: a bond between two places that do not follow each other (P-31.1.4.2.4). */
+const compound = "(?:\\(\\d+[a-z]?'*\\))?";
+const one = `(?:\\d+(?:[a-z](?![a-z]))?'*${compound}(?:-N'*(?![a-z]))?|[NnOSP]\\d*'*|[αβγδεω]'*|[omp])`;
 const list = new RegExp(`(${one}(?:, ?${one})*)-`, 'y');
 const indicated = /\(?((?:\d+[a-z]?'*[Hh](?![a-z]))(?:,\d+[a-z]?'*[Hh](?![a-z]))*)\)?-?/y;
 const descriptor =
