@@ -4,6 +4,7 @@ import { noSuchPlace, type BuiltUnit } from './built-unit.ts';
 import type { Choices } from './choices.ts';
 import type { Draft } from './draft.ts';
 import { placeEnding } from './endings.ts';
+import { properNumbering } from './numbering.ts';
 import { Places } from './places.ts';
 import { placeSubstitution } from './substitutions.ts';
 import { placeUnsaturations } from './unsaturations.ts';
@@ -36,6 +37,8 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
     for (const locant of locants) {
       const atom = places.at(locant);
       if (atom === undefined) return draft.fail(range, noSuchPlace(locant));
+      if (draft.atoms[atom]!.atomicNumber !== 6)
+        return draft.fail(range, `Only a carbon is replaced so (P-15.4.1); position ${locant} is none.`);
       draft.atoms[atom]!.atomicNumber = atomicNumber;
       if (atomicNumber !== 7 && atomicNumber !== 5 && atomicNumber !== 15 && atomicNumber !== 14)
         draft.atoms[atom]!.mancude = false;
@@ -48,23 +51,14 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
   if (!placeUnsaturations(unit, places, draft, choices)) return undefined;
   let substitutions = 0;
   let used: Substitution | undefined;
-  for (const ways of unit.groupings) {
-    const way = ways[choices.pick(ways.length)]!;
-    draft.cost += way.cost;
-    for (const substitution of way.substitutions) {
-      substitutions += substitution.count;
-      used = substitution;
-      if (substitution.bracketAt !== undefined) {
-        draft.brackets.push({
-          at: substitution.bracketAt,
-          end: substitution.range.end,
-          depth: draft.owner.depth + 1,
-        });
-      }
-      if (!placeSubstitution(substitution, unit, built, draft, choices, buildUnit)) return undefined;
-    }
+  const chosen = substitutionsOf(unit, draft, choices);
+  places.fresh &&= !chosen.some(hasNumbers);
+  for (const substitution of chosen) {
+    substitutions += substitution.count;
+    used = substitution;
+    if (!placeSubstitution(substitution, unit, built, draft, choices, buildUnit)) return undefined;
   }
-  // A single group on a ring whose places are all alike needs no locant, and one other than 1 is not about the ring.
+  // A single group on a ring whose places are all alike needs no locant; one that is written is hardly about the ring.
   if (
     substitutions === 1 &&
     places.alike &&
@@ -72,8 +66,11 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
     unit.endings.length + unit.unsaturations.length === 0
   ) {
     for (const inserted of places.inserted) draft.insertions.splice(draft.insertions.indexOf(inserted), 1);
-    if (used?.locants !== undefined && used.locants[0] !== '1') draft.cost += 3;
+    if (used?.locants !== undefined) draft.cost += used.locants[0] === '1' ? 1 : 3;
   }
+  // Nobody leaves out the locant of a group that takes its atom out of an aromatic ring.
+  if (places.chosen.some((atom) => isOverfull(atom, draft))) return undefined;
+  if (places.opened && places.given && isMisnumbered(unit, places)) draft.cost += misnumbered;
   for (const word of unit.stereo) {
     if (word.locant === undefined) draft.loose.push({ atoms, word });
     else {
@@ -99,6 +96,39 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
     });
   }
   return built;
+}
+
+/** The substituents in the understanding that is tried now; those with numbers first, which leave the others the rest. */
+function substitutionsOf(unit: Unit, draft: Draft, choices: Choices): Substitution[] {
+  const found: Substitution[] = [];
+  for (const ways of unit.groupings) {
+    const way = ways[choices.pick(ways.length)]!;
+    draft.cost += way.cost;
+    found.push(...way.substitutions);
+    for (const { bracketAt, range } of way.substitutions)
+      if (bracketAt !== undefined)
+        draft.brackets.push({ at: bracketAt, end: range.end, depth: draft.owner.depth + 1 });
+  }
+  return [...found.filter(hasNumbers), ...found.filter((one) => !hasNumbers(one))];
+}
+
+/** More than any doubt about brackets: nobody leaves a locant out of a name whose other locants are wrong. */
+const misnumbered = 4;
+
+const hasNumbers = ({ locants }: Substitution) => locants?.some((locant) => /^\d/.test(locant)) === true;
+
+function isOverfull(atom: number, draft: Draft): boolean {
+  return !draft.usualHydrogen.includes(atom) && draft.freeBesideRing(atom) < 0;
+}
+
+/** Lower locants would be possible. Indicated hydrogen and replaced atoms come before all else, and are left alone. */
+function isMisnumbered(unit: Unit, places: Places): boolean {
+  if (unit.indicated.length + unit.hydro.length + unit.replacements.length > 0) return false;
+  if (unit.endings.some((ending) => ending.addedHydrogen !== undefined)) return false;
+  const { skeleton } = places;
+  if (unit.unsaturations.length > 0 && skeleton.kind === 'fixed') return false;
+  const attached = unit.attach ? [{ rank: 0, positions: [unit.attach.atom] } as const] : [];
+  return properNumbering(skeleton, [...attached, ...places.cited]) !== undefined;
 }
 
 const rank = (ending: Ending) => (ending.suffix.kind === 'at' ? 0 : ending.locants ? 1 : 2);

@@ -11,6 +11,7 @@ export function placeEnding(ending: Ending, built: BuiltUnit, draft: Draft, choi
   if (!atoms) return false;
   atoms.forEach((atom, index) => {
     if (draft.failure) return;
+    built.places.cite(0, ending.locants !== undefined, atom);
     if (ending.suffix.kind === 'free') {
       const order = Number(ending.suffix.group);
       if (draft.free(atom) < order) draft.fail(ending.range, fifthBond(built, atom));
@@ -123,6 +124,7 @@ function endingAtoms(ending: Ending, built: BuiltUnit, draft: Draft, choices: Ch
     const atom = options[first]!;
     from = atoms.indexOf(atom);
     chosen.push(atom);
+    if (order === 1) places.chosen.push(atom);
   }
   if (atoms.length > 1) {
     draft.insert(ending.at, `-${chosen.map((atom) => places.locantOf(atom)!).join(',')}-`);

@@ -1,6 +1,7 @@
 /** The numbered places of one unit while it is built. */
 import type { Locant, Unit } from '../tree.ts';
 import type { Draft, Insertion } from './draft.ts';
+import type { Cited } from './numbering.ts';
 import type { SkeletonGraph } from './skeleton.ts';
 
 export class Places {
@@ -14,6 +15,12 @@ export class Places {
   fresh: boolean;
   /** Carbons that are part of an acid, amide, nitrile or aldehyde group, which take no substituent by themselves. */
   readonly spent = new Set<number>();
+  /** What is cited with a locant, in the order of building; see `numbering.ts`. */
+  readonly cited: Cited[] = [];
+  /** The name gave a locant on this parent. */
+  given = false;
+  /** Atoms that were chosen for groups with a single bond. */
+  readonly chosen: number[] = [];
   /** Locants written in for substituents. */
   readonly inserted: Insertion[] = [];
   /** Where `o`, `m`, `p` meets a ring without anything on it: the place that the next substituent takes. */
@@ -46,6 +53,14 @@ export class Places {
       this.unit.replacements.length === 0 &&
       this.unit.hydro.length === 0
     );
+  }
+
+  /** Notes that something is on an atom of the parent, or on the bond between two, for the rule of lowest locants. */
+  cite(rank: Cited['rank'], given: boolean, ...atoms: readonly [number] | readonly [number, number]): void {
+    const positions = atoms.map((atom) => this.atoms.indexOf(atom)) as [number] | [number, number];
+    if (positions.includes(-1)) return;
+    this.cited.push({ rank, positions });
+    this.given ||= given;
   }
 
   name(locant: Locant, atom: number): void {

@@ -58,6 +58,7 @@ export function placeSubstitution(
       host = options[places.fresh ? 0 : choices.pick(options.length)]!;
       from = order.indexOf(host);
       chosen.push(places.locantOf(host)!);
+      if (free.order === 1) places.chosen.push(host);
       places.fresh = false;
     }
     if (host === undefined || draft.free(host) < free.order) {
@@ -65,6 +66,7 @@ export function placeSubstitution(
       return false;
     }
     draft.bond(host, free.atom, free.order);
+    places.cite(2, given !== undefined, host);
   }
   if (!given && (offered > 1 || substitution.count > 1) && places.atoms.length > 1) {
     places.inserted.push(draft.insert(substitution.at, `${chosen.join(',')}-`));

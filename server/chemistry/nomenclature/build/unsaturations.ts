@@ -21,6 +21,7 @@ export function placeUnsaturations(unit: Unit, places: Places, draft: Draft, cho
           );
           return false;
         }
+        places.cite(1, true, from, to);
       }
       places.fresh = false;
       continue;
@@ -34,7 +35,7 @@ export function placeUnsaturations(unit: Unit, places: Places, draft: Draft, cho
     for (let index = 0; index < count; index++) {
       // On a bare ring the first double bond is at position 1.
       const options = bondsOf(places, draft, order).filter(
-        (bond) => bond.position >= from && !cumulated(draft, bond.from, bond.to),
+        (bond) => bond.position >= from && mayFollow(draft, bond, places),
       );
       const first =
         index === 0 && places.alike && unit.endings.every((ending) => ending.locants !== undefined);
@@ -42,6 +43,7 @@ export function placeUnsaturations(unit: Unit, places: Places, draft: Draft, cho
       if (only.length === 0) return false;
       const bond = only[choices.pick(only.length)]!;
       raise(draft, bond.from, bond.to, order);
+      places.cite(1, false, bond.from, bond.to);
       places.fresh = false;
       from = bond.position + 1;
       chosen.push(places.locantOf(bond.from)!);
@@ -99,6 +101,14 @@ function bondsOf(
   return found;
 }
 
-function cumulated(draft: Draft, from: number, to: number): boolean {
-  return [from, to].some((atom) => draft.neighbours[atom]!.some(({ bond }) => draft.bonds[bond]!.order > 1));
+/**
+ * Multiple bonds side by side are meant only along a chain: small rings hold none, and beside C=O it would be a ketene.
+ * `butadiene` by itself is the 1,3 compound (common practice, no source); `pentadiene` is any of four.
+ */
+function mayFollow(draft: Draft, bond: { from: number; to: number }, places: Places): boolean {
+  const beside = [bond.from, bond.to].flatMap((atom) =>
+    draft.neighbours[atom]!.filter((one) => draft.bonds[one.bond]!.order > 1),
+  );
+  if (places.skeleton.kind !== 'chain' || places.atoms.length < 5) return beside.length === 0;
+  return beside.every(({ atom }) => places.atoms.includes(atom));
 }

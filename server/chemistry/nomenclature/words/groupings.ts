@@ -80,20 +80,30 @@ export function groupingsOf(
   const text = name.lower.slice(first.start, last.end);
   const perhalo = run.length === 2 && perhalogenated.test(text);
   // `trimethylphenylsilane`: a parent of one atom takes the groups side by side.
-  const small = parent.skeletons.every((one) => one.atoms.length === 1) && !first.locants && first.count > 1;
+  const single = parent.skeletons.every((one) => one.atoms.length === 1);
+  const small = single && !first.locants && first.count > 1;
+  // `N-methylbenzylamine` (P-62.2.2.1): a single group on the nitrogen would need no locant, so there are two.
+  const secondary = single && first.locants?.every((locant) => /^N'*$/.test(locant)) === true;
   if (!last.bracketed) {
     const outer = !first.locants || first.locants.length === 1;
     const outside = outer ? nest(joined([withoutLocants(first), ...run.slice(1)])) : undefined;
     if (outside) {
-      const cost = small && !links(last) && !perhalo && !run.slice(1).some(links) ? 2 : 0;
+      const cost = secondary ? 3 : small && !links(last) && !perhalo && !run.slice(1).some(links) ? 2 : 0;
       found.push({ substitutions: [compound(outside, run, first.locants, false)], cost });
     }
-    const inside = first.locants && !outerLocant && hasPlaces(run[1]!) ? nest(joined(run)) : undefined;
+    const next = run.slice(1).find((item) => !links(item));
+    const inside = first.locants && !outerLocant && next && hasPlaces(next) ? nest(joined(run)) : undefined;
     if (inside) found.push({ substitutions: [compound(inside, run, undefined, true)], cost: 0 });
   }
   if (outerLocant) return found;
   if (run.every(canStand) && !perhalo) {
-    const cost = first.locants ? 2 : run.slice(1).some(links) ? 1 : 0;
+    const cost = secondary
+      ? 0
+      : first.locants
+        ? 2
+        : run.slice(1).some(links) || outOfOrder(run, name)
+          ? 1
+          : 0;
     found.push({ substitutions: run.map((item) => substitution(item)), cost });
   }
   const rest = run.length > 2 && !last.bracketed && canStand(first) ? nest(joined(run.slice(1))) : undefined;
@@ -103,6 +113,20 @@ export function groupingsOf(
     found.push({ substitutions, cost: first.locants ? 2 : 1 });
   }
   return found;
+}
+
+/**
+ * Groups side by side are cited in alphabetical order (P-14.5); those that are not rather belong one on another. Alkyl
+ * groups are left in any order often enough for it to say nothing.
+ */
+function outOfOrder(run: readonly GroupItem[], name: PreparedName): boolean {
+  const alkyl = (item: GroupItem) =>
+    item.unit.skeletons.every((one) => one.kind === 'chain' && one.atoms[0]!.atomicNumber === 6);
+  if (run.every(alkyl)) return false;
+  const initials = run.map(
+    (item) => /[a-z]/.exec(name.lower.slice(item.unit.range.start, item.end))?.[0] ?? '',
+  );
+  return initials.some((initial, index) => index > 0 && initial < initials[index - 1]!);
 }
 
 function withoutLocants(item: GroupItem): GroupItem {

@@ -35,8 +35,17 @@ export function groupsAt(text: string, lower: string, offset: number, lexicon: L
   const found: Group[] = [];
   const words = wordsAt(lexicon.words, lower, offset);
   const radicalEnds = new Set(words.filter((word) => word.value.kind === 'radical').map((word) => word.end));
-  for (const word of words) {
-    const groups = groupsOf(word.value, text, lower, offset, word.end, lexicon);
+  const retained = Math.max(0, ...words.filter((word) => isRetained(word.value)).map((word) => word.end));
+  // The longest word first: `caproic acid` is of `capro`, not of `capr`.
+  const acidEnds = new Set<number>();
+  for (const word of words.reverse()) {
+    // `thioxanthene` is a ring, not xanthene with `thio`.
+    if (word.value.kind === 'radical' && word.value.linkAt !== undefined && word.end < retained) continue;
+    let groups = groupsOf(word.value, text, lower, offset, word.end, lexicon);
+    if (word.value.kind === 'acid') {
+      groups = groups.filter((group) => !acidEnds.has(group.end));
+      for (const group of groups) acidEnds.add(group.end);
+    }
     // `sulfanyl` is a word of its own, not `sulfane` with an ending.
     const made =
       word.value.kind === 'radical'
@@ -71,6 +80,10 @@ export function groupsAt(text: string, lower: string, offset: number, lexicon: L
   return found;
 }
 
+function isRetained(word: Word): boolean {
+  return word.kind === 'ring' || word.kind === 'parent';
+}
+
 function groupsOf(
   word: Word,
   text: string,
@@ -84,7 +97,8 @@ function groupsOf(
       const groups = withTails([chain(word.size)], start, chainTailsAt(text, lower, end, lexicon)).map(
         (group) => ({
           ...group,
-          normal: true,
+          // Methyl and ethyl have no isomers: `n-` before them is a nitrogen.
+          normal: word.size > 2,
         }),
       );
       if (lower.startsWith('oxy', end)) {
@@ -92,7 +106,7 @@ function groupsOf(
           ...bare([alkoxySkeleton(word.size)], start, end + 3),
           attach: { atom: 0, order: 1 as const },
         };
-        groups.push({ unit, role: 'radical', end: end + 3, normal: true });
+        groups.push({ unit, role: 'radical', end: end + 3, normal: word.size > 2 });
       }
       return groups;
     }

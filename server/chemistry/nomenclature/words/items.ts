@@ -224,10 +224,19 @@ export class ItemReader {
       if (locants?.length === 1 && count === 1 && group.locantBefore === true) {
         yield { item: { ...base, unit: attachedAt(group.unit, locants), joins: false }, end: group.end };
       }
-      if (normal && group.normal === true) yield { item: { ...base, joins: true }, end: group.end };
+      if (normal && group.normal === true)
+        yield { item: { ...base, unit: normalChain(group.unit), joins: true }, end: group.end };
       else yield { item: { ...base, joins: !locants, ...(locants ? { locants } : {}) }, end: group.end };
     }
   }
+}
+
+/** `n-hexanol`: the group is at the end of the chain, as the older use of `normal` has it (common practice, no source). */
+function normalChain(unit: Unit): Unit {
+  const [ending] = unit.endings;
+  if (!ending || !/^(?:ol|thiol|amine)$/.test(ending.suffix.name)) return unit;
+  if (ending.locants !== undefined || ending.count > 1 || unit.unsaturations.length > 0) return unit;
+  return { ...unit, endings: [{ ...ending, locants: ['1'] }] };
 }
 
 /** `1-naphthyl`, `8-tricyclo[…]undecanyl`: the locant in front is that of the free valence. */
