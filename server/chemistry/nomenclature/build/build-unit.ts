@@ -69,7 +69,9 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
     if (used?.locants !== undefined) draft.cost += used.locants[0] === '1' ? 1 : 3;
   }
   // Nobody leaves out the locant of a group that takes its atom out of an aromatic ring.
-  if (places.chosen.some((atom) => isOverfull(atom, draft))) return undefined;
+  const sibling = skeleton.mark !== undefined && unit.skeletons.length > 1;
+  const unsaid = sibling ? places.atoms : places.chosen;
+  if (unsaid.some((atom) => isOverfull(atom, draft))) return undefined;
   if (places.opened && places.given && isMisnumbered(unit, places)) draft.cost += misnumbered;
   for (const word of unit.stereo) {
     if (word.locant === undefined) draft.loose.push({ atoms, word });

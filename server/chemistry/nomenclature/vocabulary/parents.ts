@@ -2,7 +2,7 @@
  * Parents with retained names that carry a characteristic group or side chains themselves (`toluene`, `aniline`), and
  * mononuclear ones. Source: IUPAC Recommendations 2013, P-21.1, P-22.1.3, P-34.1.1, P-62.2.1, P-63.1.2, P-63.2.4,
  * P-66.1.6; 1979 recommendations A-12 and C-203 to C-205 for xylene, anisole, cresol and their kin.
- * Each line: name without final e, SMILES, locants in SMILES order; a fourth column marks siblings (`o-`, `m-`, `p-`)
+ * Each line: name without final e, SMILES, locants in SMILES order; a fourth column marks siblings (`o-`, `m-`, `p-`, `2,3-`)
  * that share the name when nothing tells them apart.
  */
 export type ParentLine = readonly [name: string, smiles: string, locants: string, mark?: string];
@@ -18,6 +18,18 @@ export const parents: readonly ParentLine[] = [
   ['cresol', 'Oc1c(C)cccc1', 'O 1 2 - 3 4 5 6', 'o-'],
   ['cresol', 'Oc1cc(C)ccc1', 'O 1 2 3 - 4 5 6', 'm-'],
   ['cresol', 'Oc1ccc(C)cc1', 'O 1 2 3 4 - 5 6', 'p-'],
+  ['xylenol', 'Oc1c(C)c(C)ccc1', 'O 1 2 - 3 - 4 5 6', '2,3-'],
+  ['xylenol', 'Oc1c(C)cc(C)cc1', 'O 1 2 - 3 4 - 5 6', '2,4-'],
+  ['xylenol', 'Oc1c(C)ccc(C)c1', 'O 1 2 - 3 4 5 - 6', '2,5-'],
+  ['xylenol', 'Oc1c(C)cccc1C', 'O 1 2 - 3 4 5 6 -', '2,6-'],
+  ['xylenol', 'Oc1cc(C)c(C)cc1', 'O 1 2 3 - 4 - 5 6', '3,4-'],
+  ['xylenol', 'Oc1cc(C)cc(C)c1', 'O 1 2 3 - 4 5 - 6', '3,5-'],
+  ['xylidin', 'Nc1c(C)c(C)ccc1', 'N 1 2 - 3 - 4 5 6', '2,3-'],
+  ['xylidin', 'Nc1c(C)cc(C)cc1', 'N 1 2 - 3 4 - 5 6', '2,4-'],
+  ['xylidin', 'Nc1c(C)ccc(C)c1', 'N 1 2 - 3 4 5 - 6', '2,5-'],
+  ['xylidin', 'Nc1c(C)cccc1C', 'N 1 2 - 3 4 5 6 -', '2,6-'],
+  ['xylidin', 'Nc1cc(C)c(C)cc1', 'N 1 2 3 - 4 - 5 6', '3,4-'],
+  ['xylidin', 'Nc1cc(C)cc(C)c1', 'N 1 2 3 - 4 5 - 6', '3,5-'],
   ['toluidin', 'Nc1c(C)cccc1', 'N 1 2 - 3 4 5 6', 'o-'],
   ['toluidin', 'Nc1cc(C)ccc1', 'N 1 2 3 - 4 5 6', 'm-'],
   ['toluidin', 'Nc1ccc(C)cc1', 'N 1 2 3 4 - 5 6', 'p-'],
@@ -147,8 +159,8 @@ export const parents: readonly ParentLine[] = [
   ['furfural', 'O=Cc1ccco1', '- - 2 3 4 5 -'],
   ['pyrrolidon', 'O=C1CCCN1', '- 2 3 4 5 1/N'],
   ['2-pyrrolidon', 'O=C1CCCN1', '- 2 3 4 5 1/N'],
-  ['1-naphthol', 'Oc1cccc2ccccc12', 'O 1 2 3 4 4a 5 6 7 8 8a'],
-  ['2-naphthol', 'c1c(O)ccc2ccccc12', '1 2 O 3 4 4a 5 6 7 8 8a'],
+  ['naphthol', 'Oc1cccc2ccccc12', 'O 1 2 3 4 4a 5 6 7 8 8a', '1-'],
+  ['naphthol', 'c1c(O)ccc2ccccc12', '1 2 O 3 4 4a 5 6 7 8 8a', '2-'],
   ['α-naphthol', 'Oc1cccc2ccccc12', ''],
   ['β-naphthol', 'c1c(O)ccc2ccccc12', ''],
 ];
