@@ -78,6 +78,21 @@ export interface Grouping {
   readonly cost: number;
 }
 
+/** What joins several like units (`oxydi…`, `methylenebis(…)`; P-15.3), or is continued by one (`phenyleneoxy`). */
+export interface Joint extends OpenPlace {
+  readonly link: Unit;
+  /** What is on the link. */
+  readonly unit: Unit;
+  /** How many units are on the link; 1 where a divalent group continues it. */
+  readonly count: number;
+  /** On the units, one each, primed from the second on. */
+  readonly locants?: readonly Locant[];
+  /** Substituents cited before the link, with primed locants on the units. */
+  readonly groupings: readonly (readonly Grouping[])[];
+  readonly stereo: readonly StereoWord[];
+  readonly range: TextRange;
+}
+
 export interface Unit {
   /** The skeletons that the parent's name can mean, with what tells them apart in a completed name. */
   readonly skeletons: readonly SkeletonGraph[];
@@ -94,6 +109,10 @@ export interface Unit {
   readonly parentAt: number;
   /** Free valences of a radical that its vocabulary entry fixed: atom of the skeleton and bond order. */
   readonly attach?: { readonly atom: number; readonly order: 1 | 2 | 3; readonly count?: number };
+  /** Atoms of the skeleton with a free valence each, where the group joins several others. */
+  readonly links?: readonly number[];
+  /** The unit stands several times round a linking group, or continues one. */
+  readonly joint?: Joint;
   /** Atom of the skeleton that takes the substituent of a linking group (`oxy`, `carbonyl`, `amino`). */
   readonly linkAt?: number;
   /** The linking group cannot stand without a substituent. */

@@ -4,13 +4,16 @@ import { noSuchPlace, type BuiltUnit } from './built-unit.ts';
 import type { Choices } from './choices.ts';
 import type { Draft } from './draft.ts';
 import { placeEnding } from './endings.ts';
+import { buildJoint } from './joints.ts';
 import { properNumbering } from './numbering.ts';
 import { Places } from './places.ts';
+import type { SkeletonGraph } from './skeleton.ts';
 import { placeSubstitution } from './substitutions.ts';
 import { placeUnsaturations } from './unsaturations.ts';
 
 /** The unit's atoms are added; undefined when the name asks for something that cannot be, which `draft.failure` says. */
 export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit | undefined {
+  if (unit.joint) return buildJoint(unit.joint, draft, choices, buildUnit);
   const skeleton = unit.skeletons[choices.pick(unit.skeletons.length)]!;
   if (unit.skeletons.length > 1 && skeleton.mark !== undefined) {
     draft.insert(unit.parentAt, skeleton.mark);
@@ -30,6 +33,7 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
     else if (!draft.atoms[atom]!.mancude) draft.settleCapacity(atom, undefined, unit.attach.order + joined);
     if (unit.needsLink === true && link >= 0 && link !== atom) draft.settleCapacity(link, undefined, 1);
   }
+  if (!unit.attach && unit.links) freeLinks(unit.links, skeleton, built, draft);
   skeleton.atoms.forEach((atom, index) => {
     if (atom.locants.includes('@')) built.sites.push(atoms[index]!);
   });
@@ -131,6 +135,17 @@ function isMisnumbered(unit: Unit, places: Places): boolean {
   if (unit.unsaturations.length > 0 && skeleton.kind === 'fixed') return false;
   const attached = unit.attach ? [{ rank: 0, positions: [unit.attach.atom] } as const] : [];
   return properNumbering(skeleton, [...attached, ...places.cited]) !== undefined;
+}
+
+/** Gives the atoms of a link their free valences. */
+function freeLinks(links: readonly number[], skeleton: SkeletonGraph, built: BuiltUnit, draft: Draft): void {
+  const { atoms } = built.places;
+  for (const index of new Set(links)) {
+    const more = links.filter((one) => one === index).length;
+    if (skeleton.atoms[index]!.hydrogens !== undefined) draft.atoms[atoms[index]!]!.capacity += more;
+    else draft.settleCapacity(atoms[index]!, undefined, more);
+  }
+  built.free.push(...links.map((index) => ({ atom: atoms[index]!, order: 1 })));
 }
 
 const rank = (ending: Ending) => (ending.suffix.kind === 'at' ? 0 : ending.locants ? 1 : 2);

@@ -25,10 +25,17 @@ export function buildFunctionalClass(
   const copies =
     sites.length === 1 && built.length === 1 ? valences.reduce((sum, one) => sum + one.order, 0) : 1;
   if (functional.count !== undefined && functional.count !== copies) return false;
+  // `carbonyl dichloride`, but not `sulfonyl chloride`, whose organic group was forgotten.
+  if (
+    radicals.some(({ unit }) => unit.needsLink === true && unit.groupings.length === 0) &&
+    functional.count !== copies
+  )
+    return false;
   if (copies > 1) return repeated(group, valences, draft);
   if (word === 'ether' && valences.length === 1 && radicals[0]!.count === 1)
     valences.push(...again(radicals[0]!, draft, choices));
   if (valences.length !== sites.length) return false;
+  if (built.length === 1 && valences.length === 2 && valences[0]!.atom === valences[1]!.atom) return false;
   const atoms = addFunction(group, sites, draft);
   return sites.every((site, index) => join(draft, atoms[site]!, valences[index]!));
 }

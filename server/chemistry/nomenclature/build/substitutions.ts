@@ -37,7 +37,8 @@ export function placeSubstitution(
     const child = build(substitution.unit, draft, choices);
     draft.owner = owner;
     const [free, ...others] = child?.free ?? [];
-    if (!child || !free || others.length > 0) {
+    const bridge = given !== undefined && substitution.count === 1 && hosts.length === others.length + 1;
+    if (!child || !free || (others.length > 0 && !bridge)) {
       draft.fail(substitution.range, 'This group has no single free valence with which it could be bound.');
       return false;
     }
@@ -67,6 +68,16 @@ export function placeSubstitution(
     }
     draft.bond(host, free.atom, free.order);
     places.cite(2, given !== undefined, host);
+    // `2,3-epoxy`, `3,4-methylenedioxy`: further valences are bound to further places (P-63.5).
+    for (const [place, { atom, order }] of others.entries()) {
+      const next = hosts[place + 1]!;
+      if (next === host || draft.free(next) < order) {
+        draft.fail(substitution.range, fifthBond(built, next));
+        return false;
+      }
+      draft.bond(next, atom, order);
+      places.cite(2, true, next);
+    }
   }
   if (!given && (offered > 1 || substitution.count > 1) && places.atoms.length > 1) {
     places.inserted.push(draft.insert(substitution.at, `${chosen.join(',')}-`));
@@ -103,7 +114,7 @@ function meantLocants(
 }
 
 /** Places that a group without locant can mean. Nitrogen takes only carbon groups unasked. */
-function openPlaces(
+export function openPlaces(
   built: BuiltUnit,
   draft: Draft,
   before: number,

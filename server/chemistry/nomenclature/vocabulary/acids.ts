@@ -40,6 +40,8 @@ export const acids: readonly AcidLine[] = [
   ['angel', 'angel', 'C/C=C(/C)C', '4 3 2 - 1', '1'],
   ['propiol', 'propiol', 'C#CC', '3 2 1', '1'],
   ['oxal', 'oxal', 'CC', '1 2', '1 2'],
+  ['diglycol', 'diglycol', 'CCOCC', '1 2 3 4 5', '1 5'],
+  ['thiodiglycol', 'thiodiglycol', 'CCSCC', '1 2 3 4 5', '1 5'],
   ['malon', 'malon', 'CCC', '1 2 3', '1 3'],
   ['succin', 'succin', 'CCCC', '1 2 3 4', '1 4'],
   ['glutar', 'glutar', 'CCCCC', '1 2 3 4 5', '1 5'],

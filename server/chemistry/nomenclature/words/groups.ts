@@ -48,7 +48,7 @@ export function groupsAt(text: string, lower: string, offset: number, lexicon: L
     }
     // `sulfanyl` is a word of its own, not `sulfane` with an ending.
     const made =
-      word.value.kind === 'radical'
+      word.value.kind === 'radical' || word.value.kind === 'link'
         ? groups
         : groups.filter((group) => group.role === 'parent' || !radicalEnds.has(group.end));
     found.push(...made);
@@ -116,19 +116,28 @@ function groupsOf(
         attach: { atom: 0, order: word.order },
         ...(word.linkAt === undefined ? {} : { linkAt: word.linkAt }),
         ...(word.needsLink === true ? { needsLink: true } : {}),
+        ...(word.links ? { links: word.links } : {}),
       };
       return [{ unit, role: 'radical', end }];
     }
     case 'contracted': {
-      const yl: Ending = { suffix: freeValence, count: 1, at: start, range: { start, end } };
+      const yl: Ending = { suffix: freeValence, count: word.valences, at: start, range: { start, end } };
       return [
         {
           unit: { ...bare(word.skeletons(), start, end), endings: [yl] },
           role: 'radical',
           end,
-          locantBefore: true,
+          locantBefore: word.valences === 1,
         },
       ];
+    }
+    case 'link': {
+      const unit: Unit = {
+        ...bare(word.skeletons(), start, end),
+        links: word.links,
+        ...(word.linkAt === undefined ? {} : { linkAt: word.linkAt }),
+      };
+      return [{ unit, role: 'radical', end }];
     }
     case 'branched':
       return branchedForms(word.skeletons, word.oxy, text, lower, start, end, lexicon);

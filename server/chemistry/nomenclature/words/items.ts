@@ -5,6 +5,7 @@
 import type { Locant, Unit } from '../tree.ts';
 import type { Item } from './item.ts';
 import { groupsAt } from './groups.ts';
+import { chainOfLinks } from './joints.ts';
 import { wordsAt, type Lexicon } from './lexicon.ts';
 import { indicatedAt, locantsAt, stereoAt } from './locants.ts';
 import type { PreparedName } from './prepared.ts';
@@ -64,6 +65,8 @@ export class ItemReader {
     for (const row of this.rowsAt(offset)) {
       const made = structured(row.items, this.name);
       if (made) found.push({ ...made, end: row.end });
+      const link = /[([]/.test(this.name.text[offset - 1] ?? '') ? chainOfLinks(row.items) : undefined;
+      if (link) found.push({ unit: link, count: 1, role: 'radical', end: row.end });
       if (found.length >= rowCap) break;
     }
     return found;
@@ -156,7 +159,10 @@ export class ItemReader {
   #radicalEnds(start: number, locants: readonly Locant[] | undefined): ReadonlySet<number> {
     const from = locants === undefined ? start : (locantsAt(this.name.text, start)?.end ?? start);
     const { text, lower } = this.name;
-    const words = wordsAt(this.lexicon.words, lower, from).filter((word) => word.value.kind === 'radical');
+    // `methylenedioxy`: two of `oxy`.
+    const words = wordsAt(this.lexicon.words, lower, from).filter(
+      (word) => word.value.kind === 'radical' && word.value.needsLink !== true,
+    );
     // `tridecyl` is one group of thirteen carbons, not three of ten.
     const alkyls = lower.startsWith('tri', from) ? groupsAt(text, lower, from, this.lexicon) : [];
     return new Set([...words, ...alkyls].map((one) => one.end));
@@ -175,7 +181,7 @@ export class ItemReader {
     if (bracket === '(' || bracket === '[') {
       for (const inner of this.stretchesAt(from + 1)) {
         if (
-          inner.role !== 'radical' ||
+          (inner.role !== 'radical' && count === 1) ||
           text[inner.end] !== (bracket === '(' ? ')' : ']') ||
           (inner.count !== 1 && count !== 1)
         )
@@ -189,7 +195,7 @@ export class ItemReader {
             count: Math.max(count, inner.count),
             unit: inner.unit,
             bodyAt,
-            role: 'radical',
+            role: inner.role,
             joins: !locants,
             bracketed: true,
             end,

@@ -13,13 +13,22 @@ import {
   simplePrefixes,
 } from '../vocabulary/prefixes.ts';
 import { rings } from '../vocabulary/rings.ts';
+import { links, linkingToo, ringLinks } from '../vocabulary/links.ts';
 import { suffixes } from '../vocabulary/suffixes.ts';
 
 export type Word =
   | { kind: 'multiplier'; count: number; grouped: boolean }
   | { kind: 'alkane'; size: number }
-  | { kind: 'radical'; skeletons: Lazy; order: 1 | 2 | 3; linkAt?: number; needsLink?: boolean }
-  | { kind: 'contracted'; skeletons: Lazy }
+  | {
+      kind: 'radical';
+      skeletons: Lazy;
+      order: 1 | 2 | 3;
+      linkAt?: number;
+      needsLink?: boolean;
+      links?: readonly number[];
+    }
+  | { kind: 'contracted'; skeletons: Lazy; valences: 1 | 2 }
+  | { kind: 'link'; skeletons: Lazy; links: readonly number[]; linkAt?: number }
   | { kind: 'branched'; skeletons: Lazy; oxy: Lazy }
   | { kind: 'ring'; skeletons: Lazy }
   | { kind: 'parent'; skeletons: Lazy; extensible: boolean }
@@ -111,7 +120,15 @@ export function createLexicon(): Lexicon {
   ] as const) {
     for (const [name, smiles, locants, linkAt] of lines) {
       const skeletons = lazily(() => [skeletonFromSmiles(group(smiles), locants)]);
-      put(name, { kind: 'radical', order: order(smiles), skeletons, linkAt, needsLink });
+      const both = linkingToo[name];
+      put(name, {
+        kind: 'radical',
+        order: order(smiles),
+        skeletons,
+        linkAt,
+        needsLink,
+        ...(both ? { links: both } : {}),
+      });
     }
   }
   const ringSkeletons = new Map<string, Lazy>();
@@ -121,7 +138,10 @@ export function createLexicon(): Lexicon {
     put(name, { kind: 'ring', skeletons });
   }
   for (const [name, ring] of contractedRings)
-    put(name, { kind: 'contracted', skeletons: ringSkeletons.get(ring)! });
+    put(name, { kind: 'contracted', skeletons: ringSkeletons.get(ring)!, valences: 1 });
+  for (const [name, ring] of ringLinks)
+    put(name, { kind: 'contracted', skeletons: ringSkeletons.get(ring)!, valences: 2 });
+  putLinks(put);
   for (const [name, smiles, locants] of branchedStems) {
     put(name, {
       kind: 'branched',
@@ -150,6 +170,20 @@ export function createLexicon(): Lexicon {
     if (suffix.name.length > 2) list.push(suffix.name);
   }
   return { words, suffixes: endings, list };
+}
+
+/** Divalent groups by name, and the chains of `methylene` (`hexamethylene`). */
+function putLinks(put: (word: string, value: Word) => void): void {
+  for (const [name, smiles, locants, atoms, linkAt] of links) {
+    const skeletons = lazily(() => [skeletonFromSmiles(smiles, locants)]);
+    put(name, { kind: 'link', skeletons, links: atoms, ...(linkAt === undefined ? {} : { linkAt }) });
+  }
+  for (let size = 3; size <= 12; size++)
+    put(`${numericalTerm(size)}methylene`, {
+      kind: 'link',
+      skeletons: lazily(() => [chain(size)]),
+      links: [0, size - 1],
+    });
 }
 
 /** A word as people write it: `methyl` and `methane` for the stem, `toluene` with its final e. */

@@ -6,6 +6,7 @@
 import type { Grouping, Locant, StereoWord, Unit } from '../tree.ts';
 import { groupingsOf, isOuter, linkedGroupings, runsOf } from './groupings.ts';
 import type { GroupItem, Item } from './item.ts';
+import { asLink, multiplied, valencesOf, withLinksJoined } from './joints.ts';
 import type { PreparedName } from './prepared.ts';
 
 export interface Structured {
@@ -15,53 +16,21 @@ export interface Structured {
 }
 
 /** The unit that a row means, or undefined when the pieces do not go together. */
-export function structured(items: readonly Item[], name: PreparedName, depth = 0): Structured | undefined {
+export function structured(row: readonly Item[], name: PreparedName, depth = 0): Structured | undefined {
+  const items = withLinksJoined(row);
   const last = items[items.length - 1];
   if (last?.kind !== 'group' || depth > 60) return undefined;
   const nestedAs = (inner: readonly Item[]): Unit | undefined => {
     const made = structured(inner, name, depth + 1);
     return made?.count === 1 && made.role === 'radical' ? made.unit : undefined;
   };
-  const stereo: StereoWord[] = [];
-  const indicated: Locant[] = [];
-  const hydro: {
-    locants?: readonly Locant[];
-    count: number;
-    at: number;
-    range: { start: number; end: number };
-  }[] = [];
-  const replacements: {
-    atomicNumber: number;
-    locants: readonly Locant[];
-    range: { start: number; end: number };
-  }[] = [];
-  const groups: GroupItem[] = [];
-  for (const item of items.slice(0, -1)) {
-    if (item.kind === 'stereo') stereo.push(...item.words);
-    else if (item.kind === 'indicated') indicated.push(...item.locants);
-    else if (item.kind === 'hydro') {
-      const range = { start: item.start, end: item.end };
-      hydro.push({
-        count: item.count,
-        at: item.start,
-        range,
-        ...(item.locants ? { locants: item.locants } : {}),
-      });
-    } else if (item.kind === 'replacement') {
-      const places = item.locants ?? (item.count === 1 ? ['1'] : undefined);
-      if (places?.length !== item.count) return undefined;
-      replacements.push({
-        atomicNumber: item.atomicNumber,
-        locants: places,
-        range: { start: item.start, end: item.end },
-      });
-    } else {
-      if (item.role !== 'radical') return undefined;
-      const single = item.locants?.length === 1 && /^[omp]$/.test(item.locants[0]!);
-      if (item.locants && item.locants.length !== item.count && !single && !isOuter(item)) return undefined;
-      groups.push(item);
-    }
+  if (last.count > 1) {
+    const around = roundLink(items, last, name, nestedAs);
+    if (around) return { unit: withRange(around, items), count: 1, role: last.role };
   }
+  const prefixes = prefixesOf(items.slice(0, -1));
+  if (!prefixes) return undefined;
+  const { stereo, indicated, hydro, replacements, groups } = prefixes;
   let base: Unit | undefined = last.unit;
   if (last.locants) {
     if (last.count > 1) return undefined;
@@ -71,8 +40,13 @@ export function structured(items: readonly Item[], name: PreparedName, depth = 0
   const groupings: (readonly Grouping[])[] = [...base.groupings];
   if (base.linkAt !== undefined) {
     const linked = linkedGroupings(items.slice(0, -1), groups, base, last, nestedAs);
-    if (!linked) return undefined;
+    if (!linked) {
+      // `(oxy)` by itself can still join others.
+      if (items.length > 1 || !base.links) return undefined;
+      return { unit: { ...asLink(base), needsLink: true }, count: last.count, role: last.role };
+    }
     if (linked.length > 0) {
+      if (last.count > 1 && groups.length > 0) return undefined;
       const unit = { ...base, groupings: [linked] };
       return { unit: withRange(unit, items), count: groups.length === 0 ? last.count : 1, role: last.role };
     }
@@ -93,6 +67,75 @@ export function structured(items: readonly Item[], name: PreparedName, depth = 0
   // `diethyl` before a space: two radicals; `dimethylpropyl` is one.
   if (last.count > 1 && groups.length > 0) return undefined;
   return { unit: withRange(unit, items), count: last.count, role: last.role };
+}
+
+/** What stands before a parent, by what it does. */
+interface Prefixes {
+  readonly stereo: StereoWord[];
+  readonly indicated: Locant[];
+  readonly hydro: Unit['hydro'][number][];
+  readonly replacements: Unit['replacements'][number][];
+  readonly groups: GroupItem[];
+}
+
+function prefixesOf(items: readonly Item[]): Prefixes | undefined {
+  const found: Prefixes = { stereo: [], indicated: [], hydro: [], replacements: [], groups: [] };
+  for (const item of items) {
+    switch (item.kind) {
+      case 'stereo':
+        found.stereo.push(...item.words);
+        break;
+      case 'indicated':
+        found.indicated.push(...item.locants);
+        break;
+      case 'hydro': {
+        const { start: at, end, count, locants } = item;
+        found.hydro.push({ count, at, range: { start: at, end }, ...(locants ? { locants } : {}) });
+        break;
+      }
+      case 'replacement': {
+        const { start, end, atomicNumber, count } = item;
+        const locants = item.locants ?? (count === 1 ? ['1'] : undefined);
+        if (locants?.length !== count) return undefined;
+        found.replacements.push({ atomicNumber, locants, range: { start, end } });
+        break;
+      }
+      case 'group':
+        if (item.role !== 'radical' || !locantsFit(item)) return undefined;
+        found.groups.push(item);
+    }
+  }
+  return found;
+}
+
+/** A locant for each, `o-` for one or two, or one for each free valence of a bridge. */
+function locantsFit(item: GroupItem): boolean {
+  const { locants, count, unit } = item;
+  if (!locants || locants.length === count || isOuter(item)) return true;
+  if (locants.length === 1) return /^[omp]$/.test(locants[0]!);
+  return count === 1 && locants.length === valencesOf(unit);
+}
+
+/** Like units on a link, with the substituents that their primed locants tell apart. */
+function roundLink(
+  items: readonly Item[],
+  units: GroupItem,
+  name: PreparedName,
+  nest: (inner: readonly Item[]) => Unit | undefined,
+): Unit | undefined {
+  if (units.locants) return undefined;
+  const prefixes = prefixesOf(items.slice(0, -2));
+  if (!prefixes || prefixes.indicated.length + prefixes.hydro.length + prefixes.replacements.length > 0)
+    return undefined;
+  const groupings: (readonly Grouping[])[] = [];
+  for (const run of runsOf(prefixes.groups)) {
+    const ways = groupingsOf(run, units.unit, name, nest).filter((way) =>
+      way.substitutions.every((one) => one.locants !== undefined),
+    );
+    if (ways.length === 0) return undefined;
+    groupings.push(ways);
+  }
+  return multiplied(items[items.length - 2], units, groupings, prefixes.stereo);
 }
 
 function withRange(unit: Unit, items: readonly Item[]): Unit {
