@@ -42,7 +42,9 @@ const sortedLimit = 16;
  */
 export function enumerateStereoisomers(input: Molecule, cap = 64): StereoisomerList {
   const molecule = normalise(input);
-  const candidates = distinctCandidates(molecule);
+  const possible = stereoCandidates(molecule);
+  const classes = possible.length > 0 ? constitutionalClasses(molecule) : noClasses;
+  const candidates = distinctCandidates(molecule, possible, classes);
   const statedAt = candidates.map((candidate) => statedElement(molecule, candidate));
   const kept = molecule.stereo.filter(isPolyhedral);
   const meaningless = molecule.stereo.filter(
@@ -63,7 +65,7 @@ export function enumerateStereoisomers(input: Molecule, cap = 64): StereoisomerL
     candidates.flatMap((candidate, index) =>
       matters(index) ? [{ candidate, stated: statedAt[index]?.element }] : [],
     );
-  const moves = symmetryMoves(molecule, candidates, kept);
+  const moves = areUnlike(candidates, classes) ? [] : symmetryMoves(molecule, candidates, kept);
 
   if (moves?.length === 0) {
     // No symmetry touches an arrangement: each is a compound of its own.
@@ -119,15 +121,33 @@ function isPolyhedral({ kind }: StereoElement): boolean {
 }
 
 /** Candidates whose ligands are not plainly alike: two ligands that carry no candidate and share a class are. */
-function distinctCandidates(molecule: Molecule): StereoCandidate[] {
-  const classes = constitutionalClasses(molecule);
-  let candidates = stereoCandidates(molecule);
+function distinctCandidates(
+  molecule: Molecule,
+  possible: readonly StereoCandidate[],
+  classes: Int32Array,
+): StereoCandidate[] {
+  let candidates = [...possible];
   for (let before = -1; before !== candidates.length;) {
     before = candidates.length;
     const places = candidates.flatMap(atomsOfPlace);
     candidates = candidates.filter((candidate) => !isIdle(molecule, candidate, classes, places));
   }
   return candidates;
+}
+
+const noClasses = new Int32Array(0);
+
+/**
+ * Whether no two candidates, and no two ligands of one, are of the same class, so that every symmetry leaves all of them
+ * in their places.
+ */
+function areUnlike(candidates: readonly StereoCandidate[], classes: Int32Array): boolean {
+  const unlike = (atoms: readonly number[]) =>
+    new Set(atoms.map((atom) => classes[atom])).size === atoms.length;
+  return (
+    unlike([...new Set(candidates.flatMap(atomsOfPlace))]) &&
+    candidates.every((candidate) => unlike(elementFor(candidate, true).ligands.filter((atom) => atom >= 0)))
+  );
 }
 
 function isIdle(
