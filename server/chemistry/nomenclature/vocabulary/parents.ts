@@ -1,6 +1,6 @@
 /**
  * Parents with retained names that carry a characteristic group or side chains themselves (`toluene`, `aniline`), and
- * mononuclear ones. Source: IUPAC Recommendations 2013, P-21.1, P-22.1.3, P-34.1.1, P-62.2.1, P-63.1.2, P-63.2.4,
+ * mononuclear ones. In phenones the chain has plain locants, the ring primed ones (1979 recommendations, C-313.2). Source: IUPAC Recommendations 2013, P-21.1, P-22.1.3, P-34.1.1, P-62.2.1, P-63.1.2, P-63.2.4,
  * P-66.1.6; 1979 recommendations A-12 and C-203 to C-205 for xylene, anisole, cresol and their kin.
  * Each line: name without final e, SMILES, locants in SMILES order; a fourth column marks siblings (`o-`, `m-`, `p-`, `2,3-`)
  * that share the name when nothing tells them apart.
@@ -88,9 +88,9 @@ export const parents: readonly ParentLine[] = [
   ['tryptamin', 'NCCc1c[nH]c2ccccc12', 'N α β 3 2 1 7a 7 6 5 4 3a'],
   ['anilin', 'Nc1ccccc1', 'N 1 2 3 4 5 6'],
   ['benzidin', 'Nc1ccc(cc1)-c1ccc(N)cc1', "N 4 3 2 1 6 5 1' 2' 3' 4' N' 5' 6'"],
-  ['acetophenon', 'CC(=O)c1ccccc1', 'α/2 - - 1 2 3 4 5 6'],
-  ['propiophenon', 'CCC(=O)c1ccccc1', '- - - - 1 2 3 4 5 6'],
-  ['butyrophenon', 'CCCC(=O)c1ccccc1', '- - - - - 1 2 3 4 5 6'],
+  ['acetophenon', 'CC(=O)c1ccccc1', "α/2 1 - 1' 2' 3' 4' 5' 6'"],
+  ['propiophenon', 'CCC(=O)c1ccccc1', "β/3 α/2 1 - 1' 2' 3' 4' 5' 6'"],
+  ['butyrophenon', 'CCCC(=O)c1ccccc1', "γ/4 β/3 α/2 1 - 1' 2' 3' 4' 5' 6'"],
   ['benzophenon', 'O=C(c1ccccc1)c1ccccc1', "- - 1 2 3 4 5 6 1' 2' 3' 4' 5' 6'"],
   ['chalcon', 'O=C(C=Cc1ccccc1)c1ccccc1', "- - α β 1 2 3 4 5 6 1' 2' 3' 4' 5' 6'"],
   ['acetanilid', 'CC(=O)Nc1ccccc1', 'α - - N 1 2 3 4 5 6'],
@@ -163,6 +163,16 @@ export const parents: readonly ParentLine[] = [
   ['naphthol', 'c1c(O)ccc2ccccc12', '1 2 O 3 4 4a 5 6 7 8 8a', '2-'],
   ['α-naphthol', 'Oc1cccc2ccccc12', ''],
   ['β-naphthol', 'c1c(O)ccc2ccccc12', ''],
+];
+
+/**
+ * Other numberings met for parents of the list: meant only where the one above has no place for what is written. Of
+ * phenones, with plain locants for the ring (`4-methoxyacetophenone`): common practice, no source.
+ */
+export const otherNumberings: readonly ParentLine[] = [
+  ['acetophenon', 'CC(=O)c1ccccc1', 'α - - 1 2 3 4 5 6'],
+  ['propiophenon', 'CCC(=O)c1ccccc1', 'β α - - 1 2 3 4 5 6'],
+  ['butyrophenon', 'CCCC(=O)c1ccccc1', 'γ β α - - 1 2 3 4 5 6'],
 ];
 
 /** Parents of this list that take an ending after their name; the others carry their groups in it already. */

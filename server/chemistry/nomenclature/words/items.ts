@@ -4,7 +4,7 @@
  */
 import type { Locant, Unit } from '../tree.ts';
 import type { Item } from './item.ts';
-import { groupsAt } from './groups.ts';
+import { groupsAt, type Group } from './groups.ts';
 import { chainOfLinks } from './joints.ts';
 import { wordsAt, type Lexicon } from './lexicon.ts';
 import { indicatedAt, locantsAt, stereoAt } from './locants.ts';
@@ -41,6 +41,7 @@ const boundary = /[\s()[\];:,·*.+/]|$/y;
 export class ItemReader {
   readonly #rows = new Map<number, readonly Row[]>();
   readonly #open = new Set<number>();
+  readonly #groupWords = new Map<number, readonly Group[]>();
   /** The furthest place to which every letter was understood. */
   furthest = 0;
   steps = 0;
@@ -155,16 +156,28 @@ export class ItemReader {
     }
   }
 
+  /** Words for groups and parents that begin at the offset, the longest first; each place is looked at once. */
+  #groupWordsAt(offset: number): readonly Group[] {
+    let found = this.#groupWords.get(offset);
+    if (!found) {
+      found = groupsAt(this.name.text, this.name.lower, offset, this.lexicon).sort(
+        (first, second) => second.end - first.end,
+      );
+      this.#groupWords.set(offset, found);
+    }
+    return found;
+  }
+
   /** Ends of words like `disulfanyl` that begin where a multiplier could be read as well. */
   #radicalEnds(start: number, locants: readonly Locant[] | undefined): ReadonlySet<number> {
     const from = locants === undefined ? start : (locantsAt(this.name.text, start)?.end ?? start);
-    const { text, lower } = this.name;
+    const { lower } = this.name;
     // `methylenedioxy`: two of `oxy`.
     const words = wordsAt(this.lexicon.words, lower, from).filter(
       (word) => word.value.kind === 'radical' && word.value.needsLink !== true,
     );
     // `tridecyl` is one group of thirteen carbons, not three of ten.
-    const alkyls = lower.startsWith('tri', from) ? groupsAt(text, lower, from, this.lexicon) : [];
+    const alkyls = lower.startsWith('tri', from) ? this.#groupWordsAt(from) : [];
     return new Set([...words, ...alkyls].map((one) => one.end));
   }
 
@@ -211,10 +224,9 @@ export class ItemReader {
     yield* this.#replacementsAt(start, from, locants, count);
     const direct = count > 1 ? this.#radicalEnds(start, locants) : undefined;
     const plain = count > 1 && lower.startsWith('n-', from) ? from + 2 : from;
-    const groups = groupsAt(text, lower, plain, this.lexicon).filter(
+    const groups = this.#groupWordsAt(plain).filter(
       (group) => direct?.has(group.end) !== true && (plain === from || group.normal === true),
     );
-    groups.sort((first, second) => second.end - first.end);
     const normal = locants?.length === 1 && count === 1 && locants[0] === 'N' && text[start] === 'n';
     for (const group of groups) {
       const base = {

@@ -4,7 +4,7 @@ import type { SuffixEntry } from '../tree.ts';
 import { anions } from '../vocabulary/functions.ts';
 import { acids, type AcidLine } from '../vocabulary/acids.ts';
 import { alkaneStem, groupTerm, numericalTerm, numericalTermVariants } from '../vocabulary/numbers.ts';
-import { extensibleParents, parents } from '../vocabulary/parents.ts';
+import { extensibleParents, otherNumberings, parents } from '../vocabulary/parents.ts';
 import {
   branchedStems,
   contractedRings,
@@ -200,6 +200,9 @@ function shownForms(word: string, value: Word): string[] {
   ];
 }
 
+/** More than any grouping of substituents costs, so that the first numbering wins where it can be built. */
+const otherNumberingCost = 5;
+
 /** Names with siblings (`xylene`) stand for all of them, and with `o-`, `m-`, `p-` or `ortho-` … for one. */
 function putParents(put: (word: string, value: Word) => void): void {
   const byName = new Map<string, (readonly [string, string, string, string?])[]>();
@@ -213,7 +216,19 @@ function putParents(put: (word: string, value: Word) => void): void {
       }),
     );
     const extensible = extensibleParents.has(name);
-    put(name, { kind: 'parent', skeletons: () => made.flatMap((one) => one()), extensible });
+    const others = lazily(() =>
+      otherNumberings
+        .filter((line) => line[0] === name)
+        .map((line) => {
+          const skeleton = skeletonFromSmiles(line[1], line[2]);
+          return skeleton && { ...skeleton, cost: otherNumberingCost };
+        }),
+    );
+    put(name, {
+      kind: 'parent',
+      skeletons: () => [...made.flatMap((one) => one()), ...others()],
+      extensible,
+    });
     lines.forEach((line, index) => {
       if (line[3] === undefined) return;
       const skeletons = lazily(() => made[index]!().map((one) => withoutMark(one)));

@@ -1,0 +1,47 @@
+/**
+ * Names as they are written in notebooks rather than in the recommendations. Rules are those of 1979 where a number with C
+ * stands beside them; the rest is 'common practice, no source'. Structures are drawn by hand.
+ */
+import { expect, test } from 'vitest';
+import { readName } from '../../../server/chemistry/nomenclature/read-name.ts';
+import { canonicalSmiles } from '../../../server/chemistry/structure/canonical-smiles.ts';
+import { readSmiles } from '../../../server/chemistry/structure/read-smiles.ts';
+import { writeSmiles } from '../../../server/chemistry/structure/write-smiles.ts';
+
+const practice = 'common practice, no source';
+
+test.each<[source: string, name: string, smiles: string]>([
+  // The chain of a phenone has plain locants, its ring primed ones; plain ones for the ring where they fit only there.
+  ['C-313.2', '2-bromoacetophenone', 'BrCC(=O)c1ccccc1'],
+  ['C-313.2', "2'-bromoacetophenone", 'CC(=O)c1ccccc1Br'],
+  ['C-313.2', "2-bromo-4'-methoxyacetophenone", 'COc1ccc(cc1)C(=O)CBr'],
+  ['C-313.2', '2-bromopropiophenone', 'CC(Br)C(=O)c1ccccc1'],
+  ['C-313.2', '3-chloropropiophenone', 'ClCCC(=O)c1ccccc1'],
+  [practice, '4-methoxyacetophenone', 'COc1ccc(cc1)C(C)=O'],
+  [practice, '2,4-dihydroxyacetophenone', 'CC(=O)c1ccc(O)cc1O'],
+  [practice, '3,4-dichloropropiophenone', 'CCC(=O)c1ccc(Cl)c(Cl)c1'],
+  // One locant before several groups: that of the compound group.
+  [practice, '2-diethylaminoethyl 4-aminobenzoate', 'CCN(CC)CCOC(=O)c1ccc(N)cc1'],
+  [practice, '4-dimethylaminopyridine', 'CN(C)c1ccncc1'],
+  [practice, '3-dimethylaminopropan-1-ol', 'CN(C)CCCO'],
+  [practice, '4-dimethylaminobenzaldehyde', 'CN(C)c1ccc(C=O)cc1'],
+])('%s: %s', (_, name, smiles) => {
+  const reading = readName(name);
+  if (reading.kind !== 'understood') throw new Error(`${name}: ${reading.message}`);
+  expect(reading.readings.map(({ molecule }) => canonicalSmiles(molecule))).toEqual([
+    canonicalSmiles(readSmiles(smiles).value!),
+  ]);
+});
+
+test('one locant is not enough for two groups on the parent itself', () => {
+  expect(readName('2-dimethylpropane').kind).toBe('unknown');
+  expect(readName('1-dichlorobenzene').kind).toBe('unknown');
+});
+
+test('a salt keeps the charges that its name gives it', () => {
+  const reading = readName('pyridinium chloride');
+  if (reading.kind !== 'understood') throw new Error(reading.message);
+  const smiles = writeSmiles(reading.readings[0]!.molecule);
+  expect(smiles).toContain('[NH+]');
+  expect(smiles).toContain('[Cl-]');
+});
