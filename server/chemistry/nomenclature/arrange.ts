@@ -1,18 +1,17 @@
 /** Settles a reading's arrangement in space from the descriptors of its name, and lists what they leave open. */
-import { assignDescriptors } from '../structure/assign-descriptors.ts';
+import { assignDescriptors, type Refusal } from '../structure/assign-descriptors.ts';
 import { cipDescriptors } from '../structure/cip/descriptors.ts';
 import { atomsOfPlace, type Molecule, withStereo } from '../structure/molecule.ts';
-import { mirrorImage } from '../structure/stereo-mirror.ts';
-import { enumerateStereoisomers, type StereoisomerList } from '../structure/stereoisomers.ts';
+import { isOwnMirrorImage, mirrorImage } from '../structure/stereo-mirror.ts';
+import { enumerateStereoisomers } from '../structure/stereoisomers.ts';
+import type { TextRange } from '../text.ts';
 import type { Draft, Owner } from './build/draft.ts';
 import type { Described } from './readings.ts';
 import { relativeStatement, type RelativeStatement } from './relative.ts';
 import type { NameRemark, Reading } from './reading.ts';
+import { saidOf, type Said } from './said.ts';
 import type { StereoWord } from './tree.ts';
 import type { PreparedName } from './words/prepared.ts';
-
-type Letter = Parameters<typeof assignDescriptors>[1][number]['letter'];
-const letters = new Set<string>(['R', 'S', 'r', 's', 'E', 'Z', 'M', 'P']);
 
 export interface Arranged {
   readonly reading: Reading;
@@ -41,50 +40,28 @@ export function arrangedReading(
       message,
     });
   };
-  let settled = molecule;
-  /** Atoms whose descriptors the name spells out. */
-  const spelt = new Set<number>();
-  let racemic = false;
-  const relative: { word: StereoWord; atoms: readonly number[] }[] = [];
-  if (draft && draft.wanted.length + draft.loose.length > 0) {
-    const wanted = draft.wanted.filter(({ word }) => letters.has(word.letter));
-    for (const { atom, word } of draft.wanted)
-      if (!letters.has(word.letter)) relative.push({ word, atoms: [atom] });
-    for (const { atoms, word } of draft.loose) {
-      if (word.letter === 'rac' || word.letter === 'rel') racemic = true;
-      else if (!letters.has(word.letter)) relative.push({ word, atoms });
-      else {
-        const atom = onlyPlace(molecule, atoms, word.letter);
-        if (atom === undefined)
-          remark(
-            word,
-            `${word.letter} has no locant, and there is not exactly one place that it can be about.`,
-          );
-        else wanted.push({ atom, word });
-      }
-    }
-    const asked = wanted.map(({ atom, word }) => ({ atom, letter: word.letter as Letter }));
-    for (const { atom } of asked) spelt.add(atom);
-    const { molecule: assigned, refused } = assignDescriptors(molecule, asked);
-    settled = assigned;
-    for (const { index, reason } of refused)
-      remark(wanted[index]!.word, refusal(wanted[index]!.word, reason));
-  }
-  const list = enumerateStereoisomers(settled, Math.max(cap, 64));
-  let isomers = list.isomers;
-  let count = list.count;
-  const statements = relative.flatMap(({ word, atoms }) => {
-    const statement = relativeStatement(list, word.letter, atoms);
+  const said = draft && draft.wanted.length + draft.loose.length > 0 ? saidOf(draft, molecule) : undefined;
+  for (const word of said?.placeless ?? [])
+    remark(word, `${word.letter} has no locant, and there is not exactly one place that it can be about.`);
+  const { settled, refused } = assigned(molecule, said?.letters ?? []);
+  for (const { word, reason } of refused) remark(word, refusal(word, reason));
+  const relations = said?.relations ?? [];
+  const list = enumerateStereoisomers(settled, relations.length > 0 ? 512 : Math.max(cap, 64));
+  let { isomers, count } = list;
+  const statements = relations.flatMap((relation) => {
+    const statement = relativeStatement(list, relation);
     if (statement) return [statement];
+    const { word } = relation;
     remark(word, `“${word.letter}” says nothing about this structure, which has no two such arrangements.`);
     return [];
   });
   if (statements.length > 0) {
     const agree = (isomer: Molecule) => statements.every(({ agrees }) => agrees(isomer));
+    const spelt = new Set(said?.letters.map(({ atom }) => atom));
     isomers = isomers.filter(agree);
     if (isomers.length === 0) isomers = isomersWithoutImplied(settled, statements, spelt, cap).filter(agree);
     if (isomers.length === 0)
-      for (const { word } of relative)
+      for (const { word } of relations)
         remark(
           word,
           `“${word.letter}” contradicts the descriptors that the name gives; one of them is wrong.`,
@@ -92,13 +69,42 @@ export function arrangedReading(
     count = isomers.length;
   }
   isomers = isomers.map((isomer) => asNamed(isomer, settled));
-  const bare = isomers.length === 1 && relative.length > 0 ? isomers[0]! : asNamed(list.molecule, settled);
-  if (racemic && isomers.length === 1) {
-    const mirror = mirrorImage(isomers[0]!);
-    return { reading: openReading(complete, molecule, [isomers[0]!, mirror], 2, cap, draft), remarks };
+  const bare = isomers.length === 1 && relations.length > 0 ? isomers[0]! : asNamed(list.molecule, settled);
+  const [single] = isomers;
+  if (said?.racemic === true && single && isomers.length === 1 && !isOwnMirrorImage(single)) {
+    // Each enantiomer has its own descriptors in place of those of the racemate.
+    const replaced = [...draft!.wanted, ...draft!.loose].map(({ word }) => word.whole);
+    const one: Complete = (described) => complete(described, described.length > 0 ? replaced : []);
+    return { reading: openReading(one, molecule, [single, mirrorImage(single)], 2, cap, draft), remarks };
   }
+  const racemic = said?.racemicWords.map(({ whole }) => whole) ?? [];
+  const told: Complete = (described) => complete(described, described.length > 0 ? racemic : []);
   const open = isomers.length > 1 || (count ?? 2) > 1 ? isomers : [];
-  return { reading: openReading(complete, bare, open, count, cap, draft), remarks };
+  return { reading: openReading(told, bare, open, count, cap, draft), remarks };
+}
+
+/**
+ * The structure with the letters that the name gives. Where a name is in lower case throughout, `r` and `s` at true
+ * chirality centres are R and S, since there they can be nothing else (common practice, no source).
+ */
+function assigned(
+  molecule: Molecule,
+  wanted: Said['letters'],
+): { settled: Molecule; refused: readonly { word: StereoWord; reason: Refusal }[] } {
+  if (wanted.length === 0) return { settled: molecule, refused: [] };
+  let { molecule: settled, refused } = assignDescriptors(molecule, wanted);
+  if (refused.length > 0 && wanted.every(({ letter }) => !/[RSMP]/.test(letter))) {
+    const raised = wanted.map(({ atom, letter }, index) => {
+      const isRefused = refused.some((one) => one.index === index);
+      return { atom, letter: isRefused ? (letter.toUpperCase() as typeof letter) : letter };
+    });
+    const again = assignDescriptors(molecule, raised);
+    if (again.refused.length === 0) ({ molecule: settled, refused } = again);
+  }
+  return {
+    settled,
+    refused: refused.map(({ index, reason }) => ({ word: wanted[index]!.word, reason })),
+  };
 }
 
 /**
@@ -155,8 +161,8 @@ function openReading(
   };
 }
 
-/** Writes the name with what it left open, and with descriptors where they belong. */
-type Complete = (described: readonly Described[]) => string;
+/** Writes the name with what it left open, with descriptors where they belong, and without what they replace. */
+type Complete = (described: readonly Described[], dropped?: readonly TextRange[]) => string;
 
 /** The name with the descriptors of what it left open, in front of their units (P-91.3): `(2R)-butan-2-ol`. */
 function describedName(
@@ -201,22 +207,7 @@ function numberOf(locant: string | undefined): number {
   return Number.isNaN(number) ? 1000 : number;
 }
 
-/** The single place of a unit, or of the whole, that a descriptor without locant can be about. */
-function onlyPlace(molecule: Molecule, atoms: readonly number[], letter: string): number | undefined {
-  const list: StereoisomerList = enumerateStereoisomers(molecule, 64);
-  const places = list.units.flatMap(({ candidate }) => {
-    const isBond = candidate.kind === 'double-bond';
-    if (isBond !== (letter === 'E' || letter === 'Z')) return [];
-    return [candidate.kind === 'tetrahedral' ? [candidate.centre] : [...candidate.ends]];
-  });
-  const within = places.filter((ends) => ends.every((atom) => atoms.includes(atom)));
-  const inUnit =
-    within.length > 0 ? within : places.filter((ends) => ends.some((atom) => atoms.includes(atom)));
-  const chosen = inUnit.length > 0 ? inUnit : places;
-  return chosen.length === 1 ? chosen[0]![0] : undefined;
-}
-
-function refusal(word: StereoWord, reason: string): string {
+function refusal(word: StereoWord, reason: Refusal): string {
   const place = word.locant === undefined ? 'there' : `at position ${word.locant}`;
   switch (reason) {
     case 'no stereogenic unit':

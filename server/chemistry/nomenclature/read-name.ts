@@ -2,6 +2,7 @@
  * Reads chemical names: what a name can mean, or where it stops being understood. Follows the IUPAC Recommendations
  * 2013 (Favre, Powell: Nomenclature of Organic Chemistry) and the usage of 1979 and 1993 still met in notebooks.
  */
+import type { TextRange } from '../text.ts';
 import type { NameReading, NameRemark, Reading } from './reading.ts';
 import { completedName, meaningsOf, type Described, type Meaning } from './readings.ts';
 import { createCommonNames, type CommonNames } from './common-names.ts';
@@ -84,8 +85,8 @@ function read(text: string, limits: NameLimits, lexicon: Lexicon, common: Common
   const cap = limits.readings ?? 32;
   const remarks = new Map<string, NameRemark>();
   const readings = meanings.slice(0, cap).map((meaning): Reading => {
-    const complete = (described: readonly Described[]) =>
-      completed(text, prepared, meaning, meanings.length > 1, described);
+    const complete = (described: readonly Described[], dropped: readonly TextRange[] = []) =>
+      completed(text, prepared, meaning, meanings.length > 1, described, dropped);
     const arranged = arrangedReading(complete, meaning.molecule, meaning.draft, prepared, limits);
     for (const chain of meaning.draft.chains) {
       if (!chain.plain || isLongestChain(chain, meaning.draft)) continue;
@@ -112,6 +113,7 @@ function completed(
   meaning: Meaning,
   locants: boolean,
   described: readonly Described[],
+  dropped: readonly TextRange[],
 ): string {
   if (!locants && described.length === 0) return text;
   const { insertions, draft } = meaning;
@@ -130,5 +132,6 @@ function completed(
         ...(owner.wrapTo === undefined ? {} : { wrapTo: place(owner.wrapTo) }),
       },
     })),
+    dropped.map(({ start, end }) => ({ at: place(start), end: place(end) })),
   );
 }

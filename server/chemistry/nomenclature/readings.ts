@@ -85,9 +85,12 @@ export function completedName(
   insertions: readonly Insertion[],
   brackets: readonly { readonly at: number; readonly end: number; readonly depth: number }[] = [],
   described: readonly Described[] = [],
+  dropped: readonly { readonly at: number; readonly end: number }[] = [],
 ): string {
   // At one place: closing brackets, the deepest first; then from the outside in the bracket, descriptors, locants.
-  const all = [
+  const all: { at: number; text: string; order: number; end?: number }[] = [
+    // What is written at the same place comes before what is left out there.
+    ...dropped.map(({ at, end }) => ({ at, text: '', order: 1e6, end })),
     ...insertions.map(({ at, text: added, depth }, order) => ({
       at,
       text: added,
@@ -108,9 +111,12 @@ export function completedName(
   let name = '';
   let last = 0;
   for (const one of all) {
-    name += text.slice(last, one.at);
-    last = one.at;
-    name += fitted(one.text, name, text[one.at]);
+    if (one.at > last) {
+      name += text.slice(last, one.at);
+      last = one.at;
+    }
+    name += fitted(one.text, name, text[last]);
+    last = Math.max(last, one.end ?? last);
   }
   return name + text.slice(last);
 }

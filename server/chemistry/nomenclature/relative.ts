@@ -1,11 +1,16 @@
-/** `cis` and `trans` (P-31.1.4.2.4, P-93.5.1.3): which of the stereoisomers have two groups on one side. */
+/**
+ * Words that set one group against another: `cis` and `trans` (P-31.1.4.2.4, P-93.5.1.3), `exo` and `endo`, `meso`; which of
+ * the stereoisomers agree with them.
+ */
 import { onSameSideOfDoubleBond, onSameSideOfRing } from '../structure/assign-descriptors.ts';
-import { IMPLICIT_LIGAND, type Molecule } from '../structure/molecule.ts';
+import { type Molecule } from '../structure/molecule.ts';
 import { smallestRingThrough } from '../structure/rings.ts';
+import { isOwnMirrorImage } from '../structure/stereo-mirror.ts';
 import type { StereoisomerList } from '../structure/stereoisomers.ts';
-import type { StereoWord } from './tree.ts';
+import { pointsToBridge } from './exo-endo.ts';
+import type { Said } from './said.ts';
 
-/** What `cis` or `trans` says of a structure. */
+/** What a word says of a structure. */
 export interface RelativeStatement {
   /** The atoms whose arrangement it is about. */
   readonly atoms: readonly number[];
@@ -15,54 +20,91 @@ export interface RelativeStatement {
 /** What the word says of the isomers, or undefined when there is no place that it can be about. */
 export function relativeStatement(
   list: StereoisomerList,
-  letter: StereoWord['letter'],
-  atoms: readonly number[],
+  { word, atoms, place }: Said['relations'][number],
 ): RelativeStatement | undefined {
-  if (letter !== 'cis' && letter !== 'trans') return undefined;
-  const cis = letter === 'cis';
+  const near = place ?? atoms;
   const { molecule } = list;
   const bonds = list.units.flatMap(({ candidate }) => (candidate.kind === 'double-bond' ? [candidate] : []));
   const centres = list.units.flatMap(({ candidate }) =>
     candidate.kind === 'tetrahedral' ? [candidate.centre] : [],
   );
-  const own = bonds.filter(({ ends }) => ends.some((atom) => atoms.includes(atom)));
-  const bond = own.length === 1 ? own[0]! : bonds.length === 1 ? bonds[0]! : undefined;
-  if (bond && centres.filter((one) => atoms.includes(one)).length < 2) {
-    const ligands = bond.ends.map((end) => singleLigand(molecule, end, bond.ends));
+  const own = centres.filter((one) => near.includes(one));
+  if (word.letter === 'meso')
+    return centres.length < 2 ? undefined : { atoms: centres, agrees: (isomer) => isOwnMirrorImage(isomer) };
+  if (word.letter === 'exo' || word.letter === 'endo') return bridgeStatement(molecule, own, word.letter);
+  if (word.letter !== 'cis' && word.letter !== 'trans') return undefined;
+  const cis = word.letter === 'cis';
+  if (word.all === true && place === undefined) return cis ? allOnOneSide(molecule, own) : undefined;
+  const ownBonds = bonds.filter(({ ends }) => ends.some((atom) => near.includes(atom)));
+  const bond = ownBonds.length === 1 ? ownBonds[0]! : bonds.length === 1 ? bonds[0]! : bondBetween();
+  if (bond && own.length < 2) {
+    const ligands = bond.ends.map((end) => chainLigand(molecule, end, bond.ends, atoms));
     if (ligands.some((one) => one === undefined)) return undefined;
     return {
       atoms: bond.ends,
       agrees: (isomer) => onSameSideOfDoubleBond(isomer, bond.ends, ligands as [number, number]) === cis,
     };
   }
-  const inUnit = centres.filter((one) => atoms.includes(one));
-  const pair = inUnit.length === 2 ? inUnit : centres.length === 2 ? centres : undefined;
-  if (!pair) return undefined;
-  const ring = ringOf(molecule, pair[0]!, pair[1]!);
+  const pair = own.length === 2 ? own : centres.length === 2 ? centres : undefined;
+  return pair && ringStatement(molecule, pair[0]!, pair[1]!, cis);
+
+  function bondBetween() {
+    return bonds.find(({ ends }) => place?.length === 2 && ends.every((atom) => place.includes(atom)));
+  }
+}
+
+function bridgeStatement(
+  molecule: Molecule,
+  centres: readonly number[],
+  word: 'exo' | 'endo',
+): RelativeStatement | undefined {
+  const found = centres.flatMap((centre) => {
+    const points = pointsToBridge(molecule, centre);
+    return points ? [{ centre, points }] : [];
+  });
+  const [only] = found;
+  if (!only || found.length > 1) return undefined;
+  return { atoms: [only.centre], agrees: (isomer) => only.points(isomer) === (word === 'exo') };
+}
+
+function allOnOneSide(molecule: Molecule, centres: readonly number[]): RelativeStatement | undefined {
+  const pairs = centres.slice(1).map((centre) => ringStatement(molecule, centres[0]!, centre, true));
+  if (pairs.length === 0 || pairs.includes(undefined)) return undefined;
+  return { atoms: centres, agrees: (isomer) => pairs.every((pair) => pair!.agrees(isomer)) };
+}
+
+function ringStatement(
+  molecule: Molecule,
+  first: number,
+  second: number,
+  cis: boolean,
+): RelativeStatement | undefined {
+  const ring = ringOf(molecule, first, second);
   if (!ring) return undefined;
-  const ligands = pair.map((centre) => {
-    const outside = molecule.neighbours[centre]!.map((one) => one.atom).filter(
+  const [one, other] = [first, second].map((centre) => {
+    const outside = molecule.neighbours[centre]!.map(({ atom }) => atom).filter(
       (atom) => !ring.includes(atom),
     );
-    return outside.length === 1 ? outside[0]! : undefined;
+    return outside.length === 1 ? { centre, ligand: outside[0]! } : undefined;
   });
-  if (ligands.some((one) => one === undefined)) return undefined;
+  if (!one || !other) return undefined;
   return {
-    atoms: pair,
-    agrees: (isomer) =>
-      onSameSideOfRing(
-        isomer,
-        ring,
-        { centre: pair[0]!, ligand: ligands[0]! },
-        { centre: pair[1]!, ligand: ligands[1]! },
-      ) === cis,
+    atoms: [first, second],
+    agrees: (isomer) => onSameSideOfRing(isomer, ring, one, other) === cis,
   };
 }
 
-/** The only group, beside hydrogen, on one end of a double bond. */
-function singleLigand(molecule: Molecule, end: number, ends: readonly [number, number]): number | undefined {
+/** The only group, beside hydrogen, on one end of a double bond; of two the one that continues the parent chain. */
+function chainLigand(
+  molecule: Molecule,
+  end: number,
+  ends: readonly [number, number],
+  chain: readonly number[],
+): number | undefined {
   const others = molecule.neighbours[end]!.map((one) => one.atom).filter((atom) => !ends.includes(atom));
-  return others.length === 1 && others[0] !== IMPLICIT_LIGAND ? others[0] : undefined;
+  if (others.length === 1) return others[0];
+  const inChain = others.filter((atom) => chain.includes(atom));
+  return inChain.length === 1 ? inChain[0] : undefined;
 }
 
 /** A smallest ring that holds both atoms, its atoms in order. */

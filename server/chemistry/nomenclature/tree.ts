@@ -55,8 +55,30 @@ export interface StereoWord {
   /** Locant, or undefined where none was written. */
   readonly locant?: Locant;
   readonly letter:
-    'R' | 'S' | 'r' | 's' | 'E' | 'Z' | 'M' | 'P' | 'cis' | 'trans' | 'rac' | 'rel' | 'D' | 'L' | 'meso';
+    | 'R'
+    | 'S'
+    | 'r'
+    | 's'
+    | 'E'
+    | 'Z'
+    | 'M'
+    | 'P'
+    | 'cis'
+    | 'trans'
+    | 'exo'
+    | 'endo'
+    | 'rac'
+    | 'rel'
+    | 'D'
+    | 'L'
+    | 'meso';
   readonly range: TextRange;
+  /** The descriptors that were written together, with brackets and hyphen. */
+  readonly whole: TextRange;
+  /** `all-trans`: said of every place. */
+  readonly all?: boolean;
+  /** One of `RS` and `SR`. */
+  readonly either?: boolean;
 }
 
 /** One kind of substituent, `count` times, on the atoms of the locants. */

@@ -82,7 +82,7 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
     else {
       const atom = places.at(word.locant);
       if (atom === undefined) return draft.fail(word.range, noSuchPlace(word.locant));
-      draft.wanted.push({ atom, word });
+      draft.wanted.push({ atom, atoms, word });
     }
   }
   if (skeleton.kind === 'chain') {

@@ -54,7 +54,9 @@ export class Draft {
   readonly insertions: Insertion[] = [];
   /** Brackets to be written in round compound groups. */
   readonly brackets: { readonly at: number; readonly end: number; readonly depth: number }[] = [];
-  readonly wanted: { atom: number; word: StereoWord }[] = [];
+  /** Descriptors with a locant: the atom that it names, and the atoms of its parent. */
+  readonly wanted: { atom: number; atoms: readonly number[]; word: StereoWord }[] = [];
+  /** Descriptors without, with the atoms of the parent that they stand before. */
   readonly loose: { atoms: readonly number[]; word: StereoWord }[] = [];
   readonly chains: ChainClaim[] = [];
   /** Usual indicated hydrogen, used when nothing else settles the double bonds. */

@@ -50,7 +50,7 @@ export function buildJoint(
   for (const word of joint.stereo) {
     const atom = word.locant === undefined ? undefined : whole.places.at(word.locant);
     if (atom === undefined) return draft.fail(word.range, noSuchPlace(word.locant ?? '?'));
-    draft.wanted.push({ atom, word });
+    draft.wanted.push({ atom, atoms: whole.places.atoms, word });
   }
   return whole;
 }

@@ -9,6 +9,7 @@ export const wholeNames: readonly (readonly [names: string, smiles: string])[] =
   ['n,n-dimethylacetamide', 'CN(C)C(C)=O'],
   ['dimethyl sulfoxide|dimethylsulfoxide', 'CS(C)=O'],
   ['methylene chloride', 'ClCCl'],
+  ['inositol', 'OC1C(O)C(O)C(O)C(O)C1O'],
   ['ethylene dichloride', 'ClCCCl'],
   ['chloroform', 'ClC(Cl)Cl'],
   ['bromoform', 'BrC(Br)Br'],

@@ -7,8 +7,9 @@ import type { Item } from './item.ts';
 import { groupsAt, type Group } from './groups.ts';
 import { chainOfLinks } from './joints.ts';
 import { wordsAt, type Lexicon } from './lexicon.ts';
-import { indicatedAt, locantsAt, stereoAt } from './locants.ts';
+import { indicatedAt, locantsAt } from './locants.ts';
 import type { PreparedName } from './prepared.ts';
+import { stereoAt } from './stereo-words.ts';
 import { structured } from './structure.ts';
 
 export interface Row {

@@ -76,6 +76,8 @@ export function prepareName(original: string): PreparedName {
   return settle({ text, lower: text.toLowerCase(), origin });
 }
 
+const paired = /\b(?:cis|trans|[EZ])-\d{1,2}(?:,(?:cis|trans|[EZ])-\d{1,2})+-/g;
+
 /** Applies the spellings that change the length: `sulph`, `.alpha.`, `alpha-`, and inverted names. */
 function settle(name: PreparedName): PreparedName {
   let result = name;
@@ -85,6 +87,15 @@ function settle(name: PreparedName): PreparedName {
     /\.?\b(alpha|beta|gamma|delta|epsilon|omega|lambda)\b\.?(?=[-,')])/gi,
     (word) => greek[word.replace(/\./g, '').toLowerCase()]!,
   );
+  // `trans-2,cis-6-nonadienal`: the locants are those of the double bonds as well.
+  result = replaceAll(result, paired, (match) => {
+    const pairs = match
+      .slice(0, -1)
+      .split(',')
+      .map((pair) => pair.split('-'));
+    const words = pairs.map(([word, locant]) => `${locant!}-${word!}`).join(',');
+    return `(${words})-${pairs.map(([, locant]) => locant!).join(',')}-`;
+  });
   return uninverted(result);
 }
 
