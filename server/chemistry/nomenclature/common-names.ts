@@ -9,6 +9,11 @@ import { wholeNames } from './vocabulary/whole.ts';
 
 export type CommonName =
   | { readonly kind: 'compound'; readonly molecule: Molecule }
+  /** Several compounds of that name, each with its full one. */
+  | {
+      readonly kind: 'compounds';
+      readonly readings: readonly { readonly name: string; readonly molecule: Molecule }[];
+    }
   /** What it is, and the names of its components where they are known. */
   | { readonly kind: 'mixture'; readonly message: string; readonly components: readonly string[] };
 

@@ -7,7 +7,7 @@ import type { NameReading, NameRemark, Reading } from './reading.ts';
 import { completedName, meaningsOf, type Described, type Meaning } from './readings.ts';
 import { createCommonNames, type CommonNames } from './common-names.ts';
 import { arrangedReading } from './arrange.ts';
-import { knownName } from './known-names.ts';
+import { knownReading } from './known-readings.ts';
 import { isLongestChain } from './build/proper-chain.ts';
 import { improperRemark, properAlkaneName } from './proper-name.ts';
 import { unknownName } from './unknown.ts';
@@ -60,23 +60,22 @@ export function createNameReader(): NameReader {
   };
 }
 
-function read(text: string, limits: NameLimits, lexicon: Lexicon, common: CommonNames): NameReading {
+function read(
+  text: string,
+  limits: NameLimits,
+  lexicon: Lexicon,
+  common: CommonNames,
+  depth = 0,
+): NameReading {
   const tooLong = text.length > longestName;
   const prepared = prepareName(tooLong ? '' : text);
   if (prepared.text === '') {
     const message = tooLong ? 'This name is too long to be read.' : 'There is no name here.';
     return { kind: 'unknown', stoppedAt: 0, range: { start: 0, end: text.length }, message, suggestions: [] };
   }
-  const known = knownName(prepared, common);
-  if (known) {
-    return known.kind === 'mixture'
-      ? { kind: 'mixture', message: known.message, components: [] }
-      : {
-          kind: 'understood',
-          readings: [arrangedReading(() => text, known.molecule, undefined, prepared, limits).reading],
-          remarks: [],
-        };
-  }
+  const readOther = (other: string) => read(other, limits, lexicon, common, depth + 1);
+  const known = knownReading(text, prepared, common, limits, readOther, depth);
+  if (known) return known;
   const reader = new ItemReader(prepared, lexicon, limits.steps ?? 4000);
   const found = sentences(reader);
   const { meanings, complete, failure } = meaningsOf(found, Math.min(limits.steps ?? 4000, buildLimit));

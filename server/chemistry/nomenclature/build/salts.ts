@@ -33,7 +33,9 @@ export function buildSalt(
   }
   if (positives.length !== 1 || negatives.length !== 1) return false;
   const [positive, negative] = [positives[0]!, negatives[0]!];
-  const counts = balanced(positive.charge, positive.count, negative.charge, negative.count);
+  // A number before the anion goes with a number, or one, before the cation: there is no `sodium dichloride`.
+  const cations = positive.count ?? (negative.count === undefined ? undefined : 1);
+  const counts = balanced(positive.charge, cations, negative.charge, negative.count);
   if (!counts) return false;
   for (let copy = 0; copy < counts[0]; copy++) if (!positive.make()) return false;
   for (let copy = 0; copy < counts[1]; copy++) addSmiles(negative.smiles, draft);

@@ -8,9 +8,12 @@ export interface FormulaPart {
 /** Formulas longer than this are not read. */
 const longestFormula = 120;
 
+/** Seven small letters in a row before any dot are no symbols. */
+const isWord = /^[^·•∙⋅*.]*[a-z]{7}/;
+
 /** With ordinary digits, `≡` for a triple bond and `·` for a dot; undefined for what cannot be a formula. */
 export function plainFormula(text: string): string | undefined {
-  if (text.length > longestFormula) return undefined;
+  if (text.length > longestFormula || isWord.test(text)) return undefined;
   const plain = text
     .replace(/[₀-₉]/g, (digit) => String(digit.charCodeAt(0) - 0x2080))
     .replace(/[•∙⋅]|(?<!Cp)\*/g, '·')

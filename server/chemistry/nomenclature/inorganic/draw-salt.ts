@@ -2,8 +2,9 @@
  * How salts, oxides and complexes of metals are drawn, in one place for formulas and names:
  *
  * - as ions side by side, each as often as the charges ask for (Red Book 2005, IR-5.4); nothing is left over;
- * - but the halides, oxides and oxide halides of a single metal atom with a charge of 4 and more are molecules
- *   (`TiCl4`, `MnO2`, `OsO4`): oxygen doubly bound, halogen singly;
+ * - but the halides, oxides, sulfides and oxide halides of one metal atom, and the oxides of two, with a charge of 4 and more
+ *   are molecules (`TiCl4`, `MnO2`, `OsO4`, `V2O5`): oxygen doubly bound or between the two, halogen singly bound;
+ * - and so is a single oxygen or sulfur with a single metal of charge 2 (`MgO`, `CuS`), as collections of structures have it;
  * - neutral ligands and a metal without charge stand beside the rest (`Pd(PPh3)4`);
  * - hydrogen of acid salts sits on an oxygen or sulfur of the anion (`NaHCO3`).
  *
@@ -37,10 +38,14 @@ export function drawSalt(members: readonly Member[]): string | undefined {
   if (!settled) return undefined;
   const ions = settled.filter((one): one is Ion => one.kind === 'ion' || one.kind === 'ligand');
   const metals = settled.filter((one): one is Metal => one.kind === 'metal');
+  if (
+    ions.some(({ smiles }) => saltLikeOnly.has(smiles)) &&
+    !metals.every(({ symbol }) => saltLike.has(symbol))
+  )
+    return undefined;
   const charges = metalChargesOf(metals, ions);
   if (!charges || metals.length + ions.length === 0) return undefined;
-  const whole =
-    charges.length === 1 && metals[0]!.count === 1 ? molecule(metals[0]!, charges[0]!, ions) : undefined;
+  const whole = charges.length === 1 ? molecule(metals[0]!, charges[0]!, ions) : undefined;
   if (whole !== undefined) return whole;
   const parts = metals.flatMap(({ symbol, count }, index) => repeated(ionOf(symbol, charges[index]!), count));
   parts.push(...ions.flatMap(({ smiles, count }) => repeated(smiles, count)));
@@ -72,20 +77,40 @@ function metalChargesOf(metals: readonly Metal[], ions: readonly Ion[]): number[
   return known.map((value) => value ?? charge);
 }
 
+/** Nitrides, phosphides and carbides are salts of the metals of groups 1 and 2 only. */
+const saltLikeOnly: ReadonlySet<string> = new Set(['[N-3]', '[P-3]', '[C-]#[C-]']);
+
 const halides: ReadonlySet<string> = new Set(['[F-]', '[Cl-]', '[Br-]', '[I-]']);
 
 /** The molecular halides and oxides of metals with a high charge; ligands stay beside them. */
 function molecule(metal: Metal, charge: number, members: readonly Ion[]): string | undefined {
   const bound = members.filter(({ kind }) => kind === 'ion');
+  const pair =
+    charge === 2 && bound.length === 1 && bound[0]!.count === 1 && chalcogenides.has(bound[0]!.smiles);
+  if (!pair && (charge < 4 || !bound.every(({ smiles }) => halides.has(smiles) || chalcogenides.has(smiles))))
+    return undefined;
   const beside = members.filter(({ kind }) => kind === 'ligand');
-  if (charge < 4 || !bound.every(({ smiles }) => halides.has(smiles) || smiles === '[O-2]')) return undefined;
-  const arms = bound.flatMap(({ smiles, count }) =>
-    repeated(smiles === '[O-2]' ? '(=O)' : `(${smiles.slice(1, -2)})`, count),
-  );
-  return [
-    `[${metal.symbol}]${arms.join('')}`,
-    ...beside.flatMap(({ smiles, count }) => repeated(smiles, count)),
-  ].join('.');
+  const core = metal.count === 1 ? oneCentre(metal.symbol, bound) : twoCentres(metal, bound);
+  return core && [core, ...beside.flatMap(({ smiles, count }) => repeated(smiles, count))].join('.');
+}
+
+const oxide = '[O-2]';
+const chalcogenides: ReadonlySet<string> = new Set([oxide, '[S-2]', '[Se-2]', '[Te-2]']);
+
+function oneCentre(symbol: string, bound: readonly Ion[]): string {
+  const arms = bound.flatMap(({ smiles, count }) => {
+    const atom = /[A-Z][a-z]?/.exec(smiles)![0];
+    return repeated(chalcogenides.has(smiles) ? `(=[${atom}])` : `(${atom})`, count);
+  });
+  return `[${symbol}]${arms.join('')}`;
+}
+
+/** `V2O5`, `Re2O7`: one oxygen between two metals, the others doubly bound. */
+function twoCentres({ symbol, count }: Metal, bound: readonly Ion[]): string | undefined {
+  const [only] = bound;
+  if (count !== 2 || bound.length !== 1 || only?.smiles !== oxide || only.count % 2 === 0) return undefined;
+  const half = `[${symbol}]${'(=O)'.repeat((only.count - 1) / 2)}`;
+  return `${half}O${half}`;
 }
 
 /** Puts hydrogens on the anions; beside a metal of groups 1 and 2 alone they are hydride. */

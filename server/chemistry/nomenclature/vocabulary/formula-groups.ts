@@ -26,7 +26,6 @@ export const formulaGroups: readonly (readonly [symbols: string, smiles: string]
   ['1-Ad', 'C12CC3CC(CC(C3)C1)C2'],
   ['Vinyl|vinyl', 'C=C'],
   ['Allyl|allyl', 'CC=C'],
-  ['Propargyl|propargyl', 'CC#C'],
   ['Ph|C6H5', 'c1ccccc1'],
   ['C6F5', 'c1c(F)c(F)c(F)c(F)c1F'],
   ['C6D5', 'c1c([2H])c([2H])c([2H])c([2H])c1[2H]'],

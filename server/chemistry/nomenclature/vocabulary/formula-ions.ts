@@ -48,7 +48,7 @@ export const metalCharges: Readonly<Record<string, readonly number[]>> = {
   Mo: [0, 2, 3, 4, 5, 6],
   W: [0, 4, 5, 6],
   Mn: [0, 2, 3, 4],
-  Re: [3, 5],
+  Re: [3, 5, 7],
   Fe: [0, 2, 3],
   Ru: [0, 2, 3, 4, 8],
   Os: [2, 3, 4, 8],
