@@ -25,6 +25,16 @@ test.each<[source: string, name: string, smiles: string]>([
   [practice, '4-dimethylaminopyridine', 'CN(C)c1ccncc1'],
   [practice, '3-dimethylaminopropan-1-ol', 'CN(C)CCCO'],
   [practice, '4-dimethylaminobenzaldehyde', 'CN(C)c1ccc(C=O)cc1'],
+  // Families of imidic and peroxy acids, nitrosamines, and descriptors before a group that joins others.
+  ['P-65.1.3.1.1', 'methyl ethanimidate', 'CC(=N)OC'],
+  ['P-65.1.3.1.1', 'ethyl benzenecarboximidate', 'CCOC(=N)c1ccccc1'],
+  ['P-65.5.3', 'N-phenylbenzenecarboximidoyl chloride', 'ClC(=Nc1ccccc1)c1ccccc1'],
+  ['P-65.1.4.1', 'ethyl ethaneperoxoate', 'CCOOC(C)=O'],
+  ['P-65.1.5.1', 'methyl ethanedithioate', 'CSC(C)=S'],
+  ['P-61.6', 'N-methyl-N-phenylnitramide', 'CN(c1ccccc1)[N+](=O)[O-]'],
+  ['P-68.3.1.3.2', '4-[(E)-phenyldiazenyl]phenol', 'Oc1ccc(cc1)/N=N/c1ccccc1'],
+  ['P-66.3.1', '2-[(E)-N-ethoxy-C-ethylcarbonimidoyl]phenol', 'CC/C(=N\\OCC)c1ccccc1O'],
+  ['P-66.1.6.1.1.3', '3-(ethylcarbamoylamino)propanoic acid', 'CCNC(=O)NCCC(=O)O'],
 ])('%s: %s', (_, name, smiles) => {
   const reading = readName(name);
   if (reading.kind !== 'understood') throw new Error(`${name}: ${reading.message}`);

@@ -58,6 +58,7 @@ export const acids: readonly AcidLine[] = [
   ['citr', 'citr', 'CCC(O)(C)CC', '1 2 3 - 6 4 5', '1 5 6'],
   ['lact', 'lact', 'CC(O)C', '3 2 O 1', '1'],
   ['glycol', 'glycol', 'OCC', 'O 2 1', '1'],
+  ['oxaldehyd', '', 'O=CC', '- 2 1', '1'],
   ['glyoxyl', 'glyoxyl', 'O=CC', '- 2 1', '1'],
   ['pyruv', 'pyruv', 'CC(=O)C', '3 2 - 1', '1'],
   ['acetoacet', 'acetoacet', 'CC(=O)CC', '4 3 - 2 1', '1'],

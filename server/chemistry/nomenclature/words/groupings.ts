@@ -151,6 +151,7 @@ export function linkedGroupings(
   base: Unit,
   last: GroupItem,
   nest: Nest,
+  oneGroup: boolean,
 ): Grouping[] | undefined {
   if (groups.length === 0) return base.needsLink === true ? undefined : [];
   if (groups.some(isOuter)) return undefined;
@@ -158,7 +159,7 @@ export function linkedGroupings(
   const apart = groups
     .slice(1)
     .some((group) => (!group.joins && !group.locants) || (group.bracketed && group.joins));
-  if (apart && base.needsLink !== true) return eachRun(groups, nest);
+  if (apart && base.needsLink !== true && !oneGroup) return eachRun(groups, nest);
   const found: Grouping[] = [];
   const range = { start: groups[0]!.start, end: groups[groups.length - 1]!.end };
   // `ethylmethylamino`: two alkyl groups on the nitrogen; `carboxymethylamino`: one group.
@@ -176,7 +177,7 @@ export function linkedGroupings(
   if (base.needsLink === true) return found.length > 0 ? found : undefined;
   const located = groups.some((group) => group.locants?.some((locant) => /^\d/.test(locant)));
   const several = groups.length > 1 || groups[0]!.count > 1 || groups[0]!.locants !== undefined;
-  if (!located && several && groups.every(canStand)) {
+  if (!oneGroup && !located && several && groups.every(canStand)) {
     found.push({ substitutions: groups.map(onLink), cost: alkyls || !whole ? 0 : 1 });
   }
   return found.length > 0 ? found : undefined;

@@ -39,7 +39,13 @@ export function structured(row: readonly Item[], name: PreparedName, depth = 0):
   }
   const groupings: (readonly Grouping[])[] = [...base.groupings];
   if (base.linkAt !== undefined) {
-    const linked = linkedGroupings(items.slice(0, -1), groups, base, last, nestedAs);
+    // Hydro prefixes and located descriptors are about a group before the link; a bare `(E)` is about the whole.
+    const belongs = (item: Item) =>
+      item.kind !== 'group' &&
+      (item.kind !== 'stereo' || item.words.some((word) => word.locant !== undefined));
+    const oneGroup = items.some(belongs);
+    const before = items.slice(0, -1).filter((item) => oneGroup || item.kind !== 'stereo');
+    const linked = linkedGroupings(before, groups, base, last, nestedAs, oneGroup);
     if (!linked) {
       // `(oxy)` by itself can still join others.
       if (items.length > 1 || !base.links) return undefined;
@@ -47,7 +53,7 @@ export function structured(row: readonly Item[], name: PreparedName, depth = 0):
     }
     if (linked.length > 0) {
       if (last.count > 1 && groups.length > 0) return undefined;
-      const unit = { ...base, groupings: [linked] };
+      const unit = { ...base, groupings: [linked], stereo: [...(oneGroup ? [] : stereo), ...base.stereo] };
       return { unit: withRange(unit, items), count: groups.length === 0 ? last.count : 1, role: last.role };
     }
   }
