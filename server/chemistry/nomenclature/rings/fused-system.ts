@@ -1,6 +1,7 @@
 /** Rings sharing bonds, as fusion nomenclature sees them: a component, or the whole put together from components. */
-import type { SkeletonGraph } from '../build/skeleton.ts';
+import type { SkeletonAtom, SkeletonGraph } from '../build/skeleton.ts';
 import { ringBasis } from '../../structure/ring-basis.ts';
+import { chalcogens } from './mancude.ts';
 
 export interface FusedSystem {
   readonly elements: readonly number[];
@@ -81,4 +82,26 @@ export const bondKey = (from: number, to: number): string =>
 export function precedes(one: string, other: string): boolean {
   const [first, second] = [Number.parseInt(one, 10), Number.parseInt(other, 10)];
   return first === second ? one < other : first < second;
+}
+
+/** The system as a parent with the most double bonds possible, its atoms in the order of their locants (`` for none). */
+export function numberedSkeleton(system: FusedSystem, locants: readonly string[]): SkeletonGraph {
+  const last = '9999';
+  const order = system.elements
+    .map((_, atom) => atom)
+    .sort((one, other) => (precedes(locants[one]! || last, locants[other]! || last) ? -1 : 1));
+  const place = new Map(order.map((atom, index) => [atom, index]));
+  return {
+    kind: 'fixed',
+    atoms: order.map((atom): SkeletonAtom => ({
+      atomicNumber: system.elements[atom]!,
+      charge: 0,
+      isotope: 0,
+      locants: locants[atom] === '' ? [] : [locants[atom]!],
+      mancude: !chalcogens.has(system.elements[atom]!),
+    })),
+    bonds: system.bonds.map(({ from, to }) => ({ from: place.get(from)!, to: place.get(to)!, order: 1 })),
+    indicated: [],
+    stereo: [],
+  };
 }

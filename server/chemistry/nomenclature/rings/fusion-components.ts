@@ -1,10 +1,11 @@
 /** Names of components in fusion names: attached ones as prefixes, and the base component at the end (P-25.2, P-25.3.1). */
-import { ring, skeletonFromSmiles, type SkeletonGraph } from '../build/skeleton.ts';
+import { ring, type SkeletonGraph } from '../build/skeleton.ts';
 import { contractedFusionPrefixes } from '../vocabulary/fusion-prefixes.ts';
 import { alkaneStem } from '../vocabulary/numbers.ts';
-import { rings } from '../vocabulary/rings.ts';
 import { componentOf, type Component } from './fused-system.ts';
 import { hantzschWidmanAt } from './hantzsch-widman.ts';
+import { chalcogens } from './mancude.ts';
+import { namedRing } from './named-rings.ts';
 
 export interface NamedComponents {
   /** What the name can mean; more than one where locants of heteroatoms are left out. */
@@ -13,7 +14,6 @@ export interface NamedComponents {
 }
 
 const longestWord = 30;
-const linesByName = new Map(rings.map((line) => [line[0], line]));
 const made = new Map<string, Component | undefined>();
 const contracted = new Map(contractedFusionPrefixes);
 /** `cyclopenta`, and elided before a vowel `cyclopent` (1979 rules). */
@@ -83,10 +83,9 @@ function named(name: string): Component[] {
 
 function retainedComponent(name: string): Component | undefined {
   if (made.has(name)) return made.get(name);
-  const line = linesByName.get(name);
-  if (!line) return undefined;
-  const skeleton = skeletonFromSmiles(line[1], line[2], line[3] === 'm', line[4]);
-  const component = skeleton && isMancude(skeleton) ? componentOf(skeleton) : undefined;
+  const skeleton = namedRing(name);
+  if (!skeleton) return undefined;
+  const component = isMancude(skeleton) ? componentOf(skeleton) : undefined;
   made.set(name, component);
   return component;
 }
@@ -103,8 +102,6 @@ function heterocycles(name: string): Component[] {
   heterocyclesByName.set(name, components);
   return components;
 }
-
-const chalcogens: ReadonlySet<number> = new Set([8, 16, 34, 52]);
 
 /** Components of fusion names have the most double bonds that they can have. */
 function isMancude(skeleton: SkeletonGraph): boolean {

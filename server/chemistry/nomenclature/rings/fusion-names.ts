@@ -3,12 +3,12 @@
  * `pyrido[2,3-d]pyrimidine`, `dibenzo[b,e]oxepine`, `pyrido[1',2':1,2]imidazo[4,5-b]quinoxaline`,
  * `benzo[1,2-b:4,5-b']dithiophene`.
  */
-import type { SkeletonAtom, SkeletonGraph } from '../build/skeleton.ts';
+import type { SkeletonGraph } from '../build/skeleton.ts';
 import { fusionDescriptorAt, type Attachment } from './fusion-descriptor.ts';
 import { basesAt, prefixesAt } from './fusion-components.ts';
 import { FusionJoining } from './fusion-joining.ts';
 import { fusionLocants } from './fusion-numbering.ts';
-import { precedes, type Component, type FusedSystem } from './fused-system.ts';
+import { numberedSkeleton, type Component, type FusedSystem } from './fused-system.ts';
 import { canonicalForm } from '../../structure/canonical-form.ts';
 import { MoleculeBuilder } from '../../structure/molecule.ts';
 
@@ -104,7 +104,7 @@ function meaning(
     const system = joined(prefixes, attached, base!, copies);
     if (!system) continue;
     const numberings = fusionLocants(system).map((locants, index) => ({
-      ...skeletonOf(system, locants),
+      ...numberedSkeleton(system, locants),
       ...(index > 0 ? { cost: unruledNumbering } : {}),
     }));
     if (numberings.length > 0) distinct.set(systemKey(system), numberings);
@@ -141,28 +141,4 @@ function systemKey(system: FusedSystem): string {
   for (const element of system.elements) builder.addAtom(element, { hydrogens: 0 });
   for (const { from, to } of system.bonds) builder.addBond(from, to, 1);
   return canonicalForm(builder.build(), { stereo: false }).key;
-}
-
-const chalcogens: ReadonlySet<number> = new Set([8, 16, 34, 52]);
-
-/** The system as a parent, its atoms in the order of their locants. */
-function skeletonOf(system: FusedSystem, locants: readonly string[]): SkeletonGraph {
-  const last = '9999';
-  const order = system.elements
-    .map((_, atom) => atom)
-    .sort((one, other) => (precedes(locants[one]! || last, locants[other]! || last) ? -1 : 1));
-  const place = new Map(order.map((atom, index) => [atom, index]));
-  return {
-    kind: 'fixed',
-    atoms: order.map((atom): SkeletonAtom => ({
-      atomicNumber: system.elements[atom]!,
-      charge: 0,
-      isotope: 0,
-      locants: locants[atom] === '' ? [] : [locants[atom]!],
-      mancude: !chalcogens.has(system.elements[atom]!),
-    })),
-    bonds: system.bonds.map(({ from, to }) => ({ from: place.get(from)!, to: place.get(to)!, order: 1 })),
-    indicated: [],
-    stereo: [],
-  };
 }

@@ -2,7 +2,7 @@
  * Rings with retained names and fixed numbering. Source: IUPAC Recommendations 2013, P-22.2.1 (table 2.2), P-25.1
  * (tables 2.7 and 2.8) and P-25.2.1; saturated ones P-31.1.4.2.4. Numbering of anthracene, phenanthrene, purine and
  * others with exceptional numbering: P-25.3.1.3.
- * Each line: name without final e, SMILES, locants in SMILES order, `m` when the ring is to be filled with double bonds
+ * Each line: name without final e, SMILES, locants in SMILES order (`rule`: numbered by P-25.3.1.3, and `m`), `m` when the ring is to be filled with double bonds
  * (SMILES then written saturated), locants of the usual indicated hydrogen.
  */
 export type RingLine = readonly [
@@ -96,4 +96,86 @@ export const rings: readonly RingLine[] = [
   ['norbornan', 'C1CC2CCC1C2', '2 3 4 5 6 1 7'],
   ['cuban', 'C12C3C4C1C5C2C3C45', '1 2 3 4 5 6 7 8'],
   ['oxiran', 'O1CC1', '1 2 3'],
+  ['pentalen', 'C1CCC2CCCC12', 'rule', 'm'],
+  ['heptalen', 'C1CCCCC2CCCCCC12', 'rule', 'm'],
+  ['octalen', 'C1CCCCCC2CCCCCCC12', 'rule', 'm'],
+  ['biphenylen', 'C1CCC2C(C1)C1CCCCC12', 'rule', 'm'],
+  ['as-indacen', 'C1CC2CCC3CCCC3C2C1', 'rule', 'm'],
+  ['s-indacen', 'C1CC2CC3CCCC3CC2C1', 'rule', 'm'],
+  ['fluoranthen', 'C1CCC2C(C1)C1CCCC3CCCC2C13', 'rule', 'm'],
+  ['aceanthrylen', 'C1CC2CCCC3CC4CCCCC4C1C23', 'rule', 'm'],
+  ['acephenanthrylen', 'C1CC2CCCC3C4CCCCC4CC1C23', 'rule', 'm'],
+  ['pleiaden', 'C1CCC2CC3CCCC4CCCC(CC2C1)C34', 'rule', 'm'],
+  ['hydrindan', 'C1CCC2CCCCC12', '1 2 3 3a 4 5 6 7 7a'],
+  ['pyrrolizin', 'C1CCN2CCCC12', '1 2 3 4 5 6 7 7a', 'm'],
+  ['quinolizin', 'C1CCCN2CCCCC12', '1 2 3 4 5 6 7 8 9 9a', 'm'],
+  ['2,6-naphthyridin', 'C1NCCC2CNCCC12', '1 2 3 4 4a 5 6 7 8 8a', 'm'],
+  ['2,7-naphthyridin', 'C1NCCC2CCNCC12', '1 2 3 4 4a 5 6 7 8 8a', 'm'],
+  ['phenanthridin', 'C1CCC2C(C1)CNC1CCCCC12', 'rule', 'm'],
+  ['perimidin', 'N1CNC2CCCC3CCCC1C23', '1 2 3 3a 4 5 6 6a 7 8 9 9a 9b', 'm', '1'],
+  ['thianthren', 'S1C2CCCCC2SC2CCCCC12', '5 5a 6 7 8 9 9a 10 10a 1 2 3 4 4a', 'm'],
+  ['selenanthren', '[Se]1C2CCCCC2[Se]C2CCCCC12', '5 5a 6 7 8 9 9a 10 10a 1 2 3 4 4a', 'm'],
+  ['oxanthren', 'O1C2CCCCC2OC2CCCCC12', '5 5a 6 7 8 9 9a 10 10a 1 2 3 4 4a', 'm'],
+  ['dibenzo-1,4-dioxin', 'O1C2CCCCC2OC2CCCCC12', '5 5a 6 7 8 9 9a 10 10a 1 2 3 4 4a', 'm'],
+  ['phenoxathiin', 'O1C2CCCCC2SC2CCCCC12', '5 5a 6 7 8 9 9a 10 10a 1 2 3 4 4a', 'm'],
+  ['phenoselenazin', 'N1C2CCCCC2[Se]C3CCCCC13', '10 10a 1 2 3 4 4a 5 5a 6 7 8 9 9a', 'm', '10'],
+  ['selenoxanthen', '[Se]1C2CCCCC2CC3CCCCC13', '10 4a 4 3 2 1 9a 9 8a 8 7 6 5 10a', 'm', '9'],
+  ['acridan', 'N1c2ccccc2Cc2ccccc12', '10 4a 4 3 2 1 9a 9 8a 8 7 6 5 10a'],
+  ['dibenzoselenophen', '[Se]1C2CCCCC2C3CCCCC13', '5 4a 4 3 2 1 9b 9a 9 8 7 6 5a', 'm'],
+  ['tellurophen', 'C1CCC[Te]1', '2 3 4 5 1', 'm'],
+  ['furazan', 'O1NCCN1', '1 2 3 4 5', 'm'],
+  ['thiochromen', 'S1CCCC2CCCCC12', '1 2 3 4 4a 5 6 7 8 8a', 'm', ''],
+  ['selenochromen', '[Se]1CCCC2CCCCC12', '1 2 3 4 4a 5 6 7 8 8a', 'm', ''],
+  ['isothiochromen', 'C1SCCC2CCCCC12', '1 2 3 4 4a 5 6 7 8 8a', 'm', '1'],
+  ['isoselenochromen', 'C1[Se]CCC2CCCCC12', '1 2 3 4 4a 5 6 7 8 8a', 'm', '1'],
+  ['isochroman', 'C1OCCc2ccccc12', '1 2 3 4 4a 5 6 7 8 8a'],
+  ['thiochroman', 'S1CCCc2ccccc12', '1 2 3 4 4a 5 6 7 8 8a'],
+  ['selenochroman', '[Se]1CCCc2ccccc12', '1 2 3 4 4a 5 6 7 8 8a'],
+  ['isothiochroman', 'C1SCCc2ccccc12', '1 2 3 4 4a 5 6 7 8 8a'],
+  ['isoindolin', 'C1NCc2ccccc12', '1 2 3 3a 4 5 6 7 7a'],
+  ['indolenin', 'N1=CCc2ccccc12', '1 2 3 3a 4 5 6 7 7a'],
+  ['phthalan', 'C1OCc2ccccc12', '1 2 3 3a 4 5 6 7 7a'],
+  ['benzodioxol', 'O1COC2CCCCC12', '1 2 3 3a 4 5 6 7 7a', 'm'],
+  ['1,4-benzodioxan', 'O1CCOc2ccccc12', '1 2 3 4 4a 5 6 7 8 8a'],
+  ['benzodioxan', 'O1CCOc2ccccc12', '1 2 3 4 4a 5 6 7 8 8a'],
+  ['1,3-benzodioxan', 'O1COCc2ccccc12', '1 2 3 4 4a 5 6 7 8 8a'],
+  ['α-carbolin', 'N1CCCC2C1NC1CCCCC12', '1 2 3 4 4a 9a 9 8a 8 7 6 5 4b', 'm', '9'],
+  ['β-carbolin', 'C1NCCC2C1NC1CCCCC12', '1 2 3 4 4a 9a 9 8a 8 7 6 5 4b', 'm', '9'],
+  ['γ-carbolin', 'C1NCCC2C1C1CCCCC1N2', '1 2 3 4 4a 9b 9a 9 8 7 6 5a 5', 'm', '5'],
+  ['δ-carbolin', 'N1CCCC2C1C1CCCCC1N2', '1 2 3 4 4a 9b 9a 9 8 7 6 5a 5', 'm', '5'],
+  ['oxazolidin', 'O1CNCC1', '1 2 3 4 5'],
+  ['isoxazolidin', 'O1NCCC1', '1 2 3 4 5'],
+  ['thiazolidin', 'S1CNCC1', '1 2 3 4 5'],
+  ['isothiazolidin', 'S1NCCC1', '1 2 3 4 5'],
+  ['selenomorpholin', '[Se]1CCNCC1', '1 2 3 4 5 6'],
+  ['homopiperazin', 'N1CCNCCC1', '1 2 3 4 5 6 7'],
+  ['homomorpholin', 'O1CCNCCC1', '1 2 3 4 5 6 7'],
+  ['dioxolan', 'O1COCC1', '1 2 3 4 5'],
+  ['borazin', 'N1BNBNB1', '1 2 3 4 5 6'],
+  ['boroxin', 'O1BOBOB1', '1 2 3 4 5 6'],
+  ['s-triazin', 'N1CNCNC1', '1 2 3 4 5 6', 'm'],
+  ['sym-triazin', 'N1CNCNC1', '1 2 3 4 5 6', 'm'],
+  ['as-triazin', 'N1NCNCC1', '1 2 3 4 5 6', 'm'],
+  ['s-tetrazin', 'N1NCNNC1', '1 2 3 4 5 6', 'm'],
+  ['s-trioxan', 'O1COCOC1', '1 2 3 4 5 6'],
+  ['sym-trioxan', 'O1COCOC1', '1 2 3 4 5 6'],
+  ['s-trithian', 'S1CSCSC1', '1 2 3 4 5 6'],
+  ['s-triazol', 'N1NCNC1', '1 2 3 4 5', 'm', '1'],
+  ['v-triazol', 'N1NNCC1', '1 2 3 4 5', 'm', '1'],
 ];
+
+/** P-25.2.1: nitrogen in both outer rings, numbered as drawn; `m` 1 to 4, `n` 7 to 10. */
+const phenanthrolinePlaces = ['1,7', '1,8', '1,9', '1,10', '2,7', '2,8', '2,9', '3,7', '3,8', '4,7'];
+const phenanthrolineLocants = '1 2 3 4 4a 5 6 6a 7 8 9 10 10a 10b';
+
+export const phenanthrolines: readonly RingLine[] = phenanthrolinePlaces.map((places): RingLine => {
+  const nitrogens = places.split(',');
+  const atoms = phenanthrolineLocants.split(' ').map((locant) => (nitrogens.includes(locant) ? 'N' : 'C'));
+  const closings = ['1', '', '', '', '2', '', '', '3', '', '', '', '', '3', '12'];
+  return [
+    `${places}-phenanthrolin`,
+    atoms.map((atom, index) => atom + closings[index]!).join(''),
+    phenanthrolineLocants,
+    'm',
+  ];
+});

@@ -145,6 +145,8 @@ function groupsOf(
       if (!word.extensible) return plainForms(word.skeletons, lower, start, end);
       return ringForms(word.skeletons, text, lower, start, end, lexicon);
     case 'ring':
+      // `tetraphenyl` is four phenyl groups.
+      if (/aphen$/.test(lower.slice(start, end)) && lower.startsWith('yl', end)) return [];
       return ringForms(word.skeletons, text, lower, start, end, lexicon);
     case 'acid':
       return acidForms(word, lower, start, end);

@@ -7,7 +7,7 @@ import type { Item } from './item.ts';
 import { groupsAt, type Group } from './groups.ts';
 import { chainOfLinks } from './joints.ts';
 import { wordsAt, type Lexicon } from './lexicon.ts';
-import { indicatedAt, locantsAt } from './locants.ts';
+import { addedHydrogenAt, indicatedAt, locantsAt } from './locants.ts';
 import type { PreparedName } from './prepared.ts';
 import { stereoAt } from './stereo-words.ts';
 import { structured } from './structure.ts';
@@ -114,9 +114,26 @@ export class ItemReader {
     const hydrogen = indicatedAt(text, offset);
     if (hydrogen)
       yield { item: { kind: 'indicated', locants: hydrogen.value, start: offset }, end: hydrogen.end };
+    const added = addedHydrogenAt(text, offset);
+    if (added) yield* this.#withAddedHydrogen(offset, added);
     const locants = locantsAt(text, offset);
     if (locants) yield* this.#countedAt(offset, locants.end, locants.value);
     yield* this.#countedAt(offset, offset, undefined);
+  }
+
+  /** `2(1H)-quinolinone`, `1,3(2H,4H)-isoquinolinedione`: older names put them before the parent (1979 rules). */
+  *#withAddedHydrogen(
+    start: number,
+    { value, added, end }: { value: readonly Locant[]; added: readonly Locant[]; end: number },
+  ): Generator<{ item: Item; end: number }> {
+    for (const group of this.#groupWordsAt(end)) {
+      const [ending, second] = group.unit.endings;
+      if (!ending || second || ending.locants !== undefined || ending.count !== value.length) continue;
+      const endings = [{ ...ending, locants: value, addedHydrogen: added }];
+      const place = { count: 1, start, bodyAt: end, end: group.end, joins: false, bracketed: false };
+      const item: Item = { kind: 'group', ...place, unit: { ...group.unit, endings }, role: group.role };
+      yield { item, end: group.end };
+    }
   }
 
   *#countedAt(

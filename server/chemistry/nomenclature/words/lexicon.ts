@@ -5,6 +5,7 @@ import { anions } from '../vocabulary/functions.ts';
 import { acids, type AcidLine } from '../vocabulary/acids.ts';
 import { alkaneStem, groupTerm, numericalTerm, numericalTermVariants } from '../vocabulary/numbers.ts';
 import { extensibleParents, otherNumberings, parents } from '../vocabulary/parents.ts';
+import { partlySaturatedRings, ringsWithGroups } from '../vocabulary/partly-saturated-rings.ts';
 import {
   branchedStems,
   contractedRings,
@@ -12,8 +13,8 @@ import {
   linkingPrefixes,
   simplePrefixes,
 } from '../vocabulary/prefixes.ts';
-import { rings } from '../vocabulary/rings.ts';
 import { links, linkingToo, ringLinks } from '../vocabulary/links.ts';
+import { namedRing, ringNames } from '../rings/named-rings.ts';
 import { suffixes } from '../vocabulary/suffixes.ts';
 
 export type Word =
@@ -131,16 +132,11 @@ export function createLexicon(): Lexicon {
       });
     }
   }
-  const ringSkeletons = new Map<string, Lazy>();
-  for (const [name, smiles, locants, mancude, indicated] of rings) {
-    const skeletons = lazily(() => [skeletonFromSmiles(smiles, locants, mancude === 'm', indicated)]);
-    ringSkeletons.set(name, skeletons);
-    put(name, { kind: 'ring', skeletons });
-  }
+  for (const name of ringNames) put(name, { kind: 'ring', skeletons: lazily(() => [namedRing(name)]) });
   for (const [name, ring] of contractedRings)
-    put(name, { kind: 'contracted', skeletons: ringSkeletons.get(ring)!, valences: 1 });
+    put(name, { kind: 'contracted', skeletons: lazily(() => [namedRing(ring)]), valences: 1 });
   for (const [name, ring] of ringLinks)
-    put(name, { kind: 'contracted', skeletons: ringSkeletons.get(ring)!, valences: 2 });
+    put(name, { kind: 'contracted', skeletons: lazily(() => [namedRing(ring)]), valences: 2 });
   putLinks(put);
   for (const [name, smiles, locants] of branchedStems) {
     put(name, {
@@ -206,7 +202,9 @@ const otherNumberingCost = 5;
 /** Names with siblings (`xylene`) stand for all of them, and with `o-`, `m-`, `p-` or `ortho-` … for one. */
 function putParents(put: (word: string, value: Word) => void): void {
   const byName = new Map<string, (readonly [string, string, string, string?])[]>();
-  for (const line of parents) byName.set(line[0], [...(byName.get(line[0]) ?? []), line]);
+  const partly = new Set(partlySaturatedRings.map(([name]) => name));
+  for (const line of [...parents, ...partlySaturatedRings, ...ringsWithGroups])
+    byName.set(line[0], [...(byName.get(line[0]) ?? []), line]);
   const long: Readonly<Record<string, string>> = { 'o-': 'ortho-', 'm-': 'meta-', 'p-': 'para-' };
   for (const [name, lines] of byName) {
     const made = lines.map((line) =>
@@ -215,7 +213,7 @@ function putParents(put: (word: string, value: Word) => void): void {
         return [skeleton && line[3] !== undefined ? { ...skeleton, mark: line[3] } : skeleton];
       }),
     );
-    const extensible = extensibleParents.has(name);
+    const extensible = extensibleParents.has(name) || partly.has(name);
     const others = lazily(() =>
       otherNumberings
         .filter((line) => line[0] === name)

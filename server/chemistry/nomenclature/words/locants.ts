@@ -2,7 +2,7 @@
 import type { Locant } from '../tree.ts';
 
 /** `2(10)`: a bond between two places that do not follow each other (P-31.1.4.2.4). */
-const compound = "(?:\\(\\d+[a-z]?'*\\))?";
+const compound = "(?:\\(\\d+[a-gi-z]?'*\\))?";
 const one = `(?:\\d+(?:[a-z](?![a-z]))?'*${compound}(?:-N'*(?![a-z]))?|[NnOSPC]\\d*'*|[αβγδεω]'*|[omp])`;
 const list = new RegExp(`(${one}(?:, ?${one})*)-`, 'y');
 const indicated = /\(?((?:\d+[a-z]?'*[Hh](?![a-z]))(?:,\d+[a-z]?'*[Hh](?![a-z]))*)\)?-?/y;
@@ -23,6 +23,20 @@ export function locantsAt(text: string, offset: number): Written<Locant[]> | und
     return numbered ? `${numbered[1]!}-N` : normal;
   });
   return { value, end: list.lastIndex };
+}
+
+const withAdded = /-?(\d+[a-z]?'*(?:,\d+[a-z]?'*)*)\((\d+[a-z]?'*[Hh](?:,\d+[a-z]?'*[Hh])*)\)-/y;
+
+/** `2(1H)-`, `-1,3(2H,4H)-`: locants of a group with the hydrogen that it brings along (P-31.1.4.3.4). */
+export function addedHydrogenAt(
+  text: string,
+  offset: number,
+): (Written<Locant[]> & { readonly added: Locant[] }) | undefined {
+  withAdded.lastIndex = offset;
+  const match = withAdded.exec(text);
+  if (!match) return undefined;
+  const added = match[2]!.split(',').map((one) => one.slice(0, -1));
+  return { value: match[1]!.split(','), added, end: withAdded.lastIndex };
 }
 
 /** `1H-`, `2H,4H-` at the offset, parentheses allowed. */

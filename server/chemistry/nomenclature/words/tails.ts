@@ -4,7 +4,7 @@
  */
 import type { Ending, Locant, SuffixEntry, Unsaturation } from '../tree.ts';
 import { wordsAt, type Lexicon } from './lexicon.ts';
-import { locantsAt } from './locants.ts';
+import { addedHydrogenAt, locantsAt } from './locants.ts';
 
 export interface Tail {
   readonly unsaturations: readonly Unsaturation[];
@@ -12,7 +12,6 @@ export interface Tail {
   readonly end: number;
 }
 
-const added = /-?(\d+[a-z]?(?:,\d+[a-z]?)*)\((\d+[a-z]?[Hh](?:,\d+[a-z]?[Hh])*)\)-/y;
 const elided = /(tetr|pent|hex)(?=ol|on|amin|oic|yl)/y;
 
 interface Counted {
@@ -27,16 +26,12 @@ interface Counted {
 /** Locants and multiplier in the middle of a word: `-1,3-di`, `di`, `-2-`, or nothing. */
 function* countedAt(text: string, lower: string, offset: number, lexicon: Lexicon): Generator<Counted> {
   const starts: { locants?: Locant[]; added?: Locant[]; end: number }[] = [];
-  added.lastIndex = offset;
-  const match = added.exec(text);
-  if (match) {
-    const hydrogens = match[2]!.split(',').map((one) => one.slice(0, -1));
-    starts.push({ locants: match[1]!.split(','), added: hydrogens, end: added.lastIndex });
-  }
+  const hydrogen = addedHydrogenAt(text, offset);
+  if (hydrogen) starts.push({ locants: hydrogen.value, added: hydrogen.added, end: hydrogen.end });
   const hyphen = text[offset] === '-' ? offset + 1 : offset;
   const written = locantsAt(text, hyphen);
   if (written) starts.push({ locants: written.value, end: written.end });
-  else if (!match) starts.push({ end: hyphen });
+  else if (!hydrogen) starts.push({ end: hyphen });
   for (const start of starts) {
     const base = { ...start, at: offset };
     if (!start.locants || start.locants.length === 1) yield { ...base, count: 1 };

@@ -10,6 +10,7 @@ import { rings } from '../../../../server/chemistry/nomenclature/vocabulary/ring
 
 /** P-25.3.1.3, exceptions to systematic numbering. */
 const exceptional = new Set([
+  'acridan',
   'acridin',
   'anthracen',
   'carbazol',
@@ -18,6 +19,7 @@ const exceptional = new Set([
   'purin',
   // Not fused, but bridged.
   'norbornan',
+  'selenoxanthen',
   'thioxanthen',
   'xanthen',
 ]);
