@@ -34,7 +34,7 @@ describe('line formulas', () => {
     ['CH3CH(NH2)COOH', 'CC(N)C(=O)O'],
     ['NCCH2CO2Et', 'CCOC(=O)CC#N'],
     ['CH2(CN)2', 'N#CCC#N'],
-    ['OHCCHO', 'O=CC=O'],
+    ['OHCCH2CHO', 'O=CCC=O'],
     ['CH2=CHCN', 'C=CC#N'],
     ['HC≡CH', 'C#C'],
     ['PhC#CH', 'C#Cc1ccccc1'],
@@ -190,7 +190,7 @@ describe('what is no formula of one structure', () => {
     // Letters that are no atoms.
     ...['ArNH2', 'RCO2H', 'ROH', 'MX2', 'NuH'],
     // Molecular formulas.
-    ...['C4H10O', 'C2H6O', 'C6H12O6', 'C6H6', 'C3H6O'],
+    ...['C4H10O', 'C2H6O', 'C6H12O6', 'C6H6', 'C3H6O', 'C2H5NO2', 'C6H5NO2', 'C6H5N3', 'C2H5ClO', 'HNaO'],
     // Two structures.
     ...['(EtO)2POCH2CO2Et'],
     // Charges or valences that do not come out.
@@ -214,6 +214,22 @@ describe('what is no formula of one structure', () => {
       'COIN',
       'SON',
       'OH',
+    ],
+    ...[
+      'NO',
+      'PhD',
+      'VIS',
+      'SEMI',
+      'WOODS',
+      'SNIFF',
+      'VII',
+      'SPDIF',
+      'WOOF',
+      'COCOS',
+      'Wen',
+      'PyW',
+      'Phone',
+      'Bench',
     ],
     // The case counts.
     ...['k2co3', 'NACL', 'ch2cl2'],

@@ -77,7 +77,8 @@ function wholeSmiles(sketch: Sketch): string | undefined {
   const [first, second] = waiting;
   if (waiting.length !== 2 || first === undefined || second === undefined) return undefined;
   // `IPr` and `IMes` are carbenes, `HAc` is acetic acid to some: only hydrogen halides begin with their smaller half.
-  if (first === 'H' ? !halogens.has(second) : halogens.has(first)) return undefined;
+  // `PhD` is a degree.
+  if (first === 'H' ? !halogens.has(second) : halogens.has(first) || second === '[2H]') return undefined;
   return first === 'H' ? second : `${bonded(first)}.${bonded(second)}`;
 }
 

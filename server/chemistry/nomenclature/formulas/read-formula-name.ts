@@ -4,6 +4,7 @@
  */
 import { canonicalForm } from '../../structure/canonical-form.ts';
 import type { Molecule } from '../../structure/molecule.ts';
+import { elementWithSymbol } from '../../composition/elements.ts';
 import { readSmiles } from '../../structure/read-smiles.ts';
 import { elementReagents, wholeFormulas } from '../vocabulary/formula-whole.ts';
 import { formulaParts, plainFormula } from './formula-text.ts';
@@ -43,9 +44,28 @@ export function readFormulaName(
 function partSmiles(text: string, steps: Steps): string | undefined {
   const whole = known.get(text);
   if (whole !== undefined) return whole;
+  // Letters without a number are words or abbreviations (`VIS`, `SEMI`) more often than formulas; `KOH` is in the table.
+  if (/^[A-Z]*$/.test(text) || isMolecularFormula(text)) return undefined;
   const lines = distinct(lineFormulas(text, steps));
   if (lines.length > 1 || steps.left <= 0) return undefined;
   return lines[0] ?? saltFormula(text, steps);
+}
+
+/**
+ * `C2H5NO2` in the order of Hill says what is in it, not how it is connected, though it could be cut into `C2H5` and `NO2`. Of
+ * one carbon atom and of ethyl halides there is only one compound.
+ */
+function isMolecularFormula(text: string): boolean {
+  const [, carbons, rest] = /^C(\d+)H\d*((?:[A-Z][a-z]?\d*)*)$/.exec(text) ?? [];
+  if (carbons === undefined || rest === undefined || /^C2H5(?:F|Cl|Br|I)$/.test(text)) return false;
+  const symbols = rest.match(/[A-Z][a-z]?/g) ?? [];
+  return symbols.every(
+    (symbol, index) =>
+      symbol !== 'C' &&
+      symbol !== 'H' &&
+      elementWithSymbol(symbol) !== undefined &&
+      (index === 0 || symbols[index - 1]! < symbol),
+  );
 }
 
 /** One SMILES for each constitution. */

@@ -29,8 +29,21 @@ export function saltFormula(text: string, steps: Steps): string | undefined {
 
 function isSalt(members: readonly Member[]): boolean {
   const open = members.some((one) => one.kind === 'metal' && metalCharges[one.symbol]!.length > 1);
-  if (!members.some((one) => one.kind === 'metal' || one.kind === 'ion')) return false;
-  return !(open && members.some((one) => one.kind === 'ion' && besideFixedCharges.has(one.smiles)));
+  const ions = members.flatMap((one) => (one.kind === 'ion' ? [one.smiles] : []));
+  if (ions.length + members.filter((one) => one.kind === 'metal').length === 0) return false;
+  if (new Set(ions).size < ions.length || !isPlain(ions.filter((smiles) => atomic.test(smiles))))
+    return false;
+  return !(open && ions.some((smiles) => besideFixedCharges.has(smiles)));
+}
+
+const atomic = /^\[[A-Z][a-z]?-\d?\]$/;
+
+/** One kind of monatomic anion, or oxide before halide as in `ZrOCl2`. */
+function isPlain(anions: readonly string[]): boolean {
+  return (
+    anions.length < 2 ||
+    (anions.length === 2 && anions[0] === '[O-2]' && /^\[(?:F|Cl|Br|I)-\]$/.test(anions[1]!))
+  );
 }
 
 /** Before the first cation or metal; among them; after them. */
@@ -59,36 +72,39 @@ function* membersAt(text: string, at: number, stage: Stage, steps: Steps): Gener
     yield* bracketed(text, at, stage, steps);
     return;
   }
-  const counted = function* (
-    table: SymbolTable,
-    make: (smiles: string, count: number) => Member,
-    next: Stage,
-  ): Generator<Found> {
-    for (const { smiles, end } of table.at(text, at)) {
-      const number = countAt(text, end);
-      if (number) yield { member: [make(smiles, number.count)], end: number.end, next };
-    }
-  };
-  const ion = (smiles: string, count: number): Member => ({ kind: 'ion', smiles, count });
+  const after = stage === 'front' ? 'front' : 'rest';
   if (stage !== 'rest') {
-    yield* counted(cations, ion, 'cations');
-    yield* counted(metals, (symbol, count) => ({ kind: 'metal', symbol, count }), 'cations');
-    if (text[at] === 'H') {
-      const number = countAt(text, at + 1);
-      if (number)
-        yield { member: [{ kind: 'hydrogen', count: number.count }], end: number.end, next: 'rest' };
-    }
-  } else yield* counted(metals, (symbol, count) => ({ kind: 'metal', symbol, count }), 'rest');
-  if (stage !== 'front' || text.startsWith('Cp', at))
-    yield* counted(anions, ion, stage === 'front' ? 'front' : 'rest');
-  yield* counted(
-    ligands,
-    (smiles, count) => ({ kind: 'ligand', smiles, count }),
-    stage === 'front' ? 'front' : 'rest',
-  );
+    yield* counted(text, at, cations, ionOf, 'cations');
+    yield* counted(text, at, metals, (symbol, count) => ({ kind: 'metal', symbol, count }), 'cations');
+    const hydrogens = text[at] === 'H' ? countAt(text, at + 1) : undefined;
+    if (hydrogens)
+      yield { member: [{ kind: 'hydrogen', count: hydrogens.count }], end: hydrogens.end, next: 'rest' };
+  }
+  if (stage !== 'front' || text.startsWith('Cp', at)) yield* counted(text, at, anions, ionOf, after);
+  // After the metal ligands stand in brackets (`Wen` is no complex), before it short ones do (`PyW`).
+  if (stage === 'front') {
+    for (const found of counted(text, at, ligands, ligandOf, after)) if (found.end - at > 3) yield found;
+  }
   if (stage === 'cations') {
     for (const { anion } of fragments(text.slice(at), steps))
-      if (anion !== undefined) yield { member: [ion(anion, 1)], end: text.length, next: 'rest' };
+      if (anion !== undefined) yield { member: [ionOf(anion, 1)], end: text.length, next: 'rest' };
+  }
+}
+
+const ionOf = (smiles: string, count: number): Member => ({ kind: 'ion', smiles, count });
+const ligandOf = (smiles: string, count: number): Member => ({ kind: 'ligand', smiles, count });
+
+/** What a table has at a place, with its number. */
+function* counted(
+  text: string,
+  at: number,
+  table: SymbolTable,
+  make: (smiles: string, count: number) => Member,
+  next: Stage,
+): Generator<Found> {
+  for (const { smiles, end } of table.at(text, at)) {
+    const number = countAt(text, end);
+    if (number) yield { member: [make(smiles, number.count)], end: number.end, next };
   }
 }
 

@@ -142,7 +142,6 @@ function protonated(smiles: string): string | undefined {
     ['[O-]', 'O'],
     ['[S-]', 'S'],
     ['[S-2]', '[SH-]'],
-    ['[O-2]', '[OH-]'],
   ] as const) {
     if (smiles.includes(ion)) return smiles.replace(ion, acid);
   }

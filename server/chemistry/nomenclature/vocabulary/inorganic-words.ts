@@ -294,7 +294,6 @@ export const complexNames: readonly (readonly [names: string, formula: string])[
   ['dinitrogen tetroxide|dinitrogen tetraoxide', 'N2O4'],
   ['dinitrogen pentoxide|dinitrogen pentaoxide', 'N2O5'],
   ['dinitrogen monoxide|dinitrogen oxide', 'N2O'],
-  ['nitrogen monoxide', 'NO'],
   ['nitrogen dioxide', 'NO2'],
   ['nitrosyl chloride', 'NOCl'],
   ['disulfur dichloride|sulfur monochloride', 'S2Cl2'],

@@ -29,7 +29,6 @@ export const gradeWords: readonly string[] = [
     'deionized',
     'de-ionised',
     'de-ionized',
-    'di',
     'milli-q',
     'ice-cold',
     'cold',

@@ -42,7 +42,11 @@ export const mixtures: readonly (readonly [names: string, what: string, componen
   ],
   ['air|compressed air', 'Air is a mixture of nitrogen, oxygen and argon.', 'nitrogen|oxygen|argon'],
   ['forming gas', 'Forming gas is hydrogen in nitrogen.', 'hydrogen|nitrogen'],
-  ['syngas|synthesis gas', 'Synthesis gas is carbon monoxide and hydrogen.', 'carbon monoxide|hydrogen'],
+  [
+    'syngas|synthesis gas|water gas',
+    'Synthesis gas is carbon monoxide and hydrogen.',
+    'carbon monoxide|hydrogen',
+  ],
   [
     "celite|silica|silica gel|sio2 gel|molecular sieves|3 å molecular sieves|4 å molecular sieves|5 å molecular sieves|3a molecular sieves|4a molecular sieves|5a molecular sieves|ms 3å|ms 4å|ms 5å|alumina|neutral alumina|basic alumina|florisil|kieselguhr|diatomaceous earth|montmorillonite k10|montmorillonite|kaolin|sand|sea sand|glass wool|cotton wool|zeolite|fuller's earth",
     'This is a solid of no single molecular structure.',

@@ -4,7 +4,7 @@
  * Each line: names parted by `|`, in lower case; SMILES.
  */
 export const inorganicNames: readonly (readonly [names: string, smiles: string])[] = [
-  ['water|ice|ice-water|ice water', 'O'],
+  ['water|ice|ice-water|ice water|di water', 'O'],
   ['ammonia', 'N'],
   ['hydrogen|dihydrogen', '[H][H]'],
   ['nitrogen|dinitrogen', 'N#N'],
@@ -19,7 +19,7 @@ export const inorganicNames: readonly (readonly [names: string, smiles: string])
   ['carbon monoxide', '[C-]#[O+]'],
   ['carbon dioxide|dry ice', 'O=C=O'],
   ['nitrous oxide', '[N-]=[N+]=O'],
-  ['nitric oxide', '[N]=O'],
+  ['nitric oxide|nitrogen monoxide', '[N]=O'],
   ['hydrogen chloride|hydrochloric acid', 'Cl'],
   ['hydrogen bromide|hydrobromic acid', 'Br'],
   ['hydrogen iodide|hydriodic acid|hydroiodic acid', 'I'],
