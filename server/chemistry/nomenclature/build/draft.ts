@@ -46,6 +46,11 @@ export interface ChainClaim {
   readonly range: TextRange;
 }
 
+/** One number for a pair of atoms, in either order; drafts stay far below so many atoms. */
+export function ringBondKey(first: number, second: number): number {
+  return first < second ? first * 0x100000 + second : second * 0x100000 + first;
+}
+
 export class Draft {
   readonly atoms: DraftAtom[] = [];
   readonly bonds: { from: number; to: number; order: number }[] = [];
@@ -65,8 +70,8 @@ export class Draft {
   readonly named = new Map<number, { locant: Locant | undefined; parentAt: number; owner: Owner }>();
   /** The unit now being built. */
   owner: Owner = { at: 0, depth: 0, repeated: false };
-  /** Bonds that belong to the skeletons of mancude rings, as pairs of atoms, the lower first. */
-  readonly ringBonds = new Set<string>();
+  /** Bonds that belong to the skeletons of mancude rings, by `ringBondKey`. */
+  readonly ringBonds = new Set<number>();
   cost = 0;
   failure: { range: TextRange; message: string } | undefined;
 
@@ -123,7 +128,7 @@ export class Draft {
         skeleton.atoms[bond.to]!.mancude &&
         bond.delocalised !== false
       ) {
-        this.ringBonds.add(`${String(Math.min(from, to))} ${String(Math.max(from, to))}`);
+        this.ringBonds.add(ringBondKey(from, to));
       }
     }
     skeleton.atoms.forEach((atom, index) => {

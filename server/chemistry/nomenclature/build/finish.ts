@@ -3,7 +3,7 @@ import { maximumMatching } from '../../structure/kekulize.ts';
 import { MoleculeBuilder, type BondOrder, type Molecule } from '../../structure/molecule.ts';
 import type { TextRange } from '../../text.ts';
 import type { Choices } from './choices.ts';
-import type { Draft } from './draft.ts';
+import { ringBondKey, type Draft } from './draft.ts';
 
 /** The molecule, or undefined when the double bonds cannot be placed or an atom has too many bonds. */
 export function finished(draft: Draft, choices: Choices, whole: TextRange): Molecule | undefined {
@@ -137,7 +137,5 @@ function matching(draft: Draft, ring: readonly number[]): { single: number[]; pa
 
 /** Bonds between two rings (as in biphenyl) join mancude atoms but are no bonds of a ring. */
 function sameRing(draft: Draft, first: number, second: number): boolean {
-  return draft.ringBonds.has(
-    first < second ? `${String(first)} ${String(second)}` : `${String(second)} ${String(first)}`,
-  );
+  return draft.ringBonds.has(ringBondKey(first, second));
 }

@@ -42,6 +42,7 @@ const known = new Map<string, readonly FusionName[]>();
 
 /** Fusion names that begin at the offset. */
 export function fusionNamesAt(lower: string, offset: number): readonly FusionName[] {
+  if (!lower.includes('[', offset) && !lower.includes('(', offset)) return [];
   if (prefixStarts(lower, offset).length === 0) return [];
   const rest = lower.slice(offset);
   let found = known.get(rest);

@@ -3,7 +3,7 @@ import type { Locant, StereoWord, Unit } from '../tree.ts';
 
 export interface GroupItem {
   readonly kind: 'group';
-  readonly locants?: readonly Locant[];
+  readonly locants?: readonly Locant[] | undefined;
   readonly count: number;
   /** `bis`, or a bracket follows: the multiplier belongs to a compound substituent. */
   readonly unit: Unit;
@@ -23,14 +23,14 @@ export type Item =
   | { readonly kind: 'indicated'; readonly locants: readonly Locant[]; readonly start: number }
   | {
       readonly kind: 'hydro';
-      readonly locants?: readonly Locant[];
+      readonly locants?: readonly Locant[] | undefined;
       readonly count: number;
       readonly start: number;
       readonly end: number;
     }
   | {
       readonly kind: 'replacement';
-      readonly locants?: readonly Locant[];
+      readonly locants?: readonly Locant[] | undefined;
       readonly count: number;
       readonly atomicNumber: number;
       readonly start: number;

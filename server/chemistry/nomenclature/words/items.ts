@@ -6,7 +6,7 @@ import type { Locant, Unit } from '../tree.ts';
 import type { Item } from './item.ts';
 import { groupsAt, type Group } from './groups.ts';
 import { chainOfLinks } from './joints.ts';
-import { wordsAt, type Lexicon } from './lexicon.ts';
+import { wordsAt, type Lexicon, type Word } from './lexicon.ts';
 import { addedHydrogenAt, indicatedAt, locantsAt } from './locants.ts';
 import type { PreparedName } from './prepared.ts';
 import { stereoAt } from './stereo-words.ts';
@@ -24,6 +24,8 @@ export interface Stretch {
   readonly role: 'radical' | 'parent';
   readonly end: number;
 }
+
+type FoundWord = ReturnType<typeof wordsAt<Word>>[number];
 
 const rowCap = 24;
 /** P-15.4.1.1: the multiplier loses its a before `aza`, `oxa`; common practice, no source. */
@@ -43,6 +45,8 @@ export class ItemReader {
   readonly #rows = new Map<number, readonly Row[]>();
   readonly #open = new Set<number>();
   readonly #groupWords = new Map<number, readonly Group[]>();
+  readonly #words = new Map<number, readonly FoundWord[]>();
+  readonly #stretches = new Map<number, readonly Stretch[]>();
   /** The furthest place to which every letter was understood. */
   furthest = 0;
   steps = 0;
@@ -62,7 +66,13 @@ export class ItemReader {
   }
 
   /** All stretches that begin at the offset. */
-  stretchesAt(offset: number): Stretch[] {
+  stretchesAt(offset: number): readonly Stretch[] {
+    let found = this.#stretches.get(offset);
+    if (!found) this.#stretches.set(offset, (found = this.#findStretches(offset)));
+    return found;
+  }
+
+  #findStretches(offset: number): Stretch[] {
     const found: Stretch[] = [];
     for (const row of this.rowsAt(offset)) {
       const made = structured(row.items, this.name);
@@ -142,16 +152,16 @@ export class ItemReader {
     locants: readonly Locant[] | undefined,
   ): Generator<{ item: Item; end: number }> {
     const { lower } = this.name;
-    yield* this.#groupsAt(start, from, locants, 1);
-    for (const word of wordsAt(this.lexicon.words, lower, from)) {
+    yield* this.#groupsAt(start, from, locants, 1, from);
+    for (const word of this.#wordsAt(from)) {
       if (word.value.kind === 'multiplier') {
         const count = word.value.count;
         // `2-dimethylaminoethyl`: the locant is that of the whole group which begins here.
         const outer = locants?.length === 1 && count > 1 && !/^[omp]$/.test(locants[0]!);
         if (locants && locants.length !== count && !outer && !(locants.length === 1 && count === 2)) continue;
-        yield* this.#groupsAt(start, word.end, locants, count);
+        yield* this.#groupsAt(start, word.end, locants, count, from);
         // `di-tert-butyl`, `di-n-propyl`
-        if (lower[word.end] === '-') yield* this.#groupsAt(start, word.end + 1, locants, count);
+        if (lower[word.end] === '-') yield* this.#groupsAt(start, word.end + 1, locants, count, from);
       }
     }
     elidedMultiplier.lastIndex = from;
@@ -167,10 +177,10 @@ export class ItemReader {
     locants: readonly Locant[] | undefined,
     count = locants?.length ?? 1,
   ): Generator<{ item: Item; end: number }> {
-    const place = { ...(locants ? { locants } : {}), count, start };
-    for (const { value, end } of wordsAt(this.lexicon.words, this.name.lower, from)) {
-      if (value.kind === 'replacement')
-        yield { item: { kind: 'replacement', ...place, atomicNumber: value.atomicNumber, end }, end };
+    for (const { value, end } of this.#wordsAt(from)) {
+      if (value.kind !== 'replacement') continue;
+      const { atomicNumber } = value;
+      yield { item: { kind: 'replacement', locants, count, start, atomicNumber, end }, end };
     }
   }
 
@@ -186,12 +196,18 @@ export class ItemReader {
     return found;
   }
 
+  /** Words of the vocabulary at the offset; each place is looked at once. */
+  #wordsAt(offset: number): readonly FoundWord[] {
+    let found = this.#words.get(offset);
+    if (!found) this.#words.set(offset, (found = wordsAt(this.lexicon.words, this.name.lower, offset)));
+    return found;
+  }
+
   /** Ends of words like `disulfanyl` that begin where a multiplier could be read as well. */
-  #radicalEnds(start: number, locants: readonly Locant[] | undefined): ReadonlySet<number> {
-    const from = locants === undefined ? start : (locantsAt(this.name.text, start)?.end ?? start);
+  #radicalEnds(from: number): ReadonlySet<number> {
     const { lower } = this.name;
     // `methylenedioxy`: two of `oxy`.
-    const words = wordsAt(this.lexicon.words, lower, from).filter(
+    const words = this.#wordsAt(from).filter(
       (word) => word.value.kind === 'radical' && word.value.needsLink !== true,
     );
     // `tridecyl` is one group of thirteen carbons, not three of ten.
@@ -204,10 +220,9 @@ export class ItemReader {
     from: number,
     locants: readonly Locant[] | undefined,
     count: number,
+    bodyAt: number,
   ): Generator<{ item: Item; end: number }> {
     const { text, lower } = this.name;
-    const bodyAt = locants === undefined ? start : (locantsAt(text, start)?.end ?? start);
-    const place = { ...(locants ? { locants } : {}), count, start };
     const bracket = text[from];
     if (bracket === '(' || bracket === '[') {
       for (const inner of this.stretchesAt(from + 1)) {
@@ -222,8 +237,9 @@ export class ItemReader {
         yield {
           item: {
             kind: 'group',
-            ...place,
+            locants,
             count: Math.max(count, inner.count),
+            start,
             unit: inner.unit,
             bodyAt,
             role: inner.role,
@@ -235,34 +251,34 @@ export class ItemReader {
         };
       }
     }
-    for (const word of wordsAt(this.lexicon.words, lower, from)) {
-      if (word.value.kind === 'hydro')
-        yield { item: { kind: 'hydro', ...place, end: word.end }, end: word.end };
+    for (const { value, end } of this.#wordsAt(from)) {
+      if (value.kind === 'hydro') yield { item: { kind: 'hydro', locants, count, start, end }, end };
     }
     yield* this.#replacementsAt(start, from, locants, count);
-    const direct = count > 1 ? this.#radicalEnds(start, locants) : undefined;
+    const direct = count > 1 ? this.#radicalEnds(bodyAt) : undefined;
     const plain = count > 1 && lower.startsWith('n-', from) ? from + 2 : from;
     const groups = this.#groupWordsAt(plain).filter(
       (group) => direct?.has(group.end) !== true && (plain === from || group.normal === true),
     );
     const normal = locants?.length === 1 && count === 1 && locants[0] === 'N' && text[start] === 'n';
-    for (const group of groups) {
-      const base = {
-        kind: 'group' as const,
-        count,
-        unit: group.unit,
-        role: group.role,
-        bracketed: false,
-        start,
-        bodyAt,
-        end: group.end,
+    const itemOf = (
+      group: Group,
+      unit: Unit,
+      own: readonly Locant[] | undefined,
+      joins: boolean,
+    ): { item: Item; end: number } => {
+      const { role, end } = group;
+      const bracketed = false;
+      return {
+        item: { kind: 'group', locants: own, count, unit, role, joins, bracketed, start, bodyAt, end },
+        end,
       };
-      if (locants?.length === 1 && count === 1 && group.locantBefore === true) {
-        yield { item: { ...base, unit: attachedAt(group.unit, locants), joins: false }, end: group.end };
-      }
-      if (normal && group.normal === true)
-        yield { item: { ...base, unit: normalChain(group.unit), joins: true }, end: group.end };
-      else yield { item: { ...base, joins: !locants, ...(locants ? { locants } : {}) }, end: group.end };
+    };
+    for (const group of groups) {
+      if (locants?.length === 1 && count === 1 && group.locantBefore === true)
+        yield itemOf(group, attachedAt(group.unit, locants), undefined, false);
+      if (normal && group.normal === true) yield itemOf(group, normalChain(group.unit), undefined, true);
+      else yield itemOf(group, group.unit, locants, !locants);
     }
   }
 }

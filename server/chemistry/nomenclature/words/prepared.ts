@@ -51,8 +51,15 @@ const greek: Readonly<Record<string, string>> = {
   lambda: 'λ',
 };
 
+/** Nothing in such a name has another spelling; most names are so. */
+const plain = /^[\w()[\],.;:'+*-](?:[\w()[\],.;:'+* -]*[\w()[\],.;:'+*-])?$/;
+
 /** Prepares a name; its length may change, `origin` says how. Linear in the length of the text. */
 export function prepareName(original: string): PreparedName {
+  if (plain.test(original) && !original.includes('  ')) {
+    const origin = Array.from({ length: original.length + 1 }, (_, index) => index);
+    return settle({ text: original, lower: original.toLowerCase(), origin });
+  }
   let text = '';
   const origin: number[] = [];
   const put = (characters: string, from: number) => {
