@@ -47,6 +47,8 @@ export interface SuffixEntry {
   readonly locants?: string;
   /** The group ends in an anion whose oxygen (sulfur, nitrogen) takes the groups of an ester. */
   readonly anion?: boolean;
+  /** A form of an anion that only its esters tell apart: `O-ethyl ethanethioate`. */
+  readonly estersOnly?: boolean;
   /** Radical, as `oyl`, `carbonyl`: the group has a free valence on its first atom. */
   readonly radical?: boolean;
 }
@@ -133,6 +135,8 @@ export interface Unit {
   readonly attach?: { readonly atom: number; readonly order: 1 | 2 | 3; readonly count?: number };
   /** Atoms of the skeleton with a free valence each, where the group joins several others. */
   readonly links?: readonly number[];
+  /** A word such as `oxime`, and what kind of compound it is derived from. */
+  readonly derivativeOf?: 'carbonyl' | 'acid';
   /** The unit stands several times round a linking group, or continues one. */
   readonly joint?: Joint;
   /** Atom of the skeleton that takes the substituent of a linking group (`oxy`, `carbonyl`, `amino`). */

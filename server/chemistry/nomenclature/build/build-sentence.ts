@@ -1,25 +1,31 @@
 /** Builds the structure of a whole name from its words. */
+import type { ClassWord } from '../vocabulary/class-words.ts';
 import { adducts, cations, functionWords } from '../vocabulary/functions.ts';
 import type { Part } from '../words/sentence.ts';
-import { buildAnhydride, isAnhydride } from './anhydrides.ts';
+import { buildAnhydride, buildMixedAnhydride, isAnhydride } from './anhydrides.ts';
 import type { Choices } from './choices.ts';
 import type { Draft } from './draft.ts';
 import { buildAcidOrParent } from './esters.ts';
+import { buildAfterParent, isNeutral } from './after-parent.ts';
+import type { LocatedOxide } from './oxides.ts';
 import { buildFunctionalClass, type FunctionWord } from './functional-class.ts';
-import { oximeOf } from './oximes.ts';
 import { buildSalt, type Ion } from './salts.ts';
 import { addSmiles, type Word } from './words.ts';
 
 const oops = 'These words do not make one compound together. Check the number of groups named.';
 
 /** The words of a sentence by what they do. */
-interface Sorted {
+export interface Sorted {
   readonly radicals: Word[];
   readonly parents: Word[];
+  /** Groups named after the parent. */
+  readonly afters: Word[];
   readonly metals: Ion[];
   hydrogens: number;
-  oxides: number;
+  readonly oxides: LocatedOxide[];
   functional: FunctionWord | undefined;
+  classWord: ClassWord | undefined;
+  derivative: Word | undefined;
 }
 
 /** Puts the whole sentence into the draft; false when it makes no compound. */
@@ -28,9 +34,12 @@ export function buildSentence(parts: readonly Part[], draft: Draft, choices: Cho
     radicals: [],
     parents: [],
     metals: [],
+    afters: [],
     hydrogens: 0,
-    oxides: 0,
+    oxides: [],
     functional: undefined,
+    classWord: undefined,
+    derivative: undefined,
   };
   if (parts.every((part) => sort(part, words, parts, draft)) && buildWords(words, draft, choices))
     return true;
@@ -42,14 +51,20 @@ export function buildSentence(parts: readonly Part[], draft: Draft, choices: Cho
 
 /** Puts a word where it belongs; false when it cannot stand there. */
 function sort(part: Part, words: Sorted, parts: readonly Part[], draft: Draft): boolean {
-  if (words.functional && part.kind !== 'adduct') return false;
+  if (words.functional && part.kind !== 'adduct' && !endsEther(words, part)) return false;
+  if ((words.classWord ?? words.derivative) !== undefined && part.kind !== 'adduct') return false;
   switch (part.kind) {
     case 'stretch': {
       const { unit, count, role } = part.stretch;
-      (role === 'radical' ? words.radicals : words.parents).push({ unit, count, site: part.site });
-      // Groups of an ester come before the acid, nothing but adducts after it.
-      return role !== 'radical' || words.parents.length === 0;
+      const word: Word = { unit, count, site: part.site, mono: part.mono };
+      if (role === 'derivative') words.derivative = word;
+      else if (role === 'parent') words.parents.push(word);
+      else (words.parents.length > 0 ? words.afters : words.radicals).push(word);
+      return true;
     }
+    case 'class':
+      words.classWord = part.word;
+      return words.parents.length > 0;
     case 'function':
       words.functional = part;
       return true;
@@ -66,15 +81,15 @@ function sort(part: Part, words: Sorted, parts: readonly Part[], draft: Draft): 
       for (let copy = 0; copy < part.count; copy++) addSmiles(adducts[part.index]![1], draft);
       return true;
     case 'oxide':
-      words.oxides++;
-      return true;
-    case 'oxime': {
-      const parent = words.parents.pop();
-      const changed = parent && oximeOf(parent.unit);
-      if (changed) words.parents.push({ unit: changed, count: 1 });
-      return changed !== undefined;
-    }
+      words.oxides.push(part);
+      return words.parents.length > 0;
   }
+}
+
+/** `ethylene glycol monomethyl ether acetate`: an acid may follow. */
+function endsEther({ functional }: Sorted, part: Part): boolean {
+  if (!functional || part.kind !== 'stretch' || part.stretch.role !== 'parent') return false;
+  return functionWords[functional.index]![0] === 'ether';
 }
 
 function buildWords(words: Sorted, draft: Draft, choices: Choices): boolean {
@@ -82,6 +97,12 @@ function buildWords(words: Sorted, draft: Draft, choices: Choices): boolean {
   const ions = metals.length + hydrogens;
   if (parents.length === 1 && isAnhydride(parents[0]!.unit))
     return radicals.length + ions === 0 && buildAnhydride(parents[0]!, draft, choices);
+  if (parents.length === 2 && parents.every((parent) => isAnhydride(parent.unit)))
+    return radicals.length + ions === 0 && buildMixedAnhydride(parents[0]!, parents[1]!, draft, choices);
+  if (words.classWord !== undefined || words.derivative || words.afters.length > 0)
+    return buildAfterParent(words, draft, choices);
+  if (parents.length > 0 && isNeutral(parents[0]!.unit) && (functional ?? parents[1]) && ions === 0)
+    return radicals.length === 0 && buildAfterParent(words, draft, choices);
   if (!functional) return parents.length > 0 && buildAcidOrParent(words, draft, choices);
   if (parents.length === 0 && metals.length === 0 && radicals.length > 0)
     return hydrogens === 0 && buildFunctionalClass(radicals, functional, draft, choices);

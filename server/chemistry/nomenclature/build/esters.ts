@@ -4,7 +4,7 @@ import type { Site } from '../words/sentence.ts';
 import type { BuiltUnit } from './built-unit.ts';
 import type { Choices } from './choices.ts';
 import type { Draft } from './draft.ts';
-import { oxidise } from './oxides.ts';
+import { oxidise, type LocatedOxide } from './oxides.ts';
 import { addSmiles, buildGroups, buildWord, join, type Valence, type Word } from './words.ts';
 import { balanced, makeCation, type Ion } from './salts.ts';
 
@@ -15,15 +15,17 @@ export interface AcidWords {
   readonly parents: readonly Word[];
   readonly metals: readonly Ion[];
   readonly hydrogens: number;
-  readonly oxides: number;
+  readonly oxides: readonly LocatedOxide[];
 }
 
 /** Puts an ester, a salt or a plain parent into the draft; false when the words do not make one. */
 export function buildAcidOrParent(words: AcidWords, draft: Draft, choices: Choices): boolean {
-  const { radicals, parents, metals, hydrogens, oxides } = words;
+  const { radicals, parents, metals, oxides } = words;
   const groups = buildGroups(radicals, draft, choices);
   if (!groups || parents.length > 2) return false;
   const acid = parents[parents.length - 1]!;
+  if (radicals.length === 0 && acid.unit.endings.some((ending) => ending.suffix.estersOnly === true))
+    return false;
   const acids: BuiltUnit[] = [];
   for (let copy = 0; copy < acid.count; copy++) {
     const built = buildWord(acid.unit, draft, choices, acid.count);
@@ -32,7 +34,10 @@ export function buildAcidOrParent(words: AcidWords, draft: Draft, choices: Choic
   }
   const sites = acids.flatMap((one) => one.sites);
   const valences = groups.flatMap((group) => group.free.map((free) => ({ free, site: group.site })));
-  if (oxides > 0 && !oxidise(acids[0]!, oxides, draft)) return false;
+  if (!oxides.every((oxide) => oxidise(acids[0]!, oxide, draft))) return false;
+  // `monomethyl succinate`: the other places keep their hydrogen.
+  const mono = radicals.some((radical) => radical.mono === true) && metals.length === 0;
+  const hydrogens = mono ? sites.length - valences.length : words.hydrogens;
   if (sites.length === 0)
     return valences.length + hydrogens + metals.length === 0 && parents.length === 1 && acid.count === 1;
   if (valences.length + hydrogens > sites.length) return false;

@@ -1,5 +1,5 @@
 /** Groups with a function word: `ethyl methyl ether`, `benzyl chloride`, `ethylene dichloride` (P-51.3.3). */
-import { functionWords } from '../vocabulary/functions.ts';
+import { doublingWords, functionWords } from '../vocabulary/functions.ts';
 import type { Choices } from './choices.ts';
 import type { Draft } from './draft.ts';
 import { addSmiles, buildGroups, buildWord, join, type Valence, type Word } from './words.ts';
@@ -31,8 +31,9 @@ export function buildFunctionalClass(
     functional.count !== copies
   )
     return false;
+  if (word === 'glycol' && copies !== 2) return false;
   if (copies > 1) return repeated(group, valences, draft);
-  if (word === 'ether' && valences.length === 1 && radicals[0]!.count === 1)
+  if (valences.length === 1 && radicals[0]!.count === 1 && standsTwice(word, radicals[0]!))
     valences.push(...again(radicals[0]!, draft, choices));
   if (valences.length !== sites.length) return false;
   if (built.length === 1 && valences.length === 2 && valences[0]!.atom === valences[1]!.atom) return false;
@@ -53,6 +54,15 @@ function addFunction(group: string, sites: readonly number[], draft: Draft): num
   for (const place of new Set(sites))
     draft.settleCapacity(atoms[place]!, undefined, sites.filter((site) => site === place).length);
   return atoms;
+}
+
+/** `phenyl sulfone`; `benzoyl peroxide`. Not where the group could be two that were written together. */
+function standsTwice(word: string, { unit, mono }: Word): boolean {
+  const acyl = unit.endings.some((ending) => ending.suffix.radical === true);
+  if (mono === true || !(doublingWords.has(word) || (word === 'peroxide' && acyl))) return false;
+  return unit.groupings.every((ways) =>
+    ways.every((way) => way.substitutions.every((one) => one.locants !== undefined)),
+  );
 }
 
 /** `ethyl ether` is diethyl ether in older usage. */

@@ -12,6 +12,8 @@ export interface Word {
   readonly unit: Unit;
   readonly count: number;
   readonly site?: Site | undefined;
+  /** Written with `mono`: other places of the same kind stay free. */
+  readonly mono?: boolean | undefined;
 }
 
 /** A free valence: the atom and the order of the bond to come. */

@@ -40,8 +40,21 @@ export const functionWords: readonly (readonly [
   ['peroxide', 'OO', [0, 1], '[O-][O-]'],
   ['disulfide', 'SS', [0, 1], ''],
   ['diselenide', '[Se][Se]', [0, 1], ''],
+  ['glycol', 'O', [0], ''],
+  ['isonitrile', '[N+]#[C-]', [0], ''],
   ['hydride', '', [], '[H-]'],
 ];
+
+/** Function words whose group, named once, stands twice: `phenyl sulfone` (older usage). */
+export const doublingWords: ReadonlySet<string> = new Set([
+  'ether',
+  'sulfide',
+  'disulfide',
+  'sulfoxide',
+  'sulfone',
+  'selenide',
+  'diselenide',
+]);
 
 /** Anions of mineral and simple carbon acids; atoms with the locant `@` take the groups of esters, or cations. */
 export const anions: readonly (readonly [word: string, smiles: string, locants: string])[] = [
@@ -57,6 +70,25 @@ export const anions: readonly (readonly [word: string, smiles: string, locants: 
   ['carbamat', 'NC(=O)[O-]', 'N - - @'],
   ['carbamodithioat', 'NC(=S)[S-]', 'N - - @'],
   ['dithiocarbamat', 'NC(=S)[S-]', 'N - - @'],
+  ['dicarbonat', '[O-]C(=O)OC(=O)[O-]', '@ - - - - - @'],
+  ['pyrocarbonat', '[O-]C(=O)OC(=O)[O-]', '@ - - - - - @'],
+  ['trithiocarbonat', '[S-]C(=S)[S-]', '@ - - @'],
+  ['carbonotrithioat', '[S-]C(=S)[S-]', '@ - - @'],
+  ['carbamothioat', 'NC(=O)[S-]', 'N - - @'],
+  ['thiocarbamat', 'NC(=O)[S-]', 'N - - @'],
+  ['carbamothioat', 'NC(=S)[O-]', 'N - - @'],
+  ['thiocarbamat', 'NC(=S)[O-]', 'N - - @'],
+  ['orthoformat', '[O-]C([O-])[O-]', '@ - @ @'],
+  ['orthoacetat', '[O-]C(C)([O-])[O-]', '@ - 2 @ @'],
+  ['orthopropionat', '[O-]C(CC)([O-])[O-]', '@ - 2 3 @ @'],
+  ['orthobenzoat', '[O-]C(c1ccccc1)([O-])[O-]', '@ - 1 2 3 4 5 6 @ @'],
+  ['orthocarbonat', '[O-]C([O-])([O-])[O-]', '@ - @ @ @'],
+  ['phosphorochloridat', '[O-]P(=O)(Cl)[O-]', '@ - - - @'],
+  ['chlorophosphat', '[O-]P(=O)(Cl)[O-]', '@ - - - @'],
+  ['phosphorochloridit', '[O-]P(Cl)[O-]', '@ - - @'],
+  ['phosphorochloridothioat', '[O-]P(=S)(Cl)[O-]', '@ - - - @'],
+  ['thioacetat', 'CC(=O)[S-]', '2 - - @'],
+  ['thiobenzoat', 'c1ccccc1C(=O)[S-]', '2 3 4 5 6 1 - - @'],
   ['carbonochloridat', 'ClC(=O)[O-]', '- - - @'],
   ['chloroformat', 'ClC(=O)[O-]', '- - - @'],
   ['cyanoformat', 'N#CC(=O)[O-]', '- - - - @'],

@@ -9,7 +9,7 @@ import { descriptorAt } from '../rings/von-baeyer.ts';
 
 export interface Group {
   readonly unit: Unit;
-  readonly role: 'radical' | 'parent';
+  readonly role: 'radical' | 'parent' | 'derivative';
   readonly end: number;
   /** A stem with which an unbranched alkyl group begins, so that `n-` before it means `normal`. */
   readonly normal?: boolean;
@@ -130,6 +130,15 @@ function groupsOf(
           locantBefore: word.valences === 1,
         },
       ];
+    }
+    case 'derivative': {
+      const unit: Unit = {
+        ...bare(word.skeletons(), start, end),
+        attach: { atom: 0, order: 1 },
+        linkAt: word.linkAt,
+        derivativeOf: word.of,
+      };
+      return [{ unit, role: 'derivative', end }];
     }
     case 'link': {
       const unit: Unit = {
@@ -286,6 +295,8 @@ const otherEndings: readonly (readonly [text: string, suffix: SuffixEntry])[] = 
   ['onitrile', atCarbon('nitrile', '#N')],
   ['aldehyde', atCarbon('al', '=O')],
   ['ohydrazide', atCarbon('hydrazide', '=O NN', { locants: "- N N'" })],
+  ['imidate', atCarbon('imidate', '=N [O-]', { anion: true, locants: 'N -' })],
+  ['aldoxime', atCarbon('oxime', '=NO')],
   ['amidine', atCarbon('imidamide', '=N N', { locants: "N' N" })],
 ];
 

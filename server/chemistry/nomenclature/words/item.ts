@@ -7,7 +7,7 @@ export interface GroupItem {
   readonly count: number;
   /** `bis`, or a bracket follows: the multiplier belongs to a compound substituent. */
   readonly unit: Unit;
-  readonly role: 'radical' | 'parent';
+  readonly role: 'radical' | 'parent' | 'derivative';
   /** Nothing, not even a hyphen, stands between the item before and this one. */
   readonly joins: boolean;
   readonly bracketed: boolean;

@@ -21,7 +21,7 @@ export interface Row {
 export interface Stretch {
   readonly unit: Unit;
   readonly count: number;
-  readonly role: 'radical' | 'parent';
+  readonly role: 'radical' | 'parent' | 'derivative';
   readonly end: number;
 }
 
@@ -97,7 +97,7 @@ export class ItemReader {
         this.furthest = Math.max(this.furthest, head.end);
         boundary.lastIndex = head.end;
         if (boundary.test(this.name.text)) rows.push({ items: [head.item], end: head.end });
-        if (head.item.role === 'parent') continue;
+        if (head.item.role !== 'radical') continue;
       }
       const next = this.name.text[head.end] === '-' ? head.end + 1 : head.end;
       if (next >= this.name.text.length) continue;

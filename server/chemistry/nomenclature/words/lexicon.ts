@@ -1,6 +1,7 @@
 /** All words of the vocabulary in one trie, so that every word that begins at a place is found in a single walk. */
 import { chain, skeletonFromSmiles, type SkeletonGraph } from '../build/skeleton.ts';
 import type { SuffixEntry } from '../tree.ts';
+import { derivativeWords } from '../vocabulary/class-words.ts';
 import { anions } from '../vocabulary/functions.ts';
 import { acids, type AcidLine } from '../vocabulary/acids.ts';
 import { alkaneStem, groupTerm, numericalTerm, numericalTermVariants } from '../vocabulary/numbers.ts';
@@ -29,6 +30,7 @@ export type Word =
       links?: readonly number[];
     }
   | { kind: 'contracted'; skeletons: Lazy; valences: 1 | 2 }
+  | { kind: 'derivative'; skeletons: Lazy; linkAt: number; of: 'carbonyl' | 'acid' }
   | { kind: 'link'; skeletons: Lazy; links: readonly number[]; linkAt?: number }
   | { kind: 'branched'; skeletons: Lazy; oxy: Lazy }
   | { kind: 'ring'; skeletons: Lazy }
@@ -173,6 +175,10 @@ function putLinks(put: (word: string, value: Word) => void): void {
   for (const [name, smiles, locants, atoms, linkAt] of links) {
     const skeletons = lazily(() => [skeletonFromSmiles(smiles, locants)]);
     put(name, { kind: 'link', skeletons, links: atoms, ...(linkAt === undefined ? {} : { linkAt }) });
+  }
+  for (const [name, smiles, locants, linkAt, of] of derivativeWords) {
+    const skeletons = lazily(() => [skeletonFromSmiles(smiles, locants)]);
+    put(name, { kind: 'derivative', skeletons, linkAt, of });
   }
   for (let size = 3; size <= 12; size++)
     put(`${numericalTerm(size)}methylene`, {

@@ -2,6 +2,8 @@
  * A name made ready for reading: one spelling for dashes, primes and spaces, inverted index names turned round, and for
  * every character the place it came from, so that ranges still point into what was typed.
  */
+import type { TextRange } from '../../text.ts';
+
 export interface PreparedName {
   readonly text: string;
   readonly lower: string;
@@ -103,7 +105,9 @@ function settle(name: PreparedName): PreparedName {
     const words = pairs.map(([word, locant]) => `${locant!}-${word!}`).join(',');
     return `(${words})-${pairs.map(([, locant]) => locant!).join(',')}-`;
   });
-  return uninverted(result);
+  result = uninverted(result);
+  // `acetic formic anhydride` (P-65.7.2): the word belongs to both.
+  return replaceAll(result, /^[^ ]{1,60}ic (?=[^ ]{1,60}ic anhydride$)/gi, (word) => `${word}anhydride `);
 }
 
 function replaceAll(
@@ -129,16 +133,49 @@ function replaceAll(
   return { text, lower: text.toLowerCase(), origin };
 }
 
-/** `benzene, 1-bromo-4-chloro-` as index names print it becomes `1-bromo-4-chlorobenzene`. */
+/**
+ * Index names are printed with the parent first: `benzene, 1-bromo-4-chloro-` becomes `1-bromo-4-chlorobenzene`, and
+ * `propanoic acid, 2-methyl-, ethyl ester` becomes `2-methylpropanoic acid ethyl ester`.
+ */
 function uninverted(name: PreparedName): PreparedName {
-  if (!name.text.endsWith('-')) return name;
-  const comma = name.text.lastIndexOf(', ');
-  if (comma <= 0) return name;
-  const end = name.text.length - 1;
-  const pick = (list: string) => list.slice(comma + 2, end) + list.slice(0, comma);
+  const [head, ...rest] = segmentsOf(name.text);
+  if (!head || rest.length === 0 || rest.length > 6) return name;
+  if (!/[a-z]{3}[)\]]?$/i.test(name.text.slice(head.start, head.end))) return name;
+  if (rest.some(({ start, end }) => !/[a-z]{3}|[EZRS]\)-$/i.test(name.text.slice(start, end)))) return name;
+  const isPrefix = ({ end }: TextRange) => name.text[end - 1] === '-';
+  const pieces: TextRange[] = [];
+  for (const { start, end } of rest.filter(isPrefix)) pieces.push({ start, end });
+  const last = pieces.pop();
+  // The hyphen stays before a locant: `2-methyl-2-propenoic acid`.
+  if (last)
+    pieces.push({ start: last.start, end: /[\d(]/.test(name.text[head.start]!) ? last.end : last.end - 1 });
+  pieces.push(head);
+  // A space, as it stands after the comma.
+  for (const one of rest) if (!isPrefix(one)) pieces.push({ start: one.start - 1, end: one.end });
+  const pick = (list: string) => pieces.map(({ start, end }) => list.slice(start, end)).join('');
+  const origin = pieces.flatMap(({ start, end }) => name.origin.slice(start, end));
   return {
     text: pick(name.text),
     lower: pick(name.lower),
-    origin: [...name.origin.slice(comma + 2, end), ...name.origin.slice(0, comma), name.origin[comma]!],
+    origin: [
+      ...origin,
+      pieces[pieces.length - 1] === head ? name.origin[head.end]! : name.origin[name.text.length]!,
+    ],
   };
+}
+
+/** The parts between commas that a space follows, outside brackets. */
+function segmentsOf(text: string): TextRange[] {
+  const found: TextRange[] = [];
+  let depth = 0;
+  let start = 0;
+  for (let at = 0; at <= text.length; at++) {
+    if (text[at] === '(' || text[at] === '[') depth++;
+    else if (text[at] === ')' || text[at] === ']') depth--;
+    else if (at === text.length || (depth === 0 && text.startsWith(', ', at))) {
+      found.push({ start, end: at });
+      start = at + 2;
+    }
+  }
+  return found;
 }

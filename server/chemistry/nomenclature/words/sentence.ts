@@ -1,6 +1,9 @@
 /** A whole name as words: substitutive names alone, or joined by function words, ions and adducts (P-51.3). */
+import type { Locant } from '../tree.ts';
+import { classWords, type ClassWord } from '../vocabulary/class-words.ts';
 import { adducts, cations, functionWords } from '../vocabulary/functions.ts';
 import type { ItemReader, Stretch } from './items.ts';
+import { locantsAt } from './locants.ts';
 import { numericalTerm } from '../vocabulary/numbers.ts';
 
 /** Which place of an acid a group is said to be on: `S-ethyl`, `1-O-butyl` (P-65.6.3.2.2). */
@@ -10,7 +13,13 @@ export interface Site {
 }
 
 export type Part =
-  | { readonly kind: 'stretch'; readonly stretch: Stretch; readonly start: number; readonly site?: Site }
+  | {
+      readonly kind: 'stretch';
+      readonly stretch: Stretch;
+      readonly start: number;
+      readonly site?: Site;
+      readonly mono?: boolean;
+    }
   | {
       readonly kind: 'function';
       readonly index: number;
@@ -33,8 +42,13 @@ export type Part =
       readonly start: number;
       readonly end: number;
     }
-  | { readonly kind: 'oxide'; readonly start: number; readonly end: number }
-  | { readonly kind: 'oxime'; readonly start: number; readonly end: number };
+  | { readonly kind: 'class'; readonly word: ClassWord; readonly start: number; readonly end: number }
+  | {
+      readonly kind: 'oxide';
+      readonly locants: readonly Locant[];
+      readonly start: number;
+      readonly end: number;
+    };
 
 const sentenceCap = 16;
 const siteWord = /(?:(\d+)-)?([OS])(\d*)-/y;
@@ -78,6 +92,7 @@ function* partsAt(reader: ItemReader, offset: number): Generator<Part & { end: n
     reader.furthest = Math.max(reader.furthest, part.end);
     yield part;
   }
+  yield* oxideAt(reader, offset);
   siteWord.lastIndex = offset;
   const word = siteWord.exec(reader.name.text);
   if (word) {
@@ -92,13 +107,27 @@ function* partsAt(reader: ItemReader, offset: number): Generator<Part & { end: n
     }
   }
   for (const stretch of reader.stretchesAt(offset)) {
-    yield { kind: 'stretch', stretch, start: offset, end: stretch.end };
+    const mono = lower.startsWith('mono', offset) ? { mono: true } : {};
+    yield { kind: 'stretch', stretch, start: offset, ...mono, end: stretch.end };
   }
+}
+
+/** `1,1-dioxide`, `N-oxide`. */
+function* oxideAt(reader: ItemReader, offset: number): Generator<Part & { end: number }> {
+  const { text, lower } = reader.name;
+  const locants = locantsAt(text, offset);
+  if (!locants) return;
+  const multiple = locants.value.length === 1 ? '' : numericalTerm(locants.value.length);
+  const end = locants.end + multiple.length + 'oxide'.length;
+  wordEnd.lastIndex = end;
+  if (!lower.startsWith(`${multiple}oxide`, locants.end) || !wordEnd.test(lower)) return;
+  reader.furthest = Math.max(reader.furthest, end);
+  yield { kind: 'oxide', locants: locants.value, start: offset, end };
 }
 
 /** Words that stand by themselves begin so; most words of names do not. */
 const plainStart = new RegExp(
-  `(?:${[...functionWords, ...cations, ...adducts].map(([word]) => word.replace(/[()]/g, '\\$&')).join('|')}|hydrogen|n-oxide|1-oxide|oxime)`,
+  `(?:${[...functionWords, ...cations, ...adducts, ...classWords.map((word) => [word] as const)].map(([word]) => word.replace(/[()]/g, '\\$&')).join('|')}|hydrogen)`,
   'y',
 );
 
@@ -128,9 +157,9 @@ function* plainWords(lower: string, offset: number): Generator<Part & { end: num
     const hydrogen = ends('hydrogen');
     if (hydrogen !== undefined) yield { kind: 'hydrogen', count: count ?? 1, start: offset, end: hydrogen };
     if (multiple !== '') continue;
-    const oxide = ends('n-oxide') ?? ends('1-oxide');
-    if (oxide !== undefined) yield { kind: 'oxide', start: offset, end: oxide };
-    const oxime = ends('oxime');
-    if (oxime !== undefined) yield { kind: 'oxime', start: offset, end: oxime };
+    for (const word of classWords) {
+      const end = ends(word);
+      if (end !== undefined) yield { kind: 'class', word, start: offset, end };
+    }
   }
 }

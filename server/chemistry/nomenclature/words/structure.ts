@@ -12,7 +12,7 @@ import type { PreparedName } from './prepared.ts';
 export interface Structured {
   readonly unit: Unit;
   readonly count: number;
-  readonly role: 'radical' | 'parent';
+  readonly role: 'radical' | 'parent' | 'derivative';
 }
 
 /** The unit that a row means, or undefined when the pieces do not go together. */
@@ -46,12 +46,12 @@ export function structured(row: readonly Item[], name: PreparedName, depth = 0):
     const oneGroup = items.some(belongs);
     const before = items.slice(0, -1).filter((item) => oneGroup || item.kind !== 'stereo');
     const linked = linkedGroupings(before, groups, base, last, nestedAs, oneGroup);
-    if (!linked) {
+    if (!linked && base.derivativeOf === undefined) {
       // `(oxy)` by itself can still join others.
       if (items.length > 1 || !base.links) return undefined;
       return { unit: { ...asLink(base), needsLink: true }, count: last.count, role: last.role };
     }
-    if (linked.length > 0) {
+    if (linked && linked.length > 0) {
       if (last.count > 1 && groups.length > 0) return undefined;
       const unit = { ...base, groupings: [linked], stereo: [...(oneGroup ? [] : stereo), ...base.stereo] };
       return { unit: withRange(unit, items), count: groups.length === 0 ? last.count : 1, role: last.role };

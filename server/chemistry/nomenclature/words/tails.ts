@@ -58,7 +58,7 @@ export function endingsAt(text: string, lower: string, offset: number, lexicon: 
     for (const counted of countedAt(text, lower, from, lexicon)) {
       for (const word of wordsAt(lexicon.suffixes, lower, counted.end)) {
         const ending = endingOf(word.value, counted, word.end);
-        const key = `${word.value.name} ${String(counted.count)} ${String(word.end)}`;
+        const key = `${word.value.name} ${word.value.group} ${String(counted.count)} ${String(word.end)}`;
         if (seen.has(key)) continue;
         seen.add(key);
         found.push({ unsaturations: [], endings: [ending], end: word.end });
