@@ -117,10 +117,26 @@ export interface Joint extends OpenPlace {
   readonly range: TextRange;
 }
 
+/** Carbon atoms replaced by another element (`oxa`, `azonia`; P-15.4), with bonding numbers where `5λ4-thia` says so. */
+export interface Replacement {
+  readonly atomicNumber: number;
+  readonly charge?: number;
+  readonly locants: readonly Locant[];
+  readonly bonding?: readonly (number | undefined)[];
+  readonly range: TextRange;
+}
+
+export interface BondingNumber {
+  readonly locant?: Locant;
+  readonly bonds: number;
+}
+
 export interface Unit {
   /** The skeletons that the parent's name can mean, with what tells them apart in a completed name. */
   readonly skeletons: readonly SkeletonGraph[];
-  readonly replacements: readonly { atomicNumber: number; locants: readonly Locant[]; range: TextRange }[];
+  readonly replacements: readonly Replacement[];
+  /** Bonding numbers written before the parent (`λ5-phosphane`; P-14.1), without locant for its only atom. */
+  readonly bonding?: readonly BondingNumber[];
   readonly unsaturations: readonly Unsaturation[];
   readonly endings: readonly Ending[];
   readonly hydro: readonly { locants?: readonly Locant[]; count: number; at: number; range: TextRange }[];

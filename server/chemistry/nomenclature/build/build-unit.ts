@@ -7,6 +7,7 @@ import { placeEnding } from './endings.ts';
 import { buildJoint } from './joints.ts';
 import { properNumbering } from './numbering.ts';
 import { Places } from './places.ts';
+import { placeBonding, placeReplacement } from './replacements.ts';
 import type { SkeletonGraph } from './skeleton.ts';
 import { placeSubstitution } from './substitutions.ts';
 import { placeUnsaturations } from './unsaturations.ts';
@@ -37,18 +38,9 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
   skeleton.atoms.forEach((atom, index) => {
     if (atom.locants.includes('@')) built.sites.push(atoms[index]!);
   });
-  for (const { atomicNumber, locants, range } of unit.replacements) {
-    for (const locant of locants) {
-      const atom = places.at(locant);
-      if (atom === undefined) return draft.fail(range, noSuchPlace(locant));
-      if (draft.atoms[atom]!.atomicNumber !== 6)
-        return draft.fail(range, `Only a carbon is replaced so (P-15.4.1); position ${locant} is none.`);
-      draft.atoms[atom]!.atomicNumber = atomicNumber;
-      if (atomicNumber !== 7 && atomicNumber !== 5 && atomicNumber !== 15 && atomicNumber !== 14)
-        draft.atoms[atom]!.mancude = false;
-      draft.settleCapacity(atom);
-    }
-  }
+  for (const replacement of unit.replacements)
+    if (!placeReplacement(replacement, places, draft)) return undefined;
+  if (!placeBonding(unit, places, draft)) return undefined;
   if (!saturate(unit, places, draft, choices)) return undefined;
   const endings = [...unit.endings].sort((first, second) => rank(first) - rank(second));
   for (const ending of endings) if (!placeEnding(ending, built, draft, choices)) return undefined;

@@ -132,7 +132,8 @@ export class Draft {
       }
     }
     skeleton.atoms.forEach((atom, index) => {
-      this.settleCapacity(added[index]!, atom.hydrogens);
+      if (atom.bonds !== undefined) this.atoms[added[index]!]!.capacity = atom.bonds;
+      else this.settleCapacity(added[index]!, atom.hydrogens);
     });
     for (const index of skeleton.indicated) this.usualHydrogen.push(added[index]!);
     for (const element of skeleton.stereo) this.stereo.push(moved(element, added));

@@ -109,7 +109,8 @@ function endingAtoms(ending: Ending, built: BuiltUnit, draft: Draft, choices: Ch
       if (position < from || places.locantOf(atom) === undefined) return false;
       const taken = chosen.filter((one) => one === atom).length;
       const element = draft.atoms[atom]!.atomicNumber;
-      if (element !== 6 && element !== 14 && suffix.kind !== 'free') return false;
+      const named = element === 6 || element === 14 || suffix.kind === 'free';
+      if (!named && atoms.length > 1) return false;
       if (atoms.length === 1) return draft.free(atom) >= order * (taken + 1);
       if (suffix.name === 'one' || suffix.name === 'thione') {
         // On a chain end the group would be an aldehyde.

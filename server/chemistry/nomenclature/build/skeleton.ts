@@ -12,6 +12,8 @@ export interface SkeletonAtom {
   readonly mancude: boolean;
   /** Hydrogens that are fixed, for atoms written in brackets. */
   readonly hydrogens?: number;
+  /** Bonding number where the name gives another than the usual (λ convention, P-14.1). */
+  readonly bonds?: number;
 }
 
 export interface SkeletonGraph {

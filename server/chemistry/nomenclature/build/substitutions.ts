@@ -4,6 +4,7 @@ import { noSuchPlace, type BuiltUnit, type UnitBuilder } from './built-unit.ts';
 import type { Choices } from './choices.ts';
 import type { Draft, Owner } from './draft.ts';
 import { fifthBond } from './endings.ts';
+import { admitDouble } from './replacements.ts';
 
 const halogens: ReadonlySet<number> = new Set([9, 17, 35, 53]);
 
@@ -62,6 +63,7 @@ export function placeSubstitution(
       if (free.order === 1) places.chosen.push(host);
       places.fresh = false;
     }
+    if (given && host !== undefined) admitDouble(host, free, draft);
     if (host === undefined || draft.free(host) < free.order) {
       draft.fail(substitution.range, fifthBond(built, host ?? 0));
       return false;

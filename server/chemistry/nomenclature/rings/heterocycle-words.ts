@@ -1,6 +1,7 @@
 /** The parts of Hantzsch–Widman names (P-22.2.2.1, tables 2.4 and 2.5). */
 /** In order of citation. */
 const prefixes: readonly (readonly [name: string, atomicNumber: number])[] = [
+  ['iod', 53],
   ['ox', 8],
   ['thi', 16],
   ['selen', 34],

@@ -1,5 +1,5 @@
 /** The pieces of a row: one substituent, or one prefix that changes the parent. */
-import type { Locant, StereoWord, Unit } from '../tree.ts';
+import type { BondingNumber, Locant, StereoWord, Unit } from '../tree.ts';
 
 export interface GroupItem {
   readonly kind: 'group';
@@ -21,6 +21,7 @@ export type Item =
   | GroupItem
   | { readonly kind: 'stereo'; readonly words: readonly StereoWord[]; readonly start: number }
   | { readonly kind: 'indicated'; readonly locants: readonly Locant[]; readonly start: number }
+  | { readonly kind: 'bonding'; readonly numbers: readonly BondingNumber[]; readonly start: number }
   | {
       readonly kind: 'hydro';
       readonly locants?: readonly Locant[] | undefined;
@@ -33,6 +34,7 @@ export type Item =
       readonly locants?: readonly Locant[] | undefined;
       readonly count: number;
       readonly atomicNumber: number;
+      readonly charge: number;
       readonly start: number;
       readonly end: number;
     };

@@ -7,7 +7,7 @@ import type { Item } from './item.ts';
 import { groupsAt, type Group } from './groups.ts';
 import { chainOfLinks } from './joints.ts';
 import { wordsAt, type Lexicon, type Word } from './lexicon.ts';
-import { addedHydrogenAt, indicatedAt, locantsAt } from './locants.ts';
+import { addedHydrogenAt, bondingAt, indicatedAt, locantsAt } from './locants.ts';
 import type { PreparedName } from './prepared.ts';
 import { stereoAt } from './stereo-words.ts';
 import { structured } from './structure.ts';
@@ -105,8 +105,13 @@ export class ItemReader {
         if (rows.length >= rowCap) break;
         const first = rest.items[0]!;
         if (head.item.kind === 'replacement' && first.kind === 'stereo') continue;
+        if (head.item.kind === 'bonding') {
+          const bonded = withBondingNumbers(first, head.item);
+          if (bonded) rows.push({ items: [bonded, ...rest.items.slice(1)], end: rest.end });
+          continue;
+        }
         const items =
-          first.kind === 'group' && next !== head.end
+          first.kind === 'group' && next !== head.end && first.unit.bonding === undefined
             ? [{ ...first, joins: false }, ...rest.items.slice(1)]
             : rest.items;
         rows.push({ items: [head.item, ...items], end: rest.end });
@@ -126,6 +131,8 @@ export class ItemReader {
       yield { item: { kind: 'indicated', locants: hydrogen.value, start: offset }, end: hydrogen.end };
     const added = addedHydrogenAt(text, offset);
     if (added) yield* this.#withAddedHydrogen(offset, added);
+    const bonding = bondingAt(text, offset);
+    if (bonding) yield { item: { kind: 'bonding', numbers: bonding.value, start: offset }, end: bonding.end };
     const locants = locantsAt(text, offset);
     if (locants) yield* this.#countedAt(offset, locants.end, locants.value);
     yield* this.#countedAt(offset, offset, undefined);
@@ -179,8 +186,8 @@ export class ItemReader {
   ): Generator<{ item: Item; end: number }> {
     for (const { value, end } of this.#wordsAt(from)) {
       if (value.kind !== 'replacement') continue;
-      const { atomicNumber } = value;
-      yield { item: { kind: 'replacement', locants, count, start, atomicNumber, end }, end };
+      const { atomicNumber, charge } = value;
+      yield { item: { kind: 'replacement', locants, count, start, atomicNumber, charge, end }, end };
     }
   }
 
@@ -281,6 +288,14 @@ export class ItemReader {
       else yield itemOf(group, group.unit, locants, !locants);
     }
   }
+}
+
+/** `λ4-sulfanyl`: the number belongs to the very next word, and the hyphen does not part it from what is before. */
+function withBondingNumbers(item: Item, bonding: Extract<Item, { kind: 'bonding' }>): Item | undefined {
+  if (item.kind !== 'group' || item.locants || item.count > 1 || item.bracketed) return undefined;
+  const { numbers, start } = bonding;
+  const unit = { ...item.unit, bonding: numbers, parentAt: start };
+  return { ...item, unit, joins: true, start, bodyAt: start };
 }
 
 /** `n-hexanol`: the group is at the end of the chain, as the older use of `normal` has it (common practice, no source). */

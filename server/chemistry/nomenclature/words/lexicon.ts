@@ -14,6 +14,7 @@ import {
   linkingPrefixes,
   simplePrefixes,
 } from '../vocabulary/prefixes.ts';
+import { replacementPrefixes } from '../vocabulary/replacements.ts';
 import { links, linkingToo, ringLinks } from '../vocabulary/links.ts';
 import { namedRing, ringNames } from '../rings/named-rings.ts';
 import { suffixes } from '../vocabulary/suffixes.ts';
@@ -37,7 +38,7 @@ export type Word =
   | { kind: 'parent'; skeletons: Lazy; extensible: boolean }
   | { kind: 'acid'; line: AcidLine; form: 'acid' | 'other'; skeletons: Lazy }
   | { kind: 'hydro' }
-  | { kind: 'replacement'; atomicNumber: number };
+  | { kind: 'replacement'; atomicNumber: number; charge: number };
 
 /** Skeletons are read from their SMILES when first met. */
 export type Lazy = () => readonly SkeletonGraph[];
@@ -73,16 +74,6 @@ function lazily(make: () => readonly (SkeletonGraph | undefined)[]): Lazy {
   let made: readonly SkeletonGraph[] | undefined;
   return () => (made ??= make().filter((one): one is SkeletonGraph => one !== undefined));
 }
-
-const replacements: readonly (readonly [string, number])[] = [
-  ['oxa', 8],
-  ['thia', 16],
-  ['selena', 34],
-  ['aza', 7],
-  ['phospha', 15],
-  ['sila', 14],
-  ['bora', 5],
-];
 
 export interface Lexicon {
   readonly words: Trie<Word>;
@@ -161,7 +152,8 @@ export function createLexicon(): Lexicon {
     });
   }
   put('hydro', { kind: 'hydro' });
-  for (const [name, atomicNumber] of replacements) add(words, name, { kind: 'replacement', atomicNumber });
+  for (const [name, atomicNumber, charge = 0] of replacementPrefixes)
+    add(words, name, { kind: 'replacement', atomicNumber, charge });
   const endings = emptyTrie<SuffixEntry>();
   for (const suffix of suffixes) {
     add(endings, suffix.name, suffix);

@@ -96,6 +96,7 @@ function settle(name: PreparedName): PreparedName {
     /\.?\b(alpha|beta|gamma|delta|epsilon|omega|lambda)\b\.?(?=[-,')])/gi,
     (word) => greek[word.replace(/\./g, '').toLowerCase()]!,
   );
+  if (/lambda|λ|î»/.test(result.lower)) result = withBondingNumbers(result);
   // `trans-2,cis-6-nonadienal`: the locants are those of the double bonds as well.
   result = replaceAll(result, paired, (match) => {
     const pairs = match
@@ -108,6 +109,20 @@ function settle(name: PreparedName): PreparedName {
   result = uninverted(result);
   // `acetic formic anhydride` (P-65.7.2): the word belongs to both.
   return replaceAll(result, /^[^ ]{1,60}ic (?=[^ ]{1,60}ic anhydride$)/gi, (word) => `${word}anhydride `);
+}
+
+/** `lambda5`, `λ^5`, `1-lambda4`, and the λ of one encoding read in another, as `1λ5`. */
+function withBondingNumbers(name: PreparedName): PreparedName {
+  const spelt = replaceAll(
+    name,
+    /\.?(?:lambda|λ|Î»)\.?(?:\^\(([1-9])\)|\^?([1-9]))/gi,
+    (match) => `λ${/[1-9]/.exec(match)![0]}`,
+  );
+  return replaceAll(
+    spelt,
+    /\d-λ[1-9](?!-(?:phosph|sulf|sel|tell|ars|stib|bism|iod|brom|chlor)an)/g,
+    (match) => match.replace('-', ''),
+  );
 }
 
 function replaceAll(

@@ -1,7 +1,8 @@
 /** Ring names made by rule, one reader for each kind; the only place where they are called from. */
-import type { SkeletonGraph } from '../build/skeleton.ts';
+import type { SkeletonAtom, SkeletonGraph } from '../build/skeleton.ts';
 import { fusionNamesAt } from '../rings/fusion-names.ts';
 import { hantzschWidmanAt } from '../rings/hantzsch-widman.ts';
+import { locantsAt, withBonding } from './locants.ts';
 
 export interface RingName {
   readonly skeletons: readonly SkeletonGraph[];
@@ -20,5 +21,31 @@ const readers: readonly RingNameReader[] = [
 
 /** Ring names by rule that begin at the offset. */
 export function ringNameAt(text: string, lower: string, offset: number): RingName[] {
-  return readers.flatMap((read) => read(text, lower, offset));
+  const locants = locantsAt(text, offset);
+  const bonding = locants?.value.map(withBonding).filter((one) => one.bonds !== undefined) ?? [];
+  if (!locants || bonding.length === 0) return readers.flatMap((read) => read(text, lower, offset));
+  const plain = `${locants.value.map((one) => withBonding(one).locant).join(',')}-`;
+  const [bare, bareLower] = [text, lower].map((one) => plain + one.slice(locants.end));
+  const moved = locants.end - plain.length;
+  return readers.flatMap((read) =>
+    read(bare!, bareLower!, 0)
+      .filter(({ end }) => end > plain.length)
+      .map(({ skeletons, end }) => ({
+        skeletons: skeletons.map((one) => bonded(one, bonding)),
+        end: end + moved,
+      })),
+  );
+}
+
+/** The ring with the bonding numbers of its locants: `1λ6,2,4-benzothiadiazine` (P-22.2.2.1.1). */
+function bonded(
+  skeleton: SkeletonGraph,
+  bonding: readonly { readonly locant: string; readonly bonds?: number }[],
+): SkeletonGraph {
+  const isMancude = skeleton.atoms.some((atom) => atom.mancude);
+  const atoms = skeleton.atoms.map((atom): SkeletonAtom => {
+    const bonds = bonding.find(({ locant }) => atom.locants.includes(locant))?.bonds;
+    return bonds === undefined || atom.atomicNumber === 6 ? atom : { ...atom, bonds, mancude: isMancude };
+  });
+  return { ...skeleton, atoms };
 }

@@ -3,10 +3,11 @@
  * brackets out (`4-phenylmethoxybenzaldehyde`), substituents of one another. Each such stretch keeps all its
  * understandings with a cost; the cheapest that can be built are meant.
  */
-import type { Grouping, Locant, StereoWord, Unit } from '../tree.ts';
+import type { Grouping, Locant, Replacement, StereoWord, Unit } from '../tree.ts';
 import { groupingsOf, isOuter, linkedGroupings, runsOf } from './groupings.ts';
 import type { GroupItem, Item } from './item.ts';
 import { asLink, multiplied, valencesOf, withLinksJoined } from './joints.ts';
+import { withBonding } from './locants.ts';
 import type { PreparedName } from './prepared.ts';
 
 export interface Structured {
@@ -80,7 +81,7 @@ interface Prefixes {
   readonly stereo: StereoWord[];
   readonly indicated: Locant[];
   readonly hydro: Unit['hydro'][number][];
-  readonly replacements: Unit['replacements'][number][];
+  readonly replacements: Replacement[];
   readonly groups: GroupItem[];
 }
 
@@ -100,18 +101,34 @@ function prefixesOf(items: readonly Item[]): Prefixes | undefined {
         break;
       }
       case 'replacement': {
-        const { start, end, atomicNumber, count } = item;
-        const locants = item.locants ?? (count === 1 ? ['1'] : undefined);
-        if (locants?.length !== count) return undefined;
-        found.replacements.push({ atomicNumber, locants, range: { start, end } });
+        const replacement = replacementOf(item);
+        if (!replacement) return undefined;
+        found.replacements.push(replacement);
         break;
       }
+      case 'bonding':
+        return undefined;
       case 'group':
         if (item.role !== 'radical' || !locantsFit(item)) return undefined;
         found.groups.push(item);
     }
   }
   return found;
+}
+
+function replacementOf(item: Extract<Item, { kind: 'replacement' }>): Replacement | undefined {
+  const { start, end, atomicNumber, charge, count } = item;
+  const written = item.locants ?? (count === 1 ? ['1'] : undefined);
+  if (written?.length !== count) return undefined;
+  const places = written.map(withBonding);
+  const bonding = places.map((place) => place.bonds);
+  return {
+    atomicNumber,
+    charge,
+    locants: places.map((place) => place.locant),
+    ...(bonding.some((bonds) => bonds !== undefined) ? { bonding } : {}),
+    range: { start, end },
+  };
 }
 
 /** A locant for each, `o-` for one or two, or one for each free valence of a bridge. */
