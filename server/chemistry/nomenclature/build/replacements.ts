@@ -1,7 +1,7 @@
 /** Skeletal replacement (P-15.4) and bonding numbers (P-14.1) on the atoms of a parent. */
 import type { Replacement, Unit } from '../tree.ts';
 import { noSuchPlace } from './built-unit.ts';
-import type { Draft } from './draft.ts';
+import { ringBondKey, type Draft } from './draft.ts';
 import type { Places } from './places.ts';
 
 const tetravalentInRings: ReadonlySet<number> = new Set([5, 7, 14, 15, 32, 33]);
@@ -55,8 +55,7 @@ function joinRing(atom: number, places: Places, draft: Draft): void {
   const bound = draft.neighbours[atom]!.map((one) => one.atom).filter((one) => places.atoms.includes(one));
   if (bound.length < 2 || !bound.every((one) => draft.atoms[one]!.mancude)) return;
   draft.atoms[atom]!.mancude = true;
-  for (const other of bound)
-    draft.ringBonds.add(`${String(Math.min(atom, other))} ${String(Math.max(atom, other))}`);
+  for (const other of bound) draft.ringBonds.add(ringBondKey(atom, other));
 }
 
 /** Most bonds of sulfur and its kin, and of phosphorus and its. */
