@@ -28,7 +28,7 @@ export function knownReading(
 ): NameReading | undefined {
   const known = knownName(prepared, common);
   if (known) return readingOf(known, text, prepared, limits, readOther);
-  if (depth >= deepest || !/[ /]/.test(prepared.text)) return undefined;
+  if (depth >= deepest || !/[ /®™]/.test(prepared.text)) return undefined;
   return graded(text, prepared, readOther) ?? mixture(prepared.text, readOther);
 }
 

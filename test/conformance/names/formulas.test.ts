@@ -99,6 +99,10 @@ describe('line formulas', () => {
     ['MeNHOMe·HCl', 'CNOC.Cl'],
     ['BF3·OEt2', 'FB(F)F.CCOCC'],
     ['BH3·THF', 'B.C1CCOC1'],
+    ['SO3·pyridine', 'O=S(=O)=O.c1ccncc1'],
+    ['PCl5', 'ClP(Cl)(Cl)(Cl)Cl'],
+    ['tBuONO', 'CC(C)(C)ON=O'],
+    ['Et3N·3HF', 'CCN(CC)CC.F.F.F'],
   ])('%s', (name, smiles) => {
     expect(keysOf(name)).toEqual([keyOf(smiles)]);
   });
@@ -124,6 +128,14 @@ describe('salts, oxides and complexes', () => {
     ['Na2S2O3', '[Na+].[Na+].[O-]S([O-])(=O)=S'],
     ['NaN3', '[Na+].[N-]=[N+]=[N-]'],
     ['KCN', '[K+].[C-]#N'],
+    ['NaHSO3', '[Na+].OS([O-])=O'],
+    ['Zn(CN)2', '[Zn+2].[C-]#N.[C-]#N'],
+    ['Ph3PMeBr', 'C[P+](c1ccccc1)(c1ccccc1)c1ccccc1.[Br-]'],
+    ['Me3OBF4', 'C[O+](C)C.F[B-](F)(F)F'],
+    ['[Ir(cod)OMe]2', '[Ir+].[Ir+].C[O-].C[O-].C1=CCCC=CCC1.C1=CCCC=CCC1'],
+    ['TBAF trihydrate', 'CCCC[N+](CCCC)(CCCC)CCCC.[F-].O.O.O'],
+    ['LiOH monohydrate', '[Li+].[OH-].O'],
+    ['DMAP hydrochloride', 'CN(C)c1ccncc1.Cl'],
     ['KMnO4', '[K+].[O-][Mn](=O)(=O)=O'],
     ['Na2WO4·2H2O', '[Na+].[Na+].[O-][W]([O-])(=O)=O.O.O'],
     ['MgO', 'O=[Mg]'],

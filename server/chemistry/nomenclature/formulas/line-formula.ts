@@ -14,6 +14,7 @@ import {
   withGroups,
   withHydrogens,
   type Sketch,
+  type SketchAtom,
 } from './sketch.ts';
 import { firstGroups, groups, joints, lastGroups, lineMetals } from './symbols.ts';
 
@@ -65,7 +66,7 @@ export function fragments(text: string, steps: Steps): readonly Fragment[] {
 function wholeSmiles(sketch: Sketch): string | undefined {
   const { atoms, waiting } = sketch;
   if (atoms.length > 0) {
-    const whole = waiting.length === 0 && atoms.every((atom) => freeAt(atom) === 0);
+    const whole = waiting.length === 0 && atoms.every((atom) => freeAt(atom) === 0 && !isOddAcid(atom));
     return whole
       ? sketchSmiles(
           sketch,
@@ -82,6 +83,9 @@ function wholeSmiles(sketch: Sketch): string | undefined {
   return first === 'H' ? second : `${bonded(first)}.${bonded(second)}`;
 }
 
+/** Hydrogen of sulfinic and sulfurous acids is written on oxygen. */
+const isOddAcid = ({ symbol, hydrogens, oxo }: SketchAtom) => symbol === 'S' && hydrogens > 0 && oxo > 0;
+
 const halogens: ReadonlySet<string> = new Set(['F', 'Cl', 'Br', 'I', '[2H]']);
 
 /** The group with an open ring bond on its first atom; two of them are one molecule. */
@@ -95,7 +99,8 @@ function fragmentOf(sketch: Sketch): Fragment | undefined {
   if (atoms.length === 0) return waiting.length === 1 ? { smiles: waiting[0]!, anion: undefined } : undefined;
   const open = atoms.flatMap((atom, index) => Array.from({ length: freeAt(atom) }, () => index));
   const [root] = open;
-  if (waiting.length > 0 || open.length !== 1 || root === undefined) return undefined;
+  if (waiting.length > 0 || open.length !== 1 || root === undefined || atoms.some(isOddAcid))
+    return undefined;
   const { symbol } = atoms[root]!;
   const bearsCharge = symbol === 'O' || symbol === 'S' || symbol === 'Se' || symbol === 'N';
   return {
@@ -104,16 +109,21 @@ function fragmentOf(sketch: Sketch): Fragment | undefined {
   };
 }
 
-/** A metal stands in a line formula where carbon or hydrogen is bound to it; its salts are read elsewhere. */
+/**
+ * A metal stands in a line formula where carbon or hydrogen is bound to it; its salts, cyanides among them, are read
+ * elsewhere.
+ */
 function carriesMetalsRightly({ atoms }: Sketch): boolean {
   return atoms.every((atom) => {
     if (atom.group || !lineMetals.has(atom.symbol)) return true;
     const partners = atom.links.map(({ to }) => atoms[to]!);
-    return (
-      partners.some((one) => (one.group ? /^(?:\[C|[Cc](?!l))/.test(one.symbol) : one.symbol === 'C')) ||
-      (atom.hydrogens > 0 && partners.length > 0)
-    );
+    return partners.some((one) => isCarbon(one, atoms)) || (atom.hydrogens > 0 && partners.length > 0);
   });
+}
+
+function isCarbon(atom: SketchAtom, atoms: readonly SketchAtom[]): boolean {
+  if (atom.group) return /^(?:\[C|[Cc](?!l))/.test(atom.symbol) && !atom.symbol.startsWith('[C]#N');
+  return atom.symbol === 'C' && !atom.links.some(({ to, order }) => order === 3 && atoms[to]!.symbol === 'N');
 }
 
 /** Every way in which the text to its end is a line of atoms. */

@@ -3,13 +3,12 @@
  * `MgSO4·7H2O`). Case counts. A formula that leaves the structure open (`C4H10O`) or can be read in two ways is not read.
  */
 import { canonicalForm } from '../../structure/canonical-form.ts';
-import type { Molecule } from '../../structure/molecule.ts';
 import { elementWithSymbol } from '../../composition/elements.ts';
 import { readSmiles } from '../../structure/read-smiles.ts';
 import { elementReagents, wholeFormulas } from '../vocabulary/formula-whole.ts';
 import { formulaParts, plainFormula } from './formula-text.ts';
 import { wholeFormulas as lineFormulas, type Steps } from './line-formula.ts';
-import { saltFormula } from './salt-formula.ts';
+import { ligandSmiles, saltFormula } from './salt-formula.ts';
 
 /** Steps of reading one formula. */
 const stepLimit = 4000;
@@ -20,13 +19,13 @@ const known = new Map<string, string>([
 ]);
 
 /**
- * The structure of a formula, or undefined where the text is none or is not certain. `wordOf` gives the SMILES of a
- * vocabulary word, for parts like the THF of `BH3·THF`.
+ * The SMILES of a formula, or undefined where the text is none or is not certain. `wordOf` gives the SMILES of a vocabulary
+ * word, for parts like the THF of `BH3·THF`.
  */
-export function readFormulaName(
+export function formulaSmiles(
   text: string,
   wordOf: (lower: string) => string | undefined,
-): Molecule | undefined {
+): string | undefined {
   const plain = plainFormula(text);
   const parts = plain === undefined ? undefined : formulaParts(plain);
   if (!parts) return undefined;
@@ -34,11 +33,12 @@ export function readFormulaName(
   const written: string[] = [];
   for (const part of parts) {
     const smiles =
-      partSmiles(part.text, steps) ?? (parts.length > 1 ? wordOf(part.text.toLowerCase()) : undefined);
+      partSmiles(part.text, steps) ??
+      (parts.length > 1 ? (wordOf(part.text.toLowerCase()) ?? ligandSmiles(part.text)) : undefined);
     if (smiles === undefined) return undefined;
     for (let copy = 0; copy < part.times; copy++) written.push(smiles);
   }
-  return readSmiles(written.join('.')).value;
+  return written.join('.');
 }
 
 function partSmiles(text: string, steps: Steps): string | undefined {

@@ -12,6 +12,9 @@ import { SymbolTable } from './symbols.ts';
 const cations = new SymbolTable(formulaCations);
 const anions = new SymbolTable(formulaAnions);
 const ligands = new SymbolTable(formulaLigands);
+/** The SMILES of a ligand by its symbol, as it stands after a dot: `SO3·pyridine`. */
+export const ligandSmiles = (symbol: string): string | undefined => ligands.get(symbol);
+
 const metals = new SymbolTable(Object.keys(metalCharges).map((symbol) => [symbol, symbol]));
 
 /** Anions that a metal with a choice of charges would make ambiguous: `MnO2` is no peroxide, `FeI3` no triiodide. */
@@ -56,6 +59,7 @@ function* memberRows(text: string, at: number, stage: Stage, steps: Steps): Gene
     return;
   }
   const found = [...membersAt(text, at, stage, steps)].sort((first, second) => second.end - first.end);
+  if (stage !== 'front') found.push(...groupAnion(text, at, stage, steps));
   for (const { member, end, next } of found) {
     for (const rest of memberRows(text, end, next, steps)) yield [...member, ...rest];
   }
@@ -85,10 +89,13 @@ function* membersAt(text: string, at: number, stage: Stage, steps: Steps): Gener
   if (stage === 'front') {
     for (const found of counted(text, at, ligands, ligandOf, after)) if (found.end - at > 3) yield found;
   }
-  if (stage === 'cations') {
-    for (const { anion } of fragments(text.slice(at), steps))
-      if (anion !== undefined) yield { member: [ionOf(anion, 1)], end: text.length, next: 'rest' };
-  }
+}
+
+/** The rest of the text as the anion of an alcohol, acid or amide; tried when the tables of ions have nothing. */
+function* groupAnion(text: string, at: number, stage: Stage, steps: Steps): Generator<Found> {
+  if (stage === 'rest' && text[at] !== 'O') return;
+  for (const { anion } of fragments(text.slice(at), steps))
+    if (anion !== undefined) yield { member: [ionOf(anion, 1)], end: text.length, next: 'rest' };
 }
 
 const ionOf = (smiles: string, count: number): Member => ({ kind: 'ion', smiles, count });

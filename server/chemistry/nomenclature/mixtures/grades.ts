@@ -11,6 +11,10 @@ export function withoutGrade(text: string, lower: string): string | undefined {
     if (!lower.startsWith(`${word} `) && !lower.startsWith(`${word}, `)) continue;
     return text.slice(word.length).replace(/^,? /, '');
   }
+  // `(10 mol%)`, `(230–400 mesh)`, a trade mark: how much, how fine, whose.
+  const aside = /(?: \(\d{1,3}(?:\.\d{1,2})? ?mol ?%\)| \(\d{2,3} ?- ?\d{2,3} mesh\)|[®™])$/.exec(text);
+  if (aside) return text.slice(0, aside.index);
+  for (const word of gradeWords) if (lower.endsWith(` (${word})`)) return text.slice(0, -word.length - 3);
   for (const word of endings)
     if (lower.endsWith(` ${word}`)) return text.slice(0, -word.length - 1).replace(/,$/, '');
   return undefined;

@@ -17,16 +17,21 @@ const unit = String.raw`(?:M|N|mM|mol\/L|mol\/l|(?:wt\.? ?|w\/w ?|w\/v ?|v\/v ?|
 const strength = `${number} ?${unit}`;
 const strengthFirst = new RegExp(`^(${strength})(?: solution of)? (.+)$`);
 const strengthLast = new RegExp(
-  String.raw`^(.+?),? \(?(${strength})(?: aq\.?| aqueous)?(?: solution| dispersion| suspension)?(?: in (.+?))?\)?$`,
+  String.raw`^(.+?),? \(?(?:(aq\.?|aqueous),? )?(${strength})(?:,? (aq\.?|aqueous))?(?: solution| dispersion| suspension)?(?: in (.+?))?\)?$`,
 );
 const ratioLast =
   /^(.+?),? \(?(\d{1,3}(?:\.\d{1,2})?(?: ?[:/] ?\d{1,3}(?:\.\d{1,2})?){1,3})(?: v\/v)?\)?(?: v\/v)?$/;
 /** What a text must have in it to be worth a closer look. */
-const hint = /[%/]| in | on | \(?(?:aq|sat|conc|\d)|^(?:aq|sat|conc|dil|half|fum|meth|eth|alc|cold|\d)/i;
+const hint =
+  /[%/]|buffer| in | on | \(?(?:aq|sat|conc|\d)|^(?:aq|sat|conc|dil|half|fum|pH |meth|eth|alc|cold|\d)/i;
 
 /** `petroleum ether (40–60)`, `pet. ether 60-80 °C`: the range says which fraction it is. */
 const boilingRange =
   /^(pet[a-z.]* ether|petrol|ligroin|light petroleum) \(?(\d{2,3} ?- ?\d{2,3})(?: ?°C)?\)?$/i;
+
+/** Solutions that are named by what they do. */
+const buffer =
+  /^(?:[a-z]+ )?(?:buffer|buffer solution)(?: \(?pH \d{1,2}(?:\.\d{1,2})?\)?)?$|^(?:aq\. )?pH \d{1,2}(?:\.\d{1,2})?(?: [a-z]+)? buffer$/i;
 
 /** Every way to take the text apart, the likeliest first. */
 export function* mixtureWords(text: string): Generator<MixtureWords> {
@@ -37,6 +42,7 @@ export function* mixtureWords(text: string): Generator<MixtureWords> {
       message: `Petroleum ether is a mixture of alkanes; this fraction boils at ${fraction[2]!} °C.`,
       components: [fraction[1]!],
     };
+  if (buffer.test(text)) yield { message: 'This is a buffer, a solution of salts in water.', components: [] };
   yield* supported(text);
   yield* mixedSolvents(text);
   yield* solutions(text);
@@ -87,7 +93,14 @@ function* solutions(text: string): Generator<MixtureWords> {
   const first = strengthFirst.exec(text);
   if (first) yield* dissolved(first[2]!, first[1]);
   const last = strengthLast.exec(text);
-  if (last) yield* dissolved(last[3] === undefined ? last[1]! : `${last[1]!} in ${last[3]}`, last[2]);
+  if (last) {
+    const [, solute, before, strengthOf, after, solvent] = last;
+    const inWater = before !== undefined || after !== undefined;
+    yield* dissolved(
+      `${inWater ? 'aq. ' : ''}${solute!}${solvent === undefined ? '' : ` in ${solvent}`}`,
+      strengthOf,
+    );
+  }
   if (!first && !last && / in /.test(text)) yield* dissolved(text.replace(/^solution of /i, ''), undefined);
 }
 
@@ -123,7 +136,12 @@ function* aqueous(text: string): Generator<MixtureWords> {
   const plain = text.replace(/ solution$/i, '');
   const solute = takenOff(plain, aqueousWords) ?? (plain === text ? undefined : onlyAqueous(plain));
   if (solute !== undefined && !/ in /.test(solute)) {
-    const how = plain.toLowerCase().replace(solute.toLowerCase(), '').replace(/[(),]/g, '').trim();
+    const how = plain
+      .toLowerCase()
+      .replace(solute.toLowerCase(), '')
+      .replace(/[(),]/g, '')
+      .replace(/ {2,}/g, ' ')
+      .trim();
     const shown = how === '' ? '' : ` (${how})`;
     yield { message: `This is a solution of ${solute} in water${shown}.`, components: [solute, 'water'] };
   }
@@ -141,8 +159,13 @@ function onlyAqueous(plain: string): string | undefined {
 
 const byLength = (words: readonly string[]) => [...words].sort((a, b) => b.length - a.length);
 
-/** The text without one of the words before or (in brackets or not) behind it. */
+/** The text without the words before and (in brackets or not) behind it; undefined where there is none. */
 function takenOff(text: string, words: readonly string[]): string | undefined {
+  const once = withoutWord(text, words);
+  return once === undefined ? undefined : (withoutWord(once, words) ?? once);
+}
+
+function withoutWord(text: string, words: readonly string[]): string | undefined {
   const lower = text.toLowerCase();
   for (const word of byLength(words)) {
     if (lower.startsWith(`${word} `)) return text.slice(word.length + 1).trim();

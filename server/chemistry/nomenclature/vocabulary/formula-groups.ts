@@ -65,6 +65,7 @@ export const formulaGroups: readonly (readonly [symbols: string, smiles: string]
   ['Bcat', 'B1Oc2ccccc2O1'],
   ['NO2', '[N+](=O)[O-]'],
   ['N3', 'N=[N+]=[N-]'],
+  ['ONO', 'ON=O'],
   ['NCO', 'N=C=O'],
   ['NCS', 'N=C=S'],
   ['PO3H2', 'P(=O)(O)O'],

@@ -269,6 +269,20 @@ export const complexNames: readonly (readonly [names: string, formula: string])[
     '(NH4)2Fe(SO4)2',
   ],
   ['alum|potassium alum', 'KAl(SO4)2·12H2O'],
+  [
+    'bh3-thf|borane-thf|borane-thf complex|borane tetrahydrofuran complex|borane-tetrahydrofuran complex|borane thf complex',
+    'BH3·THF',
+  ],
+  [
+    'bh3-dms|bh3-sme2|borane dimethyl sulfide complex|borane-dimethyl sulfide complex|borane-dimethyl sulfide|borane-methyl sulfide complex',
+    'BH3·SMe2',
+  ],
+  ['bf3-oet2|bf3-et2o|bf3 etherate|bf3 diethyl etherate|boron trifluoride-diethyl ether complex', 'BF3·OEt2'],
+  [
+    'so3-pyridine|so3-py|sulfur trioxide pyridine complex|sulfur trioxide-pyridine complex|pyridine sulfur trioxide complex',
+    'SO3·pyridine',
+  ],
+  ['pyridine-borane|borane pyridine complex', 'BH3·pyridine'],
   ['vanadium pentoxide', 'V2O5'],
   ['rhenium heptoxide|dirhenium heptoxide', 'Re2O7'],
   ['dipotassium phosphate|dibasic potassium phosphate|potassium phosphate dibasic', 'K2HPO4'],

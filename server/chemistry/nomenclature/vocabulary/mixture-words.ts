@@ -39,6 +39,8 @@ export const gradeWords: readonly string[] = [
   ],
   ...[
     'powdered',
+    'cat.',
+    'catalytic',
     'ground',
     'finely ground',
     'freshly ground',

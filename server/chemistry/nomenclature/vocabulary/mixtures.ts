@@ -48,7 +48,7 @@ export const mixtures: readonly (readonly [names: string, what: string, componen
     'carbon monoxide|hydrogen',
   ],
   [
-    "celite|silica|silica gel|sio2 gel|molecular sieves|3 å molecular sieves|4 å molecular sieves|5 å molecular sieves|3a molecular sieves|4a molecular sieves|5a molecular sieves|ms 3å|ms 4å|ms 5å|alumina|neutral alumina|basic alumina|florisil|kieselguhr|diatomaceous earth|montmorillonite k10|montmorillonite|kaolin|sand|sea sand|glass wool|cotton wool|zeolite|fuller's earth",
+    "celite|silica|silica gel|sio2 gel|molecular sieves|4 å ms|3 å ms|5 å ms|4å ms|3å ms|5å ms|ms 4 å|ms 3 å|ms 5 å|4å molecular sieves|3å molecular sieves|5å molecular sieves|molecular sieves (4 å)|molecular sieves (3 å)|molecular sieves (5 å)|molecular sieves, 4 å|molecular sieves, 3 å|molecular sieves 4 å|molecular sieves 3 å|3 å molecular sieves|4 å molecular sieves|5 å molecular sieves|3a molecular sieves|4a molecular sieves|5a molecular sieves|ms 3å|ms 4å|ms 5å|alumina|neutral alumina|basic alumina|florisil|kieselguhr|diatomaceous earth|montmorillonite k10|montmorillonite|kaolin|sand|sea sand|glass wool|cotton wool|zeolite|fuller's earth",
     'This is a solid of no single molecular structure.',
   ],
   [
@@ -57,7 +57,7 @@ export const mixtures: readonly (readonly [names: string, what: string, componen
   ],
   ['amberlyst 15|amberlyst-15|amberlite|dowex|ion exchange resin|nafion', 'This is a resin, a polymer.'],
   [
-    'raney nickel|raney ni|ra-ni|raney-nickel',
+    'raney nickel|raney-ni|raney ni|ra-ni|raney-nickel',
     'Raney nickel is porous nickel with some aluminium.',
     'nickel',
   ],
@@ -81,7 +81,11 @@ export const mixtures: readonly (readonly [names: string, what: string, componen
     'Oleum is sulfur trioxide in sulfuric acid.',
     'sulfur trioxide|sulfuric acid',
   ],
-  ['fuming nitric acid', 'Fuming nitric acid is nitric acid with nitrogen dioxide.', 'nitric acid'],
+  [
+    'fuming nitric acid|fuming hno3',
+    'Fuming nitric acid is nitric acid with nitrogen dioxide.',
+    'nitric acid',
+  ],
   [
     'piranha|piranha solution',
     'Piranha is hydrogen peroxide in sulfuric acid.',
@@ -105,6 +109,7 @@ export const mixtures: readonly (readonly [names: string, what: string, componen
     'Lime water is a saturated solution of calcium hydroxide in water.',
     'calcium hydroxide|water',
   ],
+  ['paraformaldehyde|(ch2o)n', 'Paraformaldehyde is a polymer of formaldehyde.', 'formaldehyde'],
   ['tap water', 'Tap water is water with dissolved salts.', 'water'],
   [
     'pbs|phosphate buffer|phosphate-buffered saline|acetate buffer|tris buffer|buffer',

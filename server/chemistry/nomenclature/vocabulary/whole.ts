@@ -36,6 +36,7 @@ export const wholeNames: readonly (readonly [names: string, smiles: string])[] =
   ['n-iodosuccinimide', 'O=C1CCC(=O)N1I'],
   ['triphenylphosphine', 'c1ccccc1P(c1ccccc1)c1ccccc1'],
   ['lithium aluminium hydride|lithium aluminum hydride', '[Li+].[AlH4-]'],
+  ['acetone cyanohydrin', 'CC(C)(O)C#N'],
   ['acrolein', 'C=CC=O'],
   ['crotonaldehyde', 'C/C=C/C=O'],
   ['mesityl oxide', 'CC(C)=CC(C)=O'],
