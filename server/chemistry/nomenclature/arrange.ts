@@ -75,7 +75,11 @@ export function arrangedReading(
     // Each enantiomer has its own descriptors in place of those of the racemate.
     const replaced = [...draft!.wanted, ...draft!.loose].map(({ word }) => word.whole);
     const one: Complete = (described) => complete(described, described.length > 0 ? replaced : []);
-    return { reading: openReading(one, molecule, [single, mirrorImage(single)], 2, cap, draft), remarks };
+    const open = withStereo(
+      molecule,
+      molecule.stereo.filter(({ kind }) => kind !== 'tetrahedral'),
+    );
+    return { reading: openReading(one, open, [single, mirrorImage(single)], 2, cap, draft), remarks };
   }
   const racemic = said?.racemicWords.map(({ whole }) => whole) ?? [];
   const told: Complete = (described) => complete(described, described.length > 0 ? racemic : []);

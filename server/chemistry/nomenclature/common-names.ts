@@ -2,7 +2,6 @@
 import { readSmiles } from '../structure/read-smiles.ts';
 import type { Molecule } from '../structure/molecule.ts';
 import { abbreviations, casedAbbreviations } from './vocabulary/abbreviations.ts';
-import { aminoAcids } from './vocabulary/amino-acids.ts';
 import { mixtures } from './vocabulary/mixtures.ts';
 import { inorganicNames } from './vocabulary/whole-inorganic.ts';
 import { wholeNames } from './vocabulary/whole.ts';
@@ -40,7 +39,6 @@ export function createCommonNames(): CommonNames {
   for (const [spellings, , structure] of abbreviations) put(spellings, structure);
   for (const [spellings, , structure] of casedAbbreviations)
     for (const spelling of spellings.split('|')) cased.set(spelling, structure);
-  putAminoAcids(put);
   const mixed = new Map<string, Extract<CommonName, { kind: 'mixture' }>>();
   for (const [spellings, message, components] of mixtures) {
     for (const spelling of spellings.split('|'))
@@ -68,15 +66,3 @@ export function createCommonNames(): CommonNames {
 
 /** The spelling that names are looked up in. */
 const plain = (spelling: string) => spelling.replace(/[–−]/g, '-').replace(/′′/g, "''").replace(/′/g, "'");
-
-/** `L-` and `D-` name one enantiomer; without them, and with `DL-`, the name leaves it open. */
-function putAminoAcids(put: (spellings: string, structure: string) => void): void {
-  for (const [name, structure] of aminoAcids) {
-    put(`L-${name}`, structure);
-    put(
-      `D-${name}`,
-      structure.replace(/@+/g, (sign) => (sign === '@' ? '@@' : '@')),
-    );
-    put(`${name}|DL-${name}|(±)-${name}`, structure.replace(/\[C@+H\](\d?)/g, 'C$1'));
-  }
-}

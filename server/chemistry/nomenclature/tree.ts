@@ -147,6 +147,8 @@ export interface Unit {
   readonly range: TextRange;
   /** Where the parent's own word begins. */
   readonly parentAt: number;
+  /** An amino acid, or its acyl group, which the group of another before it acylates (P-103.3). */
+  readonly residue?: boolean;
   /** Free valences of a radical that its vocabulary entry fixed: atom of the skeleton and bond order. */
   readonly attach?: { readonly atom: number; readonly order: 1 | 2 | 3; readonly count?: number };
   /** Atoms of the skeleton with a free valence each, where the group joins several others. */

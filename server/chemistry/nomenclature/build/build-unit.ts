@@ -8,6 +8,7 @@ import { buildJoint } from './joints.ts';
 import { properNumbering } from './numbering.ts';
 import { Places } from './places.ts';
 import { placeBonding, placeReplacement } from './replacements.ts';
+import { inSeries, isSeriesWord } from './series.ts';
 import type { SkeletonGraph } from './skeleton.ts';
 import { placeSubstitution } from './substitutions.ts';
 import { placeUnsaturations } from './unsaturations.ts';
@@ -15,7 +16,7 @@ import { placeUnsaturations } from './unsaturations.ts';
 /** The unit's atoms are added; undefined when the name asks for something that cannot be, which `draft.failure` says. */
 export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit | undefined {
   if (unit.joint) return buildJoint(unit.joint, draft, choices, buildUnit);
-  const skeleton = unit.skeletons[choices.pick(unit.skeletons.length)]!;
+  const skeleton = inSeries(unit.skeletons[choices.pick(unit.skeletons.length)]!, unit.stereo);
   if (unit.skeletons.length > 1 && skeleton.mark !== undefined) {
     draft.insert(unit.parentAt, skeleton.mark);
   }
@@ -70,6 +71,13 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
   if (unsaid.some((atom) => isOverfull(atom, draft))) return undefined;
   if (places.opened && places.given && isMisnumbered(unit, places)) draft.cost += misnumbered;
   for (const word of unit.stereo) {
+    if (isSeriesWord(word)) {
+      if (skeleton.series === true) continue;
+      return draft.fail(
+        word.range,
+        `“${word.letter}” does not say the arrangement of this parent. Give R or S.`,
+      );
+    }
     if (word.locant === undefined) draft.loose.push({ atoms, word });
     else {
       const atom = places.at(word.locant);

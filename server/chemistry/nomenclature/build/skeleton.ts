@@ -24,6 +24,8 @@ export interface SkeletonGraph {
   /** Atoms saturated when the name says nothing else (the usual tautomer, as 1H in indole). */
   readonly indicated: readonly number[];
   readonly stereo: readonly StereoElement[];
+  /** The stereocentres are those of the L form; without `L-` or `D-` before the name they are open. */
+  readonly series?: boolean;
   /** Not what the rules give, but met: meant only where nothing cheaper can be built. */
   readonly cost?: number;
   /** Written in front of the parent's name to tell it from its siblings: `o-`, `m-`, `p-`. */

@@ -2,6 +2,7 @@
  * Acids with retained names and all that is made from them (`acetic acid`, `acetate`, `acetyl`, `acetamide`,
  * `acetonitrile`, `acetaldehyde`). Source: IUPAC Recommendations 2013, P-65.1.1 and P-66.1.1.1, and the 1979
  * recommendations C-404 for those no longer retained. Names of fatty and other natural acids: common practice, no source.
+ * A stereocentre is that of the L form, open without `L-` or `D-` (P-65.1.2.1; L-tartaric acid is (2R,3R)).
  * Each line: stem before `ic acid`, stem before `amide`, `onitrile`, `aldehyde`; skeleton SMILES that contains the acid
  * carbons; locants in that order; the acid carbons as locants.
  */
@@ -53,10 +54,12 @@ export const acids: readonly AcidLine[] = [
   ['male', 'male', 'C/C=C\\C', '1 2 3 4', '1 4'],
   ['fumar', 'fumar', 'C/C=C/C', '1 2 3 4', '1 4'],
   ['itacon', 'itacon', 'CC(=C)CC', '1 2 - 3 4', '1 4'],
-  ['mal', 'mal', 'CC(O)CC', '1 2 - 3 4', '1 4'],
-  ['tartar', 'tartar', 'CC(O)C(O)C', '1 2 - 3 - 4', '1 4'],
+  ['mal', 'mal', 'C[C@@H](O)CC', '1 2 - 3 4', '1 4'],
+  ['tartar', 'tartar', 'C[C@H](O)[C@@H](O)C', '1 2 - 3 - 4', '1 4'],
+  ['tartr', 'tartr', 'C[C@H](O)[C@@H](O)C', '1 2 - 3 - 4', '1 4'],
   ['citr', 'citr', 'CCC(O)(C)CC', '1 2 3 - 6 4 5', '1 5 6'],
-  ['lact', 'lact', 'CC(O)C', '3 2 O 1', '1'],
+  ['lact', 'lact', 'C[C@H](O)C', '3 2 O 1', '1'],
+  ['glycer', 'glycer', 'OC[C@H](O)C', '- 3 2 - 1', '1'],
   ['glycol', 'glycol', 'OCC', 'O 2 1', '1'],
   ['oxaldehyd', '', 'O=CC', '- 2 1', '1'],
   ['glyoxyl', 'glyoxyl', 'O=CC', '- 2 1', '1'],
@@ -66,7 +69,7 @@ export const acids: readonly AcidLine[] = [
   ['benzo', 'benz', 'c1ccccc1C', '2 3 4 5 6 1 C', 'C'],
   ['anthranil', 'anthranil', 'c1cccc(N)c1C', '6 5 4 3 2 N 1 C', 'C'],
   ['salicyl', 'salicyl', 'c1cccc(O)c1C', '6 5 4 3 2 O 1 C', 'C'],
-  ['mandel', 'mandel', 'c1ccccc1C(O)C', '2 3 4 5 6 1 α O C', 'C'],
+  ['mandel', 'mandel', 'c1ccccc1[C@H](O)C', '2 3 4 5 6 1 α O C', 'C'],
   ['cinnam', 'cinnam', 'c1ccccc1/C=C/C', '2 3 4 5 6 1 β α C', 'C'],
   ['hydrocinnam', 'hydrocinnam', 'c1ccccc1CCC', '2 3 4 5 6 1 β α C', 'C'],
   ['o-tolu', 'o-tolu', 'Cc1ccccc1C', '- 2 3 4 5 6 1 C', 'C'],

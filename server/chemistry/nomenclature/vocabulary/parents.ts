@@ -163,7 +163,6 @@ export const parents: readonly ParentLine[] = [
   ['sulfuric acid', 'OS(=O)(=O)O', ''],
   ['boric acid', 'OB(O)O', ''],
   ['pinacol', 'CC(C)(O)C(C)(C)O', ''],
-  ['glycin', 'NCC(=O)O', 'N 2 1 - O'],
   ['hydantoin', 'O=C1NCC(=O)N1', '- 2 3 5 4 - 1'],
   ['succinimid', 'O=C1CCC(=O)N1', '- 2 3 4 5 - 1/N'],
   ['maleimid', 'O=C1C=CC(=O)N1', '- 2 3 4 5 - 1/N'],

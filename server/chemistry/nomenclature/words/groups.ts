@@ -2,7 +2,7 @@
 import { chain, ring, type SkeletonGraph } from '../build/skeleton.ts';
 import type { Ending, SuffixEntry, Unit } from '../tree.ts';
 import { acylWithYl } from '../vocabulary/acids.ts';
-import { alkoxySkeleton, wordsAt, type Lexicon, type Word } from './lexicon.ts';
+import { alkoxySkeleton, wordsAt, type AminoAcidSuffix, type Lexicon, type Word } from './lexicon.ts';
 import { ringNameAt } from './ring-names.ts';
 import { chainTailsAt, endingsAt, type Tail } from './tails.ts';
 import { descriptorAt } from '../rings/von-baeyer.ts';
@@ -159,6 +159,8 @@ function groupsOf(
       return ringForms(word.skeletons, text, lower, start, end, lexicon);
     case 'acid':
       return acidForms(word, lower, start, end);
+    case 'amino acid':
+      return [aminoAcidForm(word, start, end)];
     default:
       return [];
   }
@@ -324,4 +326,21 @@ function acidForms(
     found.push({ unit: { ...bare(word.skeletons(), start, last), endings: [one] }, role, end: last });
   }
   return found;
+}
+
+const aminoAcidSuffixes: Readonly<Record<AminoAcidSuffix, SuffixEntry>> = {
+  acid: atCarbon('oic acid', '=O O', { locants: '- -' }),
+  anion: atCarbon('oate', '=O [O-]', { anion: true }),
+  amide: atCarbon('amide', '=O N'),
+  alcohol: atCarbon('ol', 'O'),
+  aldehyde: atCarbon('al', '=O'),
+  acyl: atCarbon('oyl', '=O', { radical: true }),
+};
+
+function aminoAcidForm(word: Extract<Word, { kind: 'amino acid' }>, start: number, end: number): Group {
+  const locants = word.line[4].split(' ');
+  const suffix = aminoAcidSuffixes[word.suffix];
+  const ending: Ending = { suffix, count: locants.length, locants, at: end, range: { start, end } };
+  const unit = { ...bare(word.skeletons(), start, end), endings: [ending], residue: true };
+  return { unit, role: word.suffix === 'acyl' ? 'radical' : 'parent', end };
 }

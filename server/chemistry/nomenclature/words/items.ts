@@ -195,9 +195,12 @@ export class ItemReader {
   #groupWordsAt(offset: number): readonly Group[] {
     let found = this.#groupWords.get(offset);
     if (!found) {
-      found = groupsAt(this.name.text, this.name.lower, offset, this.lexicon).sort(
-        (first, second) => second.end - first.end,
-      );
+      const all = groupsAt(this.name.text, this.name.lower, offset, this.lexicon);
+      // `phenylalanine` is no alanine with a phenyl group.
+      const residue = Math.max(-1, ...all.filter(({ unit }) => unit.residue).map(({ end }) => end));
+      found = all
+        .filter(({ unit, end }) => unit.residue === true || end > residue)
+        .sort((first, second) => second.end - first.end);
       this.#groupWords.set(offset, found);
     }
     return found;

@@ -4,6 +4,7 @@ import type { SuffixEntry } from '../tree.ts';
 import { derivativeWords } from '../vocabulary/class-words.ts';
 import { anions } from '../vocabulary/functions.ts';
 import { acids, type AcidLine } from '../vocabulary/acids.ts';
+import { aminoAcids, type AminoAcidLine } from '../vocabulary/amino-acids.ts';
 import { alkaneStem, groupTerm, numericalTerm, numericalTermVariants } from '../vocabulary/numbers.ts';
 import { extensibleParents, otherNumberings, parents } from '../vocabulary/parents.ts';
 import { partlySaturatedRings, ringsWithGroups } from '../vocabulary/partly-saturated-rings.ts';
@@ -37,8 +38,17 @@ export type Word =
   | { kind: 'ring'; skeletons: Lazy }
   | { kind: 'parent'; skeletons: Lazy; extensible: boolean }
   | { kind: 'acid'; line: AcidLine; form: 'acid' | 'other'; skeletons: Lazy }
+  | { kind: 'amino acid'; line: AminoAcidLine; suffix: AminoAcidSuffix; skeletons: Lazy }
   | { kind: 'hydro' }
   | { kind: 'replacement'; atomicNumber: number; charge: number };
+
+export type AminoAcidSuffix = 'acid' | 'anion' | 'amide' | 'alcohol' | 'aldehyde' | 'acyl';
+const aminoAcidEndings: readonly (readonly [string, AminoAcidSuffix])[] = [
+  ['ate', 'anion'],
+  ['amide', 'amide'],
+  ['ol', 'alcohol'],
+  ['al', 'aldehyde'],
+];
 
 /** Skeletons are read from their SMILES when first met. */
 export type Lazy = () => readonly SkeletonGraph[];
@@ -138,9 +148,10 @@ export function createLexicon(): Lexicon {
       oxy: lazily(() => [skeletonFromSmiles(`O${smiles}`)]),
     });
   }
+  putAminoAcids(put);
   putParents(put);
   for (const line of acids) {
-    const skeletons = lazily(() => [skeletonFromSmiles(line[2], line[3])]);
+    const skeletons = lazily(() => [withSeries(skeletonFromSmiles(line[2], line[3]))]);
     put(line[0], { kind: 'acid', line, form: 'acid', skeletons });
     if (line[1] !== '') put(line[1], { kind: 'acid', line, form: 'other', skeletons });
   }
@@ -178,6 +189,26 @@ function putLinks(put: (word: string, value: Word) => void): void {
       skeletons: lazily(() => [chain(size)]),
       links: [0, size - 1],
     });
+}
+
+/** Acids with stereocentres have D and L forms. */
+function withSeries(skeleton: SkeletonGraph | undefined): SkeletonGraph | undefined {
+  const centred = skeleton?.stereo.some((element) => element.kind === 'tetrahedral');
+  return skeleton && centred ? { ...skeleton, series: true } : skeleton;
+}
+
+/** `alanine`, `alaninate`, `alaninamide`, `alaninol`, `alaninal`, `alanyl`; `aspartic acid`, `aspartate` (P-103.2). */
+function putAminoAcids(put: (word: string, value: Word) => void): void {
+  for (const line of aminoAcids) {
+    const [name, acyl, smiles, locants] = line;
+    const skeletons = lazily(() => [withSeries(skeletonFromSmiles(smiles, locants))]);
+    const stem = name.replace(/(?:ic acid|e)$/, '');
+    put(name, { kind: 'amino acid', line, suffix: 'acid', skeletons });
+    for (const [ending, suffix] of aminoAcidEndings)
+      if (!name.endsWith('acid') || suffix === 'anion')
+        put(stem + ending, { kind: 'amino acid', line, suffix, skeletons });
+    if (acyl !== '') put(acyl, { kind: 'amino acid', line, suffix: 'acyl', skeletons });
+  }
 }
 
 /** A word as people write it: `methyl` and `methane` for the stem, `toluene` with its final e. */

@@ -3,7 +3,7 @@ import type { BondingNumber, Locant } from '../tree.ts';
 
 /** `2(10)`: a bond between two places that do not follow each other (P-31.1.4.2.4). */
 const compound = "(?:\\(\\d+[a-gi-z]?'*\\))?";
-const one = `(?:\\d+(?:[a-z](?![a-z]))?'*${compound}(?:-N'*(?![a-z])|λ[1-9])?|[NnOSPC]\\d*'*|[αβγδεω]'*|[omp])`;
+const one = `(?:\\d+(?:[a-z](?![a-z]))?'*${compound}(?:-N'*(?![a-z])|λ[1-9])?|[NnOSPC](?:\\d+|[α-ω])?'*|[αβγδεω]'*|[omp])`;
 const list = new RegExp(`(${one}(?:, ?${one})*)-`, 'y');
 const indicated = /\(?((?:\d+[a-z]?'*[Hh](?![a-z]))(?:,\d+[a-z]?'*[Hh](?![a-z]))*)\)?-?/y;
 

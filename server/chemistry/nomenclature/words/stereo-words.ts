@@ -12,7 +12,7 @@ const part = `(?:(?:\\d+[a-z]?'*-?|[NSP](?=[RSEZ]))?${letters})`;
 const bracketed = new RegExp(`\\((?:(all)-)?(${part}(?:[,;] ?${part})*)\\)-?`, 'y');
 const single = new RegExp(`^(\\d+[a-z]?'*|[NSP](?=[RSEZ]))?-?(${letters})$`);
 const word =
-  /(?:(all)-)?(cis|trans|exo|endo|rac|rel|meso|[EZ]|dl|DL|D|L)((?:,(?:cis|trans|E|Z))*)-|\(((?:\+|-|±|\+\/-|\+-|cis|trans|exo|endo|meso|dl|DL|d|l|rac|rel))\)-/y;
+  /(?:(all)-)?(cis|trans|exo|endo|rac|rel|meso|[EZ]|dl|DL|[DLdl])((?:,(?:cis|trans|E|Z))*)-|\(((?:\+|-|±|\+\/-|\+-|cis|trans|exo|endo|meso|dl|DL|d|l|rac|rel))\)-/y;
 
 /** Descriptors at the offset. The sign of rotation says nothing of structure. */
 export function stereoAt(text: string, offset: number): Written<StereoWord[]> | undefined {
@@ -62,9 +62,11 @@ function asWord(text: string, offset: number): Written<StereoWord[]> | undefined
   const whole = { start: offset, end };
   const range = { start: offset, end: end - 1 };
   const letter = match[2] ?? match[4]!;
-  if (/^(?:\+|-|d|l)$/.test(letter)) return { value: [], end };
+  if (match[4] !== undefined && /^(?:\+|-|d|l)$/.test(letter)) return { value: [], end };
   if (/^(?:±|\+\/-|\+-|dl)$/i.test(letter)) return { value: [{ letter: 'rac', range, whole }], end };
   const all = match[1] === undefined ? {} : { all: true };
   const more = match[3] === undefined || match[3] === '' ? [] : match[3].slice(1).split(',');
-  return { value: [letter, ...more].map((one) => ({ letter: one as Letter, range, whole, ...all })), end };
+  // `l-alanine` in a name without capitals is L-alanine.
+  const first = /^[dl]$/.test(letter) ? letter.toUpperCase() : letter;
+  return { value: [first, ...more].map((one) => ({ letter: one as Letter, range, whole, ...all })), end };
 }

@@ -9,6 +9,7 @@ import type { GroupItem, Item } from './item.ts';
 import { asLink, multiplied, valencesOf, withLinksJoined } from './joints.ts';
 import { withBonding } from './locants.ts';
 import type { PreparedName } from './prepared.ts';
+import { residuesJoined } from './residues.ts';
 
 export interface Structured {
   readonly unit: Unit;
@@ -18,13 +19,14 @@ export interface Structured {
 
 /** The unit that a row means, or undefined when the pieces do not go together. */
 export function structured(row: readonly Item[], name: PreparedName, depth = 0): Structured | undefined {
-  const items = withLinksJoined(row);
-  const last = items[items.length - 1];
-  if (last?.kind !== 'group' || depth > 60) return undefined;
+  if (depth > 60) return undefined;
   const nestedAs = (inner: readonly Item[]): Unit | undefined => {
     const made = structured(inner, name, depth + 1);
     return made?.count === 1 && made.role === 'radical' ? made.unit : undefined;
   };
+  const items = residuesJoined(withLinksJoined(row), nestedAs);
+  const last = items?.[items.length - 1];
+  if (!items || last?.kind !== 'group') return undefined;
   if (last.count > 1) {
     const around = roundLink(items, last, name, nestedAs);
     if (around) return { unit: withRange(around, items), count: 1, role: last.role };
