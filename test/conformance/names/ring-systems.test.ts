@@ -76,3 +76,95 @@ describe('spiro systems of single rings', () => {
     ],
   ]);
 });
+
+describe('spiro systems of named rings', () => {
+  meansExactly([
+    ['P-24.5.2', "spiro[cyclohexane-1,2'-[1,3]dioxolane]", 'C1CCC2(CC1)OCCO2'],
+    ['P-24.5.2', "spiro[bicyclo[2.2.1]heptane-2,2'-oxirane]", 'C1CC2CC1CC23CO3'],
+    ['P-24.5.2', "3H-spiro[2-benzofuran-1,4'-piperidin]-3-one", 'O=C1OC2(CCNCC2)c2ccccc12'],
+    ['P-24.5.2', "spiro[indole-3,4'-piperidin]-2(1H)-one", 'O=C1Nc2ccccc2C13CCNCC3'],
+    ['P-24.5.2', "spiro[3H-indole-3,4'-piperidine]", 'C1=Nc2ccccc2C13CCNCC3'],
+    ['P-24.5.2', "spiro[cyclopropane-1,3'-[3H]indole]", 'C1=Nc2ccccc2C13CC3'],
+    ['P-24.5.2', "1'H-spiro[cyclopentane-1,2'-quinazolin]-4'(3'H)-one", 'O=C1NC2(CCCC2)Nc2ccccc12'],
+    [
+      'P-24.5.2',
+      "2'-methylspiro[1-benzofuran-2,4'-cyclohex-2-ene]-1',3-dione",
+      'CC1=CC2(CCC1=O)Oc1ccccc1C2=O',
+    ],
+    [
+      'P-24.5.2',
+      "8-methylspiro[1,3-dihydroquinazoline-2,4'-piperidine]-4-one",
+      'Cc1cccc2C(=O)NC3(CCNCC3)Nc12',
+    ],
+    ['P-24.5.2', "spiro[8-oxatricyclo[7.2.1.02,7]dodec-5-ene-12,2'-oxirane]", 'C12C3CCC=CC3OC(CC1)C24CO4'],
+    ['P-24.5.2', "spiro[fluorene-9,9'-xanthene]", 'c1ccc2c(c1)Oc1ccccc1C21c2ccccc2-c2ccccc12'],
+    ['P-24.5.2', "spiro[4-azabicyclo[2.2.2]octane-2,5'-oxazolidin]-2'-one", 'O=C1NCC2(CN3CCC2CC3)O1'],
+    [
+      'P-24.6',
+      "dispiro[fluorene-9,1'-cyclohexane-4',1''-indene]",
+      'C1=CC2(CCC3(CC2)c2ccccc2-c2ccccc23)c2ccccc12',
+    ],
+    ['P-24.3', "1,1'-spirobi[indene]", 'C1=CC2(C=Cc3ccccc23)c2ccccc12'],
+    ['P-24.3', "2,2',3,3'-tetrahydro-1,1'-spirobi[indene]", 'C1CC2(CCc3ccccc23)c2ccccc12'],
+    ['P-24.3', "1,1'-spirobiindane-7,7'-diol", 'Oc1cccc2CCC3(CCc4cccc(O)c34)c12'],
+    ['P-24.3', "9,9'-spirobi[9H-fluorene]", 'c1ccc2c(c1)-c1ccccc1C21c2ccccc2-c2ccccc12'],
+  ]);
+  test.each([
+    ['a place that the ring lacks', "spiro[cyclohexane-1,9'-indene]"],
+    ['different atoms in one place', "spiro[cyclohexane-1,1'-piperidine]"],
+    ['a bracket left open', "spiro[cyclohexane-1,1'-indene"],
+  ])('%s: %s', (_, name) => {
+    expect(readName(name).kind).toBe('unknown');
+  });
+});
+
+describe('ring assemblies', () => {
+  meansExactly([
+    ['P-28.2.1', "1,1'-biphenyl", 'c1ccc(cc1)-c1ccccc1'],
+    ['P-28.2.1', "[1,1'-biphenyl]-4-ol", 'Oc1ccc(cc1)-c1ccccc1'],
+    ['P-28.2.1', "(1,1'-biphenyl)-4-ol", 'Oc1ccc(cc1)-c1ccccc1'],
+    ['P-28.2.1', "4'-methyl-[1,1'-biphenyl]-4-carboxylic acid", 'Cc1ccc(cc1)-c1ccc(cc1)C(=O)O'],
+    ['P-28.2.1', "N-([1,1'-biphenyl]-4-yl)acetamide", 'CC(=O)Nc1ccc(cc1)-c1ccccc1'],
+    ['P-28.2.1', 'biphenyl-4-yl acetate', 'CC(=O)Oc1ccc(cc1)-c1ccccc1'],
+    ['P-28.2.1', "2,2'-bipyridine", 'c1ccnc(c1)-c1ccccn1'],
+    ['P-28.2.1', "4,4'-dimethyl-2,2'-bipyridine", 'Cc1ccnc(c1)-c1cc(C)ccn1'],
+    ['P-28.2.1', "4,4'-bipiperidine", 'C1CNCCC1C1CCNCC1'],
+    ['P-28.2.1', "1,4'-bipiperidine", 'C1CCN(CC1)C1CCNCC1'],
+    ['P-28.2.1', "1,1'-bi(cyclohexane)", 'C1CCC(CC1)C1CCCCC1'],
+    ['P-28.2.1', "1,1'-bi(cyclohexyl)", 'C1CCC(CC1)C1CCCCC1'],
+    ['P-28.2.1', "[1,1'-bicyclohexyl]-2-one", 'O=C1CCCCC1C1CCCCC1'],
+    ['P-28.2.1', "1,1'-binaphthalene-2,2'-diol", 'Oc1ccc2ccccc2c1-c1c(O)ccc2ccccc12'],
+    ['P-28.2.1', "2,2'-bi-1H-imidazole", 'c1c[nH]c(n1)-c1ncc[nH]1'],
+    ['P-28.2.1', "9,9'-bifluorenylidene", 'c1ccc2c(c1)-c1ccccc1C2=C1c2ccccc2-c2ccccc21'],
+    ['1979 rules A-52', "2,2'-bipyridyl", 'c1ccnc(c1)-c1ccccn1'],
+    ['1979 rules A-52', "2,2'-binaphthyl", 'c1ccc2cc(ccc2c1)-c1ccc2ccccc2c1'],
+    ['common practice, no source', "[1,1']biphenyl-4-ol", 'Oc1ccc(cc1)-c1ccccc1'],
+    ['common practice, no source', 'bicyclohexyl', 'C1CCC(CC1)C1CCCCC1'],
+    ['P-28.3.1', "1,1':4',1''-terphenyl", 'c1ccc(cc1)-c1ccc(cc1)-c1ccccc1'],
+    ['P-28.3.1', "[1,1':3',1''-terphenyl]-5'-carboxylic acid", 'OC(=O)c1cc(cc(c1)-c1ccccc1)-c1ccccc1'],
+    ['P-28.3.1', "2,2':6',2''-terpyridine", 'c1ccnc(c1)-c1cccc(n1)-c1ccccn1'],
+    ['P-28.3.1', "4'-chloro-2,2':6',2''-terpyridine", 'Clc1cc(nc(c1)-c1ccccn1)-c1ccccn1'],
+    ['P-28.3.1', "1,1':4',1'':4'',1'''-quaterphenyl", 'c1ccc(cc1)-c1ccc(cc1)-c1ccc(cc1)-c1ccccc1'],
+    ['1979 rules A-54', 'o-terphenyl', 'c1ccc(cc1)-c1ccccc1-c1ccccc1'],
+    ['1979 rules A-54', 'm-terphenyl', 'c1ccc(cc1)-c1cccc(c1)-c1ccccc1'],
+    ['1979 rules A-54', 'p-quaterphenyl', 'c1ccc(cc1)-c1ccc(cc1)-c1ccc(cc1)-c1ccccc1'],
+    // Two rings with three kinds of places each: 3 + 2 + 1 pairs; thiophene has two kinds: 2 + 1.
+    [
+      'P-28.2.1',
+      'bipyridine',
+      'c1ccnc(c1)-c1ccccn1',
+      'c1ccnc(c1)-c1cccnc1',
+      'c1ccnc(c1)-c1ccncc1',
+      'c1cncc(c1)-c1cccnc1',
+      'c1cncc(c1)-c1ccncc1',
+      'c1cc(ccn1)-c1ccncc1',
+    ],
+    ['P-28.2.1', 'bithiophene', 'c1csc(c1)-c1cccs1', 'c1csc(c1)-c1ccsc1', 'c1cscc1-c1ccsc1'],
+  ]);
+  test.each(["1,1'-terphenyl", "1,1':4',1''-biphenyl", "2,7'-bipyridine", 'biphenol'])(
+    '%s is not read',
+    (name) => {
+      expect(readName(name).kind).toBe('unknown');
+    },
+  );
+});

@@ -4,6 +4,7 @@ import { noSuchPlace } from './built-unit.ts';
 import type { Choices } from './choices.ts';
 import type { Draft } from './draft.ts';
 import type { Places } from './places.ts';
+import { atomAt, bondAt } from './skeleton-places.ts';
 
 export function placeUnsaturations(unit: Unit, places: Places, draft: Draft, choices: Choices): boolean {
   for (const { order, count, locants, at, range } of unit.unsaturations) {
@@ -54,27 +55,13 @@ export function placeUnsaturations(unit: Unit, places: Places, draft: Draft, cho
   return true;
 }
 
-/** The bond that a locant means: to the next place, or with `4(9)` to the one in brackets. */
-function endsOf(places: Places, locant: Locant): { from?: number | undefined; to?: number | undefined } {
-  const compound = /^([^(]+)\(([^)]+)\)$/.exec(locant);
-  if (compound) return { from: places.at(compound[1]!), to: places.at(compound[2]!) };
-  const from = places.at(locant);
-  return { from, to: from === undefined ? undefined : next(places, locant) };
-}
-
-/** The atom that follows in the numbering and is bound to this one; from the last of a ring back to 1. */
-function next(places: Places, locant: Locant): number | undefined {
-  const index = places.atoms.indexOf(places.at(locant)!);
-  const bound = (other: number) =>
-    places.skeleton.bonds.some(
-      (bond) => (bond.from === index && bond.to === other) || (bond.to === index && bond.from === other),
-    );
-  const following = places.at(String(Number.parseInt(locant, 10) + 1));
-  const other = following === undefined ? -1 : places.atoms.indexOf(following);
-  if (other >= 0 && bound(other)) return following;
-  return places.skeleton.kind === 'ring' && index === places.atoms.length - 1 && bound(0)
-    ? places.atoms[0]
-    : undefined;
+/** The atoms of the bond that a locant means, its own first. */
+function endsOf(places: Places, locant: Locant): { from?: number; to?: number } {
+  const index = bondAt(places.skeleton, locant);
+  if (index === undefined) return {};
+  const { from, to } = places.skeleton.bonds[index]!;
+  const own = atomAt(places.skeleton, locant.replace(/\(.*/, ''));
+  return { from: places.atoms[own]!, to: places.atoms[own === from ? to : from]! };
 }
 
 function raise(draft: Draft, from: number, to: number, order: number): boolean {
@@ -93,7 +80,7 @@ function bondsOf(
   const found: { from: number; to: number; position: number }[] = [];
   places.atoms.forEach((from, position) => {
     const locant = places.locantOf(from);
-    const to = locant === undefined ? undefined : next(places, locant);
+    const to = locant === undefined ? undefined : endsOf(places, locant).to;
     if (to === undefined || draft.free(from) < order - 1 || draft.free(to) < order - 1) return;
     const bond = draft.neighbours[from]!.find((one) => one.atom === to)!.bond;
     if (draft.bonds[bond]!.order === 1) found.push({ from, to, position });

@@ -8,7 +8,7 @@ import { eachHeteroatom, inOrder, stemsAt } from './heterocycle-words.ts';
 import { chalcogens, usualHydrogen } from './mancude.ts';
 import { namedRing } from './named-rings.ts';
 
-const locantList = /(\d+(?:,\d+)*)-/y;
+const locantList = /(?:(\d+(?:,\d+)*)-|\[(\d+(?:,\d+)*)\])/y;
 /** Names of table 2.2 and groups (`thiol`) stand in the place of these; `dioxin` without locants is a family. */
 const notMeant = /^(?:(?:az|ox|thi|selen|tellur)ol|azin|(?:di|tri)(?:ox|thi|selen)ol|dioxin)$/;
 
@@ -16,7 +16,7 @@ const notMeant = /^(?:(?:az|ox|thi|selen|tellur)ol|azin|(?:di|tri)(?:ox|thi|sele
 export function hantzschWidmanAt(text: string, lower: string, offset: number): HeterocycleName[] {
   locantList.lastIndex = offset;
   const match = locantList.exec(text);
-  const locants = match ? match[1]!.split(',').map(Number) : undefined;
+  const locants = match ? (match[1] ?? match[2]!).split(',').map(Number) : undefined;
   const begin = match ? locantList.lastIndex : offset;
   const found: HeterocycleName[] = [];
   eachHeteroatom(lower, begin, (atoms, at) => {

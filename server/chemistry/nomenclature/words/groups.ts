@@ -3,6 +3,7 @@ import { chain, ring, type SkeletonGraph } from '../build/skeleton.ts';
 import type { Ending, SuffixEntry, Unit } from '../tree.ts';
 import { acylWithYl } from '../vocabulary/acids.ts';
 import { alkoxySkeleton, wordsAt, type AminoAcidSuffix, type Lexicon, type Word } from './lexicon.ts';
+import { componentReader } from './ring-components.ts';
 import { ringNameAt } from './ring-names.ts';
 import { chainTailsAt, endingsAt, type Tail } from './tails.ts';
 import { descriptorAt } from '../rings/von-baeyer.ts';
@@ -30,8 +31,11 @@ const bare = (skeletons: readonly SkeletonGraph[], start: number, end: number): 
   parentAt: start,
 });
 
+/** Ring names stand inside ring names so many deep at most. */
+const deepestRing = 3;
+
 /** Groups and parents that begin at the offset, brackets excepted. */
-export function groupsAt(text: string, lower: string, offset: number, lexicon: Lexicon): Group[] {
+export function groupsAt(text: string, lower: string, offset: number, lexicon: Lexicon, depth = 0): Group[] {
   const found: Group[] = [];
   const words = wordsAt(lexicon.words, lower, offset);
   const radicalEnds = new Set(words.filter((word) => word.value.kind === 'radical').map((word) => word.end));
@@ -74,7 +78,10 @@ export function groupsAt(text: string, lower: string, offset: number, lexicon: L
       }
     }
   }
-  for (const name of ringNameAt(text, lower, offset)) {
+  const components = componentReader(text, lower, lexicon, (at) =>
+    depth < deepestRing ? groupsAt(text, lower, at, lexicon, depth + 1) : [],
+  );
+  for (const name of ringNameAt(text, lower, offset, components)) {
     found.push(...ringForms(() => name.skeletons, text, lower, offset, name.end, lexicon));
   }
   return found;

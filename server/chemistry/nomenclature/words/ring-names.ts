@@ -2,7 +2,10 @@
 import type { SkeletonAtom, SkeletonGraph } from '../build/skeleton.ts';
 import { fusionNamesAt } from '../rings/fusion-names.ts';
 import { hantzschWidmanAt } from '../rings/hantzsch-widman.ts';
+import { ringAssembliesAt } from '../rings/ring-assemblies.ts';
+import { spiroNamesAt } from '../rings/spiro-names.ts';
 import { locantsAt, withBonding } from './locants.ts';
+import type { ComponentReader } from './ring-components.ts';
 
 export interface RingName {
   readonly skeletons: readonly SkeletonGraph[];
@@ -10,25 +13,42 @@ export interface RingName {
   readonly end: number;
 }
 
-type RingNameReader = (text: string, lower: string, offset: number) => readonly RingName[];
+type RingNameReader = (
+  text: string,
+  lower: string,
+  offset: number,
+  components: ComponentReader,
+) => readonly RingName[];
 
 const readers: readonly RingNameReader[] = [
   // P-22.2.2 and P-25.2.2.4
   hantzschWidmanAt,
   // P-25.3
   (_, lower, offset) => fusionNamesAt(lower, offset),
+  // P-24.3 to P-24.6
+  (_, lower, offset, components) => spiroNamesAt(lower, offset, components),
+  // P-28
+  (_, lower, offset, components) => ringAssembliesAt(lower, offset, components),
 ];
 
-/** Ring names by rule that begin at the offset. */
-export function ringNameAt(text: string, lower: string, offset: number): RingName[] {
+/** Ring names by rule that begin at the offset; `components` reads rings inside them. */
+export function ringNameAt(
+  text: string,
+  lower: string,
+  offset: number,
+  components: ComponentReader,
+): RingName[] {
   const locants = locantsAt(text, offset);
   const bonding = locants?.value.map(withBonding).filter((one) => one.bonds !== undefined) ?? [];
-  if (!locants || bonding.length === 0) return readers.flatMap((read) => read(text, lower, offset));
+  if (!locants || bonding.length === 0)
+    return readers.flatMap((read) => read(text, lower, offset, components));
   const plain = `${locants.value.map((one) => withBonding(one).locant).join(',')}-`;
   const [bare, bareLower] = [text, lower].map((one) => plain + one.slice(locants.end));
   const moved = locants.end - plain.length;
+  const inside: ComponentReader = (at) =>
+    components(at + moved).map((ring) => ({ ...ring, end: ring.end - moved }));
   return readers.flatMap((read) =>
-    read(bare!, bareLower!, 0)
+    read(bare!, bareLower!, 0, inside)
       .filter(({ end }) => end > plain.length)
       .map(({ skeletons, end }) => ({
         skeletons: skeletons.map((one) => bonded(one, bonding)),
