@@ -131,6 +131,15 @@ export interface BondingNumber {
   readonly bonds: number;
 }
 
+/** The acyclic half of a conjunctive name, bound to the ring that is named first: `1H-indole-3-acetic acid`. */
+export interface SideChain {
+  readonly unit: Unit;
+  readonly count: number;
+  /** On the ring. */
+  readonly locants?: readonly Locant[];
+  readonly range: TextRange;
+}
+
 export interface Unit {
   /** The skeletons that the parent's name can mean, with what tells them apart in a completed name. */
   readonly skeletons: readonly SkeletonGraph[];
@@ -153,6 +162,7 @@ export interface Unit {
   readonly attach?: { readonly atom: number; readonly order: 1 | 2 | 3; readonly count?: number };
   /** Atoms of the skeleton with a free valence each, where the group joins several others. */
   readonly links?: readonly number[];
+  readonly sideChain?: SideChain;
   /** A word such as `oxime`, and what kind of compound it is derived from. */
   readonly derivativeOf?: 'carbonyl' | 'acid';
   /** The unit stands several times round a linking group, or continues one. */

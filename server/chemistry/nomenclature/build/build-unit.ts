@@ -9,6 +9,7 @@ import { properNumbering } from './numbering.ts';
 import { Places } from './places.ts';
 import { placeBonding, placeReplacement } from './replacements.ts';
 import { inSeries, isSeriesWord } from './series.ts';
+import { placeSideChains } from './side-chains.ts';
 import type { SkeletonGraph } from './skeleton.ts';
 import { placeSubstitution } from './substitutions.ts';
 import { placeUnsaturations } from './unsaturations.ts';
@@ -45,6 +46,7 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
   if (!saturate(unit, places, draft, choices)) return undefined;
   const endings = [...unit.endings].sort((first, second) => rank(first) - rank(second));
   for (const ending of endings) if (!placeEnding(ending, built, draft, choices)) return undefined;
+  if (unit.sideChain && !placeSideChains(unit.sideChain, built, draft, choices, buildUnit)) return undefined;
   if (!placeUnsaturations(unit, places, draft, choices)) return undefined;
   let substitutions = 0;
   let used: Substitution | undefined;
@@ -60,6 +62,7 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
     substitutions === 1 &&
     places.alike &&
     unit.attach === undefined &&
+    unit.sideChain === undefined &&
     unit.endings.length + unit.unsaturations.length === 0
   ) {
     for (const inserted of places.inserted) draft.insertions.splice(draft.insertions.indexOf(inserted), 1);

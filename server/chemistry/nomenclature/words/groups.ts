@@ -4,6 +4,7 @@ import type { Ending, SuffixEntry, Unit } from '../tree.ts';
 import { acylWithYl } from '../vocabulary/acids.ts';
 import { alkoxySkeleton, wordsAt, type AminoAcidSuffix, type Lexicon, type Word } from './lexicon.ts';
 import { componentReader } from './ring-components.ts';
+import { conjunctiveForms } from './conjunctive.ts';
 import { ringNameAt } from './ring-names.ts';
 import { chainTailsAt, endingsAt, type Tail } from './tails.ts';
 import { descriptorAt } from '../rings/von-baeyer.ts';
@@ -84,6 +85,8 @@ export function groupsAt(text: string, lower: string, offset: number, lexicon: L
   for (const name of ringNameAt(text, lower, offset, components)) {
     found.push(...ringForms(() => name.skeletons, text, lower, offset, name.end, lexicon));
   }
+  const acyclic = (from: number) => groupsAt(text, lower, from, lexicon);
+  found.push(...conjunctiveForms(found, text, lower, lexicon, acyclic));
   return found;
 }
 

@@ -176,6 +176,9 @@ function withRange(unit: Unit, items: readonly Item[]): Unit {
  * belong to the first ending or double bond that has none and takes so many.
  */
 function withLeadingLocants(unit: Unit, locants: readonly Locant[]): Unit | undefined {
+  const side = unit.sideChain;
+  if (side && !side.locants && side.count === locants.length)
+    return { ...unit, sideChain: { ...side, locants } };
   const place = unit.unsaturations.findIndex(
     (one) => one.locants === undefined && one.count === locants.length,
   );
