@@ -35,12 +35,13 @@ export interface SuffixEntry {
   readonly name: string;
   /**
    * `on`: the group is bound to the atom with the locant; `at`: that carbon becomes part of the group, and lies at an
-   * end of a chain; `free`: a free valence.
+   * end of a chain; `free`: a free valence; `charge`: a charge on the atom.
    */
-  readonly kind: 'on' | 'at' | 'free';
+  readonly kind: 'on' | 'at' | 'free' | 'charge';
   /**
    * The group: its SMILES, the bond to the parent first. For `at`, what is bound to the carbon: pieces like `=O`,
-   * `O`, `N`, parted by spaces. For `free`, the bond order alone.
+   * `O`, `N`, parted by spaces. For `free`, the bond order alone; for `charge`, the
+   * charge and the change in the number of bonds.
    */
   readonly group: string;
   /** Locants of the group's own atoms in SMILES order (`N`), `-` where there is none. */

@@ -109,5 +109,8 @@ function buildWords(words: Sorted, draft: Draft, choices: Choices): boolean {
   const [, , sites, anion] = functionWords[functional.index]!;
   if (radicals.length > 0 || anion === '') return false;
   const charge = sites.length === 0 ? 1 : sites.length;
+  // An anion by itself is an ion (P-72.2.2.2), where it is not the class of a compound half named.
+  if (parents.length + ions === 0)
+    return charge === 1 && functional.count === undefined && addSmiles(anion, draft).length > 0;
   return buildSalt(metals, parents, [{ smiles: anion, charge, count: functional.count }], draft, choices);
 }

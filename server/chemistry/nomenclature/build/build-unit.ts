@@ -151,7 +151,8 @@ function freeLinks(links: readonly number[], skeleton: SkeletonGraph, built: Bui
   built.free.push(...links.map((index) => ({ atom: atoms[index]!, order: 1 })));
 }
 
-const rank = (ending: Ending) => (ending.suffix.kind === 'at' ? 0 : ending.locants ? 1 : 2);
+const rank = (ending: Ending) =>
+  ending.suffix.kind === 'charge' ? -1 : ending.suffix.kind === 'at' ? 0 : ending.locants ? 1 : 2;
 
 /** Hydro prefixes (P-31.1.4.2.4) and indicated hydrogen (P-31.1.4.2.1) take atoms out of the ring's double bonds. */
 function saturate(unit: Unit, places: Places, draft: Draft, choices: Choices): boolean {

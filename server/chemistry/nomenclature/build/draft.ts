@@ -72,6 +72,8 @@ export class Draft {
   owner: Owner = { at: 0, depth: 0, repeated: false };
   /** Bonds that belong to the skeletons of mancude rings, by `ringBondKey`. */
   readonly ringBonds = new Set<number>();
+  /** Atoms whose bonding number the name gives (P-14.1). */
+  readonly bonded = new Set<number>();
   cost = 0;
   failure: { range: TextRange; message: string } | undefined;
 
@@ -132,12 +134,18 @@ export class Draft {
       }
     }
     skeleton.atoms.forEach((atom, index) => {
-      if (atom.bonds !== undefined) this.atoms[added[index]!]!.capacity = atom.bonds;
+      if (atom.bonds !== undefined) this.setBonds(added[index]!, atom.bonds);
       else this.settleCapacity(added[index]!, atom.hydrogens);
     });
     for (const index of skeleton.indicated) this.usualHydrogen.push(added[index]!);
     for (const element of skeleton.stereo) this.stereo.push(moved(element, added));
     return added;
+  }
+
+  /** Gives an atom the bonding number that the name says. */
+  setBonds(atom: number, bonds: number): void {
+    this.atoms[atom]!.capacity = bonds;
+    this.bonded.add(atom);
   }
 
   /** `more`: bonds that are still to come and must fit. */

@@ -1,12 +1,14 @@
 /** Puts characteristic groups and free valences on the parent (P-31.1.4.3.1). */
 import type { Ending } from '../tree.ts';
 import { noSuchPlace, type BuiltUnit } from './built-unit.ts';
+import { placeCharge } from './charges.ts';
 import type { Choices } from './choices.ts';
 import type { Draft } from './draft.ts';
 import { groupSkeleton } from './group-skeleton.ts';
 
 /** Puts a suffix on its places, chosen where the name leaves them open; false when that cannot be. */
 export function placeEnding(ending: Ending, built: BuiltUnit, draft: Draft, choices: Choices): boolean {
+  if (ending.suffix.kind === 'charge') return placeCharge(ending, built, draft, choices);
   const atoms = endingAtoms(ending, built, draft, choices);
   if (!atoms) return false;
   atoms.forEach((atom, index) => {

@@ -38,8 +38,12 @@ export function buildAcidOrParent(words: AcidWords, draft: Draft, choices: Choic
   // `monomethyl succinate`: the other places keep their hydrogen.
   const mono = radicals.some((radical) => radical.mono === true) && metals.length === 0;
   const hydrogens = mono ? sites.length - valences.length : words.hydrogens;
-  if (sites.length === 0)
-    return valences.length + hydrogens + metals.length === 0 && parents.length === 1 && acid.count === 1;
+  if (sites.length === 0) {
+    if (valences.length + hydrogens > 0 || acid.count > 1) return false;
+    const charge = netCharge(draft);
+    const alone = metals.length === 0 && parents.length === 1;
+    return alone || (charge < 0 && addCounterions(words, -charge, 0, draft, choices));
+  }
   if (valences.length + hydrogens > sites.length) return false;
   const alone = metals.length === 0 && parents.length === 1;
   if (acid.count > 1 && alone && (groups.length !== 1 || valences.length !== acid.count)) return false;
@@ -48,7 +52,9 @@ export function buildAcidOrParent(words: AcidWords, draft: Draft, choices: Choic
   if (!left) return false;
   left = protonated(left, hydrogens, draft, choices);
   // An acid's anion by itself is an ion; half an ester is nothing definite.
-  if (alone) return left.length === 0 || (valences.length === 0 && hydrogens === 0 && namesAnion(acid.unit));
+  if (alone && left.length > 0 && !isZwitterion(draft))
+    return valences.length === 0 && hydrogens === 0 && namesAnion(acid.unit);
+  if (alone) return true;
   return left.length > 0 && addCounterions(words, left.length, valences.length, draft, choices);
 }
 
@@ -98,16 +104,18 @@ function addCounterions(
     if (total !== places) return false;
     for (const metal of metals)
       for (let copy = 0; copy < (metal.count ?? 1); copy++) addSmiles(metal.smiles, draft);
-    return bases.every((base) => makeCation(base, draft, choices));
+    return bases.every((base) => makeCation(base, draft, choices) === 1);
   }
   const [metal] = metals;
   const [base] = bases;
   const given = metal ? metal.count : base && base.count > 1 ? base.count : undefined;
-  const counts = balanced(metal?.charge ?? 1, given, places, acid.count > 1 ? 1 : undefined);
+  const charge = metal ? metal.charge : base && makeCation(base, draft, choices);
+  if (charge === undefined) return false;
+  const counts = balanced(charge, given, places, acid.count > 1 ? 1 : undefined);
   if (!counts) return false;
-  for (let copy = 0; copy < counts[0]; copy++) {
+  for (let copy = metal ? 0 : 1; copy < counts[0]; copy++) {
     if (metal) addSmiles(metal.smiles, draft);
-    else if (!base || !makeCation(base, draft, choices)) return false;
+    else if (!base || makeCation(base, draft, choices) !== charge) return false;
   }
   for (let copy = 1; copy < counts[1]; copy++) {
     if (groups + hydrogens > 0 || !buildWord(acid.unit, draft, choices, acid.count)) return false;
@@ -124,11 +132,26 @@ function fits(place: number, site: Site | undefined, all: readonly number[], dra
   );
 }
 
-/** `2-phenylacetate` is the ion; `citrate` or `ethylhexanoate` alone may be an ester or the acid written badly. */
+/** P-74.1: the negative places have their positive counterparts in the same molecule. */
+function isZwitterion(draft: Draft): boolean {
+  return netCharge(draft) === 0;
+}
+
+function netCharge(draft: Draft): number {
+  return draft.atoms.reduce((sum, atom) => sum + atom.charge, 0);
+}
+
+/**
+ * `2-phenylacetate` and `naphthalene-1-carboxylate` are the ion (P-72.2.2.2.2); `citrate` alone may be an ester or the
+ * acid written badly, and `ethylhexanoate` an ester without its space.
+ */
 function namesAnion(unit: Unit): boolean {
+  const retained = unit.endings.length === 0 || unit.endings.some(({ suffix }) => suffix.name === 'oate');
   const chain = unit.skeletons.every((one) => one.kind === 'chain');
+  const single = unit.skeletons.every((one) => one.atoms.length === 1);
   const located = unit.groupings.every((ways) =>
     ways.every((way) => way.substitutions.every((one) => one.locants !== undefined)),
   );
+  if (!retained) return located || single;
   return located && (chain || unit.groupings.length > 0);
 }

@@ -54,8 +54,10 @@ function oxidiseAtom(atom: number, draft: Draft): boolean {
 
 function addDouble(atom: number, group: string, draft: Draft): boolean {
   const most = draft.atoms[atom]!.atomicNumber === phosphorus ? 5 : 6;
-  if (draft.atoms[atom]!.capacity + 2 > most) return false;
-  draft.atoms[atom]!.capacity += 2;
+  // A bonding number that the name gives (`5λ4-thia… 5-oxide`) has room for the oxygen already.
+  const more = draft.bonded.has(atom) && draft.free(atom) >= 2 ? 0 : 2;
+  if (draft.atoms[atom]!.capacity + more > most) return false;
+  draft.atoms[atom]!.capacity += more;
   draft.bond(atom, addSmiles(group, draft)[0]!, 2);
   return true;
 }

@@ -24,7 +24,7 @@ export function placeReplacement(replacement: Replacement, places: Places, draft
     own.charge = charge;
     own.mancude &&= charge > 0 || tetravalentInRings.has(atomicNumber);
     if (bonding?.[index] === undefined) draft.settleCapacity(atom);
-    else own.capacity = bonding[index];
+    else draft.setBonds(atom, bonding[index]);
   }
   return true;
 }
@@ -37,7 +37,7 @@ export function placeBonding(unit: Unit, places: Places, draft: Draft): boolean 
       draft.fail(unit.range, noSuchPlace(locant ?? `λ${String(bonds)}`));
       return false;
     }
-    draft.atoms[atom]!.capacity = bonds;
+    draft.setBonds(atom, bonds);
     // P-22.2.2.1.1: with more bonds than usual the atom takes part in the double bonds of its ring.
     if (bonds > draft.orderSum(atom)) joinRing(atom, places, draft);
   }

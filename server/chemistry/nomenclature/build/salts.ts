@@ -17,37 +17,31 @@ export function buildSalt(
   draft: Draft,
   choices: Choices,
 ): boolean {
-  const positives: { charge: number; count: number | undefined; make: () => boolean }[] = metals.map(
-    (metal) => ({
-      charge: metal.charge,
-      count: metal.count,
-      make: () => addSmiles(metal.smiles, draft).length > 0,
-    }),
-  );
-  for (const base of bases) {
-    positives.push({
-      charge: 1,
-      count: base.count > 1 ? base.count : undefined,
-      make: () => makeCation(base, draft, choices),
-    });
-  }
-  if (positives.length !== 1 || negatives.length !== 1) return false;
-  const [positive, negative] = [positives[0]!, negatives[0]!];
+  if (metals.length + bases.length !== 1 || negatives.length !== 1) return false;
+  const [metal] = metals;
+  const [base] = bases;
+  const [negative] = negatives as [Ion];
+  const charge = metal ? metal.charge : makeCation(base!, draft, choices);
+  if (charge === undefined) return false;
+  const given = metal ? metal.count : base!.count > 1 ? base!.count : undefined;
   // A number before the anion goes with a number, or one, before the cation: there is no `sodium dichloride`.
-  const cations = positive.count ?? (negative.count === undefined ? undefined : 1);
-  const counts = balanced(positive.charge, cations, negative.charge, negative.count);
+  const cations = given ?? (negative.count === undefined ? undefined : 1);
+  const counts = balanced(charge, cations, negative.charge, negative.count);
   if (!counts) return false;
-  for (let copy = 0; copy < counts[0]; copy++) if (!positive.make()) return false;
+  for (let copy = metal ? 0 : 1; copy < counts[0]; copy++) {
+    if (metal) addSmiles(metal.smiles, draft);
+    else if (makeCation(base!, draft, choices) !== charge) return false;
+  }
   for (let copy = 0; copy < counts[1]; copy++) addSmiles(negative.smiles, draft);
   return true;
 }
 
-export function makeCation(base: Word, draft: Draft, choices: Choices): boolean {
+/** Builds an organic cation; its charge, or undefined when it has none. */
+export function makeCation(base: Word, draft: Draft, choices: Choices): number | undefined {
   const from = draft.atoms.length;
-  if (!buildWord(base.unit, draft, choices)) return false;
-  let charge = 0;
-  for (let atom = from; atom < draft.atoms.length; atom++) charge += draft.atoms[atom]!.charge;
-  return charge === 1;
+  if (!buildWord(base.unit, draft, choices)) return undefined;
+  const charge = draft.atoms.slice(from).reduce((sum, atom) => sum + atom.charge, 0);
+  return charge > 0 ? charge : undefined;
 }
 
 export function balanced(

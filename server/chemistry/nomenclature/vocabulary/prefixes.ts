@@ -113,6 +113,15 @@ export const simplePrefixes: readonly PrefixLine[] = [
   ['sulfooxy', 'OS(=O)(=O)O'],
   ['sulfido', '[S-]'],
   ['oxido', '[O-]'],
+  ['selenido', '[Se-]'],
+  ['oxidanidyl', '[O-]'],
+  ['sulfanidyl', '[S-]'],
+  ['carboxylato', 'C(=O)[O-]'],
+  ['sulfonato', 'S(=O)(=O)[O-]'],
+  ['sulfinato', 'S(=O)[O-]'],
+  ['phosphonato', 'P(=O)([O-])[O-]'],
+  ['diazonio', '[N+]#N'],
+  ['pyridinio', '[n+]1ccccc1', '1 2 3 4 5 6'],
 ];
 
 /**
@@ -153,6 +162,12 @@ export const linkingPrefixes: readonly (readonly [
   ['carbamoylamino', 'NC(=O)N', "N - - N'", 3],
   ['carbamoyloxy', 'OC(=O)N', '- - - N', 3],
   ['azaniumyl', '[NH3+]', 'N', 0],
+  ['ammonio', '[NH3+]', 'N', 0],
+  ['phosphonio', '[PH3+]', 'P', 0],
+  ['phosphaniumyl', '[PH3+]', 'P', 0],
+  ['sulfonio', '[SH2+]', 'S', 0],
+  ['sulfaniumyl', '[SH2+]', 'S', 0],
+  ['azanidyl', '[NH-]', 'N', 0],
 ];
 
 /** Groups that say nothing without the substituent directly before them: `methoxycarbonyl`, `phenylsulfonyl`. */

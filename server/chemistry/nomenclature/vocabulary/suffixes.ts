@@ -79,6 +79,17 @@ export const suffixes: readonly SuffixEntry[] = [
   { name: 'phosphonic acid', kind: 'on', group: 'P(=O)(O)O' },
   { name: 'boronic acid', kind: 'on', group: 'B(O)O' },
   { name: 'oxy', kind: 'on', group: 'O', radical: true },
+  { name: 'iminium', kind: 'on', group: '=[NH2+]', locants: 'N' },
+  { name: 'diazonium', kind: 'on', group: '[N+]#N' },
+  { name: 'aminide', kind: 'on', group: '[NH-]', locants: 'N' },
+  // P-72.2.2.1, P-73.1.1, P-73.2: hydron lost or gained, hydride gained or lost
+  { name: 'ium', kind: 'charge', group: '1 1' },
+  { name: 'ylium', kind: 'charge', group: '1 -1' },
+  { name: 'ide', kind: 'charge', group: '-1 -1' },
+  { name: 'uide', kind: 'charge', group: '-1 1' },
+  // before a further ending the e is lost
+  { name: 'id', kind: 'charge', group: '-1 -1' },
+  { name: 'uid', kind: 'charge', group: '-1 1' },
   { name: 'yl', kind: 'free', group: '1' },
   { name: 'ylidene', kind: 'free', group: '2' },
   { name: 'ylidyne', kind: 'free', group: '3' },

@@ -52,6 +52,28 @@ function* countedAt(text: string, lower: string, offset: number, lexicon: Lexico
 /** Endings at the offset; an `e` or `a` before them is elided or not. */
 export function endingsAt(text: string, lower: string, offset: number, lexicon: Lexicon): Tail[] {
   const found: Tail[] = [];
+  for (const tail of singleEndingsAt(text, lower, offset, lexicon)) {
+    const { suffix } = tail.endings[0]!;
+    if (suffix.name !== 'id' && suffix.name !== 'uid') found.push(tail);
+    if (suffix.kind === 'charge') found.push(...afterCharge(tail, text, lower, lexicon));
+  }
+  return found;
+}
+
+/** `-1-ium-3-carboxamide`, `-3-ium-1-id-2-yl`: a charge is cited before the other endings (P-73.1.2.2, P-74). */
+function afterCharge(tail: Tail, text: string, lower: string, lexicon: Lexicon): Tail[] {
+  const found: Tail[] = [];
+  for (const next of singleEndingsAt(text, lower, tail.end, lexicon)) {
+    const both = { ...next, endings: [...tail.endings, ...next.endings] };
+    const { name, kind } = next.endings[0]!.suffix;
+    if (name !== 'id' && name !== 'uid') found.push(both);
+    if (kind === 'charge' && both.endings.length < 3) found.push(...afterCharge(both, text, lower, lexicon));
+  }
+  return found;
+}
+
+function singleEndingsAt(text: string, lower: string, offset: number, lexicon: Lexicon): Tail[] {
+  const found: Tail[] = [];
   const seen = new Set<string>();
   const begin = lower[offset] === 'e' ? [offset + 1, offset] : [offset];
   for (const from of begin) {
@@ -83,7 +105,7 @@ function endingOf(suffix: SuffixEntry, counted: Counted, end: number): Ending {
 export function chainTailsAt(text: string, lower: string, offset: number, lexicon: Lexicon): Tail[] {
   const found: Tail[] = [];
   for (const word of wordsAt(lexicon.suffixes, lower, offset)) {
-    if (word.value.kind !== 'free') continue;
+    if (word.value.kind !== 'free' && word.value.name !== 'ylium') continue;
     found.push({
       unsaturations: [],
       endings: [endingOf(word.value, { count: 1, end: offset, at: offset }, word.end)],
