@@ -18,7 +18,7 @@ export function plainFormula(text: string): string | undefined {
     .replace(/[₀-₉]/g, (digit) => String(digit.charCodeAt(0) - 0x2080))
     .replace(/[•∙⋅]|(?<!Cp)\*/g, '·')
     .replace(/#/g, '≡');
-  return /^(?:[A-Z([]|\d?[insctompIS]{1,4}-?[A-Z])/.test(plain) ? plain : undefined;
+  return /^(?:[A-Z([]|[2-4]-[A-Z]|\d?[insctompIS]{1,4}-?[A-Z])/.test(plain) ? plain : undefined;
 }
 
 /**
@@ -28,7 +28,7 @@ export function plainFormula(text: string): string | undefined {
 export function formulaParts(formula: string): readonly FormulaPart[] | undefined {
   const parts: FormulaPart[] = [];
   for (const piece of formula.split(/\s*·\s*|(?<=[A-Za-z\d)\]])\.(?=\d*[A-Z(])/)) {
-    const match = /^(\d{1,2})? ?(?=[^\d\s])/.exec(piece);
+    const match = /^(\d{1,2}(?!-))? ?(?=[^\s])/.exec(piece);
     if (!match || piece === '') return undefined;
     const times = match[1] === undefined ? 1 : Number(match[1]);
     if (times === 0 || (parts.length === 0 && times > 1)) return undefined;

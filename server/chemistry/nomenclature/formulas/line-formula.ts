@@ -5,30 +5,13 @@
  * atom has its ordinary valence count. Common practice, no source.
  */
 import { bracketAt, countAt } from './formula-text.ts';
-import {
-  emptySketch,
-  freeAt,
-  sketchSmiles,
-  withAtom,
-  withEnd,
-  withGroups,
-  withHydrogens,
-  type Sketch,
-  type SketchAtom,
-} from './sketch.ts';
-import { firstGroups, groups, joints, lastGroups, lineMetals } from './symbols.ts';
+import { fragmentOf, halogens, wholeSmiles, type Fragment } from './finished-sketch.ts';
+import { emptySketch, withAtom, withEnd, withGroups, withHydrogens, type Sketch } from './sketch.ts';
+import { firstGroups, groups, joints, lastGroups } from './symbols.ts';
 
 /** Counted steps of one reading, shared by all that try formulas. */
 export interface Steps {
   left: number;
-}
-
-/** A part of a formula with one bond left to others. */
-export interface Fragment {
-  /** The bonding atom first. */
-  readonly smiles: string;
-  /** The same as an anion, where the bonding atom is O, S, Se or N. */
-  readonly anion: string | undefined;
 }
 
 interface Place {
@@ -39,7 +22,12 @@ interface Place {
   readonly after: 'start' | 'atom' | 'group' | 'bracket' | 'oxo' | 'bond';
   /** The order of the bond to the next atom. */
   readonly order: number;
+  /** Which phenylene the `C6H4` of the text is; undefined where no locant says so. */
+  readonly phenylene?: string;
 }
+
+/** `4-MeOC6H4…`, `p-O2NC6H4…`: the locant in front is that of the ring. */
+const ringLocant = /^(?:(o|2)|(m|3)|(p|4))-(?=[A-Z(].*C6H4)/;
 
 const longestExpansion = 400;
 
@@ -48,7 +36,7 @@ export function wholeFormulas(text: string, steps: Steps): ReadonlySet<string> {
   const found = new Set<string>();
   for (const sketch of sketches(text, steps)) {
     const smiles = wholeSmiles(sketch);
-    if (smiles !== undefined && carriesMetalsRightly(sketch)) found.add(smiles);
+    if (smiles !== undefined) found.add(smiles);
   }
   return found;
 }
@@ -63,72 +51,18 @@ export function fragments(text: string, steps: Steps): readonly Fragment[] {
   return [...found.values()];
 }
 
-function wholeSmiles(sketch: Sketch): string | undefined {
-  const { atoms, waiting } = sketch;
-  if (atoms.length > 0) {
-    const whole = waiting.length === 0 && atoms.every((atom) => freeAt(atom) === 0 && !isOddAcid(atom));
-    return whole
-      ? sketchSmiles(
-          sketch,
-          atoms.findIndex((atom) => !atom.group),
-        )
-      : undefined;
-  }
-  // `PhBr`, `HCl`, `(COCl)2`: two groups that have no atom between them.
-  const [first, second] = waiting;
-  if (waiting.length !== 2 || first === undefined || second === undefined) return undefined;
-  // `IPr` and `IMes` are carbenes, `HAc` is acetic acid to some: only hydrogen halides begin with their smaller half.
-  // `PhD` is a degree.
-  if (first === 'H' ? !halogens.has(second) : halogens.has(first) || second === '[2H]') return undefined;
-  return first === 'H' ? second : `${bonded(first)}.${bonded(second)}`;
-}
-
-/** Hydrogen of sulfinic and sulfurous acids is written on oxygen. */
-const isOddAcid = ({ symbol, hydrogens, oxo }: SketchAtom) => symbol === 'S' && hydrogens > 0 && oxo > 0;
-
-const halogens: ReadonlySet<string> = new Set(['F', 'Cl', 'Br', 'I', '[2H]']);
-
-/** The group with an open ring bond on its first atom; two of them are one molecule. */
-function bonded(smiles: string): string {
-  const first = /^(?:\[[^\]]*\]|Cl|Br|[A-Za-z])/.exec(smiles)![0];
-  return `${first}%99${smiles.slice(first.length)}`;
-}
-
-function fragmentOf(sketch: Sketch): Fragment | undefined {
-  const { atoms, waiting } = sketch;
-  if (atoms.length === 0) return waiting.length === 1 ? { smiles: waiting[0]!, anion: undefined } : undefined;
-  const open = atoms.flatMap((atom, index) => Array.from({ length: freeAt(atom) }, () => index));
-  const [root] = open;
-  if (waiting.length > 0 || open.length !== 1 || root === undefined || atoms.some(isOddAcid))
-    return undefined;
-  const { symbol } = atoms[root]!;
-  const bearsCharge = symbol === 'O' || symbol === 'S' || symbol === 'Se' || symbol === 'N';
-  return {
-    smiles: sketchSmiles(sketch, root),
-    anion: bearsCharge ? sketchSmiles(sketch, root, { charge: '-' }) : undefined,
-  };
-}
-
-/**
- * A metal stands in a line formula where carbon or hydrogen is bound to it; its salts, cyanides among them, are read
- * elsewhere.
- */
-function carriesMetalsRightly({ atoms }: Sketch): boolean {
-  return atoms.every((atom) => {
-    if (atom.group || !lineMetals.has(atom.symbol)) return true;
-    const partners = atom.links.map(({ to }) => atoms[to]!);
-    return partners.some((one) => isCarbon(one, atoms)) || (atom.hydrogens > 0 && partners.length > 0);
-  });
-}
-
-function isCarbon(atom: SketchAtom, atoms: readonly SketchAtom[]): boolean {
-  if (atom.group) return /^(?:\[C|[Cc](?!l))/.test(atom.symbol) && !atom.symbol.startsWith('[C]#N');
-  return atom.symbol === 'C' && !atom.links.some(({ to, order }) => order === 3 && atoms[to]!.symbol === 'N');
-}
-
 /** Every way in which the text to its end is a line of atoms. */
 function* sketches(text: string, steps: Steps): Generator<Sketch> {
-  yield* from({ text, at: 0, sketch: emptySketch, after: 'start', order: 1 }, steps);
+  const ring = ringLocant.exec(text);
+  const phenylene = ring && `${ring[1] ? 'o' : ring[2] ? 'm' : 'p'}C6H4`;
+  const place: Place = {
+    text: text.slice(ring?.[0].length ?? 0),
+    at: 0,
+    sketch: emptySketch,
+    after: 'start',
+    order: 1,
+  };
+  yield* from(phenylene ? { ...place, phenylene } : place, steps);
 }
 
 function* from(place: Place, steps: Steps): Generator<Sketch> {
@@ -204,6 +138,11 @@ function* grouped(place: Place, smiles: string, count: number, end: number): Gen
 
 function* chainAtoms(place: Place): Generator<Place> {
   const { text, at, sketch } = place;
+  if (place.phenylene !== undefined && text.startsWith('C6H4', at)) {
+    const ring = withAtom(sketch, place.phenylene, place.order);
+    if (ring) yield { text, at: at + 4, sketch: ring, after: 'group', order: 1 };
+    return;
+  }
   const two = text.slice(at, at + 2);
   const symbol = joints[two] !== undefined ? two : text[at]!;
   if (joints[symbol] === undefined) return;
@@ -211,7 +150,7 @@ function* chainAtoms(place: Place): Generator<Place> {
   if (symbol === 'O') yield* turnedEster(place);
   if (/\d/.test(text[end] ?? '')) return;
   const made = withAtom(sketch, symbol, place.order);
-  if (made) yield { text, at: end, sketch: made, after: 'atom', order: 1 };
+  if (made) yield { ...place, at: end, sketch: made, after: 'atom', order: 1 };
 }
 
 /** `EtO2CCH2…`, `HOOCCH2…`: an ester or acid written from its oxygen. */
@@ -233,7 +172,7 @@ function* ends(place: Place): Generator<Place> {
   const number = countAt(text, at + 1);
   if (!number || !'OSN'.includes(letter) || /[a-z]/.test(text[at + 1] ?? '')) return;
   const go = (made: Sketch | undefined, after: Place['after'] = 'oxo'): Place[] =>
-    made ? [{ text, at: number.end, sketch: made, after, order: 1 }] : [];
+    made ? [{ ...place, at: number.end, sketch: made, after, order: 1 }] : [];
   const { count } = number;
   if (letter === 'N') {
     if (atom === 'C' && count === 1) yield* go(withEnd(sketch, 'N', 3), 'group');

@@ -2,7 +2,7 @@
  * A line formula half read: atoms in a tree, the place at which the line goes on, and groups that wait for their atom. A
  * sketch never changes; each step makes a new one, so that several ways of going on can be tried.
  */
-import { joints, oxoLimit } from './symbols.ts';
+import { joints, oxoLimit, phenylenes } from './symbols.ts';
 
 export interface SketchAtom {
   /** An element's symbol, or the SMILES of a group with its bonding atom first. */
@@ -147,8 +147,23 @@ export function sketchSmiles(
       return at === links.length - 1 && !atom.group ? text : `(${text})`;
     });
     const marked = index === root ? mark : {};
+    if (phenylenes[atom.symbol]) return phenylene(atom.symbol, branches);
     return headOf(atom, marked.charge ?? '', (marked.bond ?? '') + branches.join(''));
   }
+}
+
+/** A benzene ring with one or two branches; of one, its first place is that of the atom before or of the free bond. */
+function phenylene(symbol: string, branches: readonly string[]): string {
+  const bare = branches.map((branch) => (branch.startsWith('(') ? branch.slice(1, -1) : branch));
+  const second = bare[bare.length - 1] ?? '';
+  const first = bare.length === 2 ? `(${bare[0]!})` : '';
+  let ring = 98;
+  while (bare.some((branch) => branch.includes(`%${String(ring)}`))) ring--;
+  const [before, after] = phenylenes[symbol]!;
+  // Two branches on neighbours: the second place closes the ring.
+  const middle = after === '' ? `${before}c%${String(ring)}` : `${before}c`;
+  const end = after === '' ? '' : `${after.slice(0, -1)}c%${String(ring)}`;
+  return `c%${String(ring)}${first}${middle}${second === '' ? '' : `(${second})`}${end}`;
 }
 
 /** The atom's own text with what hangs on it; a group's first atom takes what is bound to the group. */
@@ -157,6 +172,6 @@ function headOf(atom: SketchAtom, charge: string, hangs: string): string {
     const hydrogens = atom.hydrogens === 0 ? '' : `H${String(atom.hydrogens)}`;
     return `[${atom.symbol}${hydrogens}${charge}]${hangs}`;
   }
-  const first = /^(?:\[[^\]]*\]|Cl|Br|[A-Za-z])\d*/.exec(atom.symbol)![0];
+  const first = /^(?:\[[^\]]*\]|Cl|Br|[A-Za-z])(?:%\d\d|\d)*/.exec(atom.symbol)![0];
   return first + hangs + atom.symbol.slice(first.length);
 }

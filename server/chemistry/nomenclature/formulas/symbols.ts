@@ -56,6 +56,16 @@ export const joints: Readonly<Record<string, number>> = {
   Mg: 2,
   Zn: 2,
   Hg: 2,
+  oC6H4: 2,
+  mC6H4: 2,
+  pC6H4: 2,
+};
+
+/** The rings among them: SMILES before and after what is bound to the second place. */
+export const phenylenes: Readonly<Record<string, readonly [before: string, after: string]>> = {
+  oC6H4: ['cccc', ''],
+  mC6H4: ['ccc', 'c'],
+  pC6H4: ['cc', 'cc'],
 };
 
 /** Oxo groups that an atom takes beyond its ordinary bonds. */
