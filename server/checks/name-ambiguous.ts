@@ -1,4 +1,5 @@
 /** A name that stands for several constitutions. */
+import { countInWords } from '../chemistry/nomenclature/reading.ts';
 import type { Check } from './finding.ts';
 import { rankedReadings } from './shared/reading-fit.ts';
 import { listed, quoted, replacement } from './shared/values.ts';
@@ -47,7 +48,7 @@ export const check: Check = {
       range: value.text.range,
       ...(picked ? { severity: 'information' as const } : {}),
       message:
-        `${quoted(value.text.text)} can be ${count} compounds: ${all}. ` +
+        `${quoted(value.text.text)} can be ${countInWords(model.name)} compounds: ${all}. ` +
         (deciding.length === 0
           ? 'They are different substances, and the entry does not say which: complete the name.'
           : `The ${listed(deciding)} ${deciding.length === 1 && deciding[0] !== 'synonyms' ? 'picks' : 'pick'} ${names[0]!}: ` +

@@ -4,7 +4,7 @@ import { prettyFormula } from '../chemistry/composition/format-formula.ts';
 import { averageMass } from '../chemistry/composition/mass.ts';
 import { compositionOf } from '../chemistry/structure/composition-of.ts';
 import type { Molecule } from '../chemistry/structure/molecule.ts';
-import type { NameReading } from '../chemistry/nomenclature/reading.ts';
+import { countInWords, type NameReading } from '../chemistry/nomenclature/reading.ts';
 
 import { writeSmiles } from '../chemistry/structure/write-smiles.ts';
 import { createToolkit } from '../toolkit/create-toolkit.ts';
@@ -89,7 +89,7 @@ function inWords(name: string, reading: NameReading): string {
       return `${head}: a mixture. ${printable(reading.message)}`;
     case 'understood': {
       const count = reading.count ?? reading.readings.length;
-      const lines = [`${head}: ${count === 1 ? '1 structure' : `${count} structures`}`];
+      const lines = [`${head}: ${count === 1 ? '1 structure' : `${countInWords(reading)} structures`}`];
       for (const { name: full, molecule, stereoisomers, stereoisomerCount } of reading.readings) {
         lines.push(`  ${structureLine(full, molecule)}`);
         const open = stereoisomerCount ?? stereoisomers.length;

@@ -36,6 +36,8 @@ export interface ReadingJson {
   /** More readings than are listed; `count` is the true number. */
   readonly truncated?: true;
   readonly count?: number;
+  /** Counting was given up: `count` is a lower bound. */
+  readonly atLeast?: true;
 }
 
 export function smilesOf(molecule: Molecule): string {
@@ -86,6 +88,7 @@ export function readingJson(
         readings: readings.map(structure),
         ...(remarks.length > 0 ? { remarks: remarks.map(({ kind, message }) => ({ kind, message })) } : {}),
         ...truncation(readings, count),
+        ...(reading.atLeast === true ? { truncated: true as const, count, atLeast: true as const } : {}),
       };
     }
   }

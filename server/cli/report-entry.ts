@@ -3,7 +3,7 @@ import { prettyFormula } from '../chemistry/composition/format-formula.ts';
 import type { Composition } from '../chemistry/composition/composition.ts';
 import { averageMass, monoisotopicMass } from '../chemistry/composition/mass.ts';
 import { degreeOfUnsaturation } from '../chemistry/composition/unsaturation.ts';
-import type { NameReading } from '../chemistry/nomenclature/reading.ts';
+import { countInWords, type NameReading } from '../chemistry/nomenclature/reading.ts';
 import { canonicalSmiles } from '../chemistry/structure/canonical-smiles.ts';
 import { compositionOf } from '../chemistry/structure/composition-of.ts';
 import type { Molecule } from '../chemistry/structure/molecule.ts';
@@ -116,7 +116,7 @@ function readingRemarks(reading: NameReading): string[] {
       if (count > 1) {
         const names = reading.readings.map((each) => each.name).join('; ');
         return [
-          `The name can mean ${count} structures: ${names}${count > reading.readings.length ? '; …' : '.'}`,
+          `The name can mean ${countInWords(reading)} structures: ${names}${count > reading.readings.length ? '; …' : '.'}`,
         ];
       }
       return reading.readings.flatMap(({ stereoisomers, stereoisomerCount }) => {

@@ -3,7 +3,12 @@ import type { Composition } from '../chemistry/composition/composition.ts';
 import { prettyFormula } from '../chemistry/composition/format-formula.ts';
 import { averageMass, monoisotopicMass } from '../chemistry/composition/mass.ts';
 import { degreeOfUnsaturation } from '../chemistry/composition/unsaturation.ts';
-import type { NameReading, Reading } from '../chemistry/nomenclature/reading.ts';
+import {
+  countInWords,
+  type NameReading,
+  type Reading,
+  type UnderstoodName,
+} from '../chemistry/nomenclature/reading.ts';
 import { canonicalSmiles } from '../chemistry/structure/canonical-smiles.ts';
 import { compositionOf } from '../chemistry/structure/composition-of.ts';
 import type { Molecule } from '../chemistry/structure/molecule.ts';
@@ -91,7 +96,7 @@ export function nameCard(name: string, reading: NameReading): HoverCard {
     case 'understood':
       return reading.readings.length === 1
         ? definiteCard(reading.readings[0]!)
-        : ambiguousCard(name, reading.readings, reading.count ?? reading.readings.length);
+        : ambiguousCard(name, reading);
   }
 }
 
@@ -121,13 +126,15 @@ function without<T extends object, K extends keyof T>(value: T, key: K): Omit<T,
   return rest;
 }
 
-function ambiguousCard(name: string, readings: readonly Reading[], count: number): HoverCard {
+function ambiguousCard(name: string, reading: UnderstoodName): HoverCard {
+  const { readings } = reading;
+  const count = reading.count ?? readings.length;
   const formulas = new Set(readings.map(({ molecule }) => prettyFormula(compositionOf(molecule))));
   const shared =
     formulas.size === 1 && count === readings.length ? compositionOf(readings[0]!.molecule) : undefined;
   return {
     title: name,
-    subtitle: `${count} readings${shared === undefined ? '' : ` of ${prettyFormula(shared)}`}`,
+    subtitle: `${countInWords(reading)} readings${shared === undefined ? '' : ` of ${prettyFormula(shared)}`}`,
     drawings: readings.slice(0, mostDrawings).map(drawingOf),
     ...(shared === undefined ? {} : { rows: massRows(shared) }),
     ...(count > mostDrawings

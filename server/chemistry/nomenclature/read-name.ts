@@ -4,7 +4,7 @@
  */
 import type { TextRange } from '../text.ts';
 import type { NameReading, NameRemark, Reading } from './reading.ts';
-import { completedName, meaningsOf, type Described, type Meaning } from './readings.ts';
+import { completedName, meaningsOf, type Described, type Meaning, type Meanings } from './readings.ts';
 import { createCommonNames, type CommonNames } from './common-names.ts';
 import { arrangedReading } from './arrange.ts';
 import { knownReading } from './known-readings.ts';
@@ -70,7 +70,9 @@ function read(
   const tooLong = text.length > longestName;
   const prepared = prepareName(tooLong ? '' : text);
   if (prepared.text === '') {
-    const message = tooLong ? 'This name is too long to be read.' : 'There is no name here.';
+    const message = tooLong
+      ? `This name is too long to be read: names of up to ${String(longestName)} characters are.`
+      : 'There is no name here.';
     return { kind: 'unknown', stoppedAt: 0, range: { start: 0, end: text.length }, message, suggestions: [] };
   }
   const readOther = (other: string) => read(other, limits, lexicon, common, depth + 1);
@@ -79,8 +81,12 @@ function read(
   const reader = new ItemReader(prepared, lexicon, limits.steps ?? 4000);
   const found = sentences(reader);
   const { meanings, complete, failure } = meaningsOf(found, Math.min(limits.steps ?? 4000, buildLimit));
-  if (meanings.length === 0)
-    return unknownName(text, prepared, reader, failure, [...lexicon.list, ...common.names]);
+  // What was found before a bound was met is not all that the name can mean: one reading would be a guess.
+  const given = reader.exhausted || (!complete && meanings.length < 2);
+  if (given || meanings.length === 0) {
+    const vocabulary = [...lexicon.list, ...common.names];
+    return unknownName(text, prepared, reader, complete ? failure : tooOpen(failure, text), vocabulary);
+  }
   const cap = limits.readings ?? 32;
   const remarks = new Map<string, NameRemark>();
   const readings = meanings.slice(0, cap).map((meaning): Reading => {
@@ -101,8 +107,14 @@ function read(
     kind: 'understood',
     readings,
     remarks: [...remarks.values()],
-    ...(meanings.length > cap ? { count: meanings.length } : complete ? {} : { count: meanings.length }),
+    ...(meanings.length > cap || !complete ? { count: meanings.length } : {}),
+    ...(complete ? {} : { atLeast: true as const }),
   };
+}
+
+function tooOpen(failure: Meanings['failure'], text: string): Meanings['failure'] {
+  const message = `This name leaves so much open that reading it was given up after ${String(buildLimit)} structures.`;
+  return { range: failure?.range ?? { start: 0, end: text.length }, message };
 }
 
 /** What is missing is written into the text as typed, or into the prepared one where that has another order. */

@@ -37,7 +37,14 @@ export interface UnderstoodName {
   readonly readings: readonly Reading[];
   /** True number of readings when listing was cut at the cap, or undefined. */
   readonly count?: number;
+  /** Looking for readings was given up at a bound, so that there are at least as many as `count` says. */
+  readonly atLeast?: true;
   readonly remarks: readonly NameRemark[];
+}
+
+/** How many readings a name has, in words: `3`, or `at least 210`. */
+export function countInWords({ readings, count, atLeast }: UnderstoodName): string {
+  return `${atLeast === true ? 'at least ' : ''}${String(count ?? readings.length)}`;
 }
 
 /** A name for something that is a mixture by nature (`hexanes`, `brine`, a solution). */

@@ -24,6 +24,9 @@ export interface Meanings {
   readonly failure: { range: TextRange; message: string } | undefined;
 }
 
+const wrongParent =
+  'Wherever these groups stand, the compound is named after a longer chain. Give locants, or name it after that chain.';
+
 /** Builds every sentence in every way, up to `buildLimit` structures; the cheapest understandings are kept. */
 export function meaningsOf(sentences: readonly (readonly Part[])[], buildLimit: number): Meanings {
   let best = Number.POSITIVE_INFINITY;
@@ -47,8 +50,12 @@ export function meaningsOf(sentences: readonly (readonly Part[])[], buildLimit: 
           failure = draft.failure;
         continue;
       }
-      if (draft.cost > best || draft.chains.some((chain) => chain.open && !isLongestChain(chain, draft)))
+      if (draft.cost > best) continue;
+      const short = draft.chains.find((chain) => chain.open && !isLongestChain(chain, draft));
+      if (short) {
+        failure ??= { range: short.range, message: wrongParent };
         continue;
+      }
       if (draft.cost < best) {
         best = draft.cost;
         found = [];

@@ -16,7 +16,7 @@ export function unknownName(
 ): UnknownName {
   const place = (offset: number) =>
     Math.min(prepared.origin[Math.min(offset, prepared.text.length)] ?? original.length, original.length);
-  if (failure) {
+  if (failure && !reader.exhausted) {
     const range = ordered(place(failure.range.start), place(failure.range.end));
     return { kind: 'unknown', stoppedAt: range.start, range, message: failure.message, suggestions: [] };
   }
@@ -29,7 +29,7 @@ export function unknownName(
   const word = prepared.lower.slice(start, end);
   const range = ordered(place(start), place(end));
   const message = reader.exhausted
-    ? 'This name can be cut in so many ways that reading it was given up.'
+    ? `This name can be cut in so many ways that reading it was given up after ${String(reader.stepLimit)} steps.`
     : word === ''
       ? 'The name ends before it names a compound. Something is missing at its end.'
       : `“${original.slice(range.start, range.end)}” is not understood here. Check the spelling, or give the structure as SMILES.`;

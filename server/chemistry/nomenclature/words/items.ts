@@ -75,7 +75,7 @@ export class ItemReader {
   #findStretches(offset: number): Stretch[] {
     const found: Stretch[] = [];
     for (const row of this.rowsAt(offset)) {
-      const made = structured(row.items, this.name);
+      const made = structured(row.items, this.name, this);
       if (made) found.push({ ...made, end: row.end });
       const link = /[([]/.test(this.name.text[offset - 1] ?? '') ? chainOfLinks(row.items) : undefined;
       if (link) found.push({ unit: link, count: 1, role: 'radical', end: row.end });

@@ -17,11 +17,23 @@ export interface Structured {
   readonly role: 'radical' | 'parent' | 'derivative';
 }
 
+/** Steps counted over a whole name; a row without brackets can be nested in more ways than anyone can try. */
+export interface Effort {
+  steps: number;
+  readonly exhausted: boolean;
+}
+
 /** The unit that a row means, or undefined when the pieces do not go together. */
-export function structured(row: readonly Item[], name: PreparedName, depth = 0): Structured | undefined {
-  if (depth > 60) return undefined;
+export function structured(
+  row: readonly Item[],
+  name: PreparedName,
+  effort: Effort,
+  depth = 0,
+): Structured | undefined {
+  effort.steps++;
+  if (effort.exhausted || depth > 60) return undefined;
   const nestedAs = (inner: readonly Item[]): Unit | undefined => {
-    const made = structured(inner, name, depth + 1);
+    const made = structured(inner, name, effort, depth + 1);
     return made?.count === 1 && made.role === 'radical' ? made.unit : undefined;
   };
   const items = residuesJoined(withLinksJoined(row), nestedAs);
