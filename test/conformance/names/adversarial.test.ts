@@ -1,4 +1,7 @@
-/** No name takes more than a bounded number of steps, whatever it is made of; where the bound is met, that is said. */
+/**
+ * No name takes more than a bounded number of steps, whatever it is made of; where the bound is met, that is said. A name
+ * without bound would not come back at all, so no time is asserted here; `adversarial.bench.ts` prints it.
+ */
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { createNameReader, readName } from '../../../server/chemistry/nomenclature/read-name.ts';
@@ -29,13 +32,10 @@ function isHonest(text: string, reading: NameReading): void {
 }
 
 describe('names made to be hard', () => {
-  test.each(adversarialNames)('%s', (_family, name) => {
-    for (const size of [1, 3, 10, 30, 60]) {
+  test.each(adversarialNames)('%s', { timeout: 60_000 }, (_family, name) => {
+    for (const size of [1, 3, 10, 60]) {
       const text = name(size);
-      // Generous, so that a busy machine does not fail it; what is bounded is the number of steps.
-      const start = performance.now();
       isHonest(text, reader.readName(text));
-      expect([size, performance.now() - start < 5000]).toEqual([size, true]);
     }
   });
 

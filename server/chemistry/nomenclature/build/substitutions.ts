@@ -51,7 +51,15 @@ export function placeSubstitution(
     if (!given) {
       // Like groups are not told apart: each goes to the same place as the one before it, or further on.
       const order = [...places.named()];
-      const options = openPlaces(built, draft, before, free).filter((atom) => order.indexOf(atom) >= from);
+      const left = substitution.count - index;
+      const room = (sides: boolean) => {
+        const open = openPlaces(built, draft, before, free, sides);
+        const further = open.filter((atom) => order.indexOf(atom) >= from);
+        return withRoom(further, draft, free.order, left);
+      };
+      // Octafluorotoluene has more groups than the ring takes.
+      const onParent = room(false);
+      const options = onParent.length > 0 ? onParent : room(true);
       if (options.length === 0) {
         draft.fail(substitution.range, 'There is no place left on the parent for this group.');
         return false;
@@ -121,13 +129,14 @@ export function openPlaces(
   draft: Draft,
   before: number,
   free: { atom: number; order: number },
+  sides = false,
 ): number[] {
   const { places } = built;
   const carbon = draft.atoms[free.atom]!.atomicNumber === 6;
   return [...places.named()].filter((atom) => {
     if (atom >= before || (places.spent.has(atom) && places.atoms.length > 1)) return false;
     // Greek locants mark side chains (toluene, acetophenone), which a bare prefix does not mean.
-    if (/^[α-ω]/.test(places.locantOf(atom)!)) return false;
+    if (!sides && /^[α-ω]/.test(places.locantOf(atom)!)) return false;
     const element = draft.atoms[atom]!.atomicNumber;
     const alone = places.atoms.length === 1 && places.atoms[0] === atom;
     if ((element === 8 || element === 16 || element === 34) && !alone) return false;
@@ -138,6 +147,17 @@ export function openPlaces(
     const spare = (usual ? draft.free(atom) : draft.freeBesideRing(atom)) - valence;
     return spare >= free.order;
   });
+}
+
+/** Places from which on there is room for so many groups: `octadecafluorooctane` is not tried in every way that fails. */
+function withRoom(places: readonly number[], draft: Draft, order: number, count: number): number[] {
+  let room = 0;
+  let first = places.length;
+  while (first > 0 && room < count) {
+    const atom = places[--first]!;
+    room += Math.max(1, Math.floor(draft.freeBesideRing(atom) / order));
+  }
+  return room < count ? [] : places.slice(0, first + 1);
 }
 
 /** Nitrogen of the parent itself (aniline, urea), or of an amide; that of an ending `amine` is always cited as N. */
