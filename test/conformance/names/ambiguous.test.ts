@@ -216,6 +216,7 @@ describe('constitutions', () => {
     ['trichloroethane', 2, '1,1,1 and 1,1,2'],
     ['tetrachloroethane', 2, 'as many as for the two hydrogens left'],
     ['octadecafluorooctane', 1, 'every hydrogen replaced'],
+    ['hexachlorotoluene', 10, 'one, two or three on the methyl group: 1 + 3 + 6 on the ring'],
     ['octafluorotoluene', 1, 'every hydrogen replaced, those of the methyl group as well'],
     ['heptafluoropropane', 2, 'the one hydrogen left at 1 or 2'],
     ['dibromotetrafluoroethane', 2, 'two bromines on one carbon or on two'],

@@ -30,6 +30,7 @@ export function placeSubstitution(
   if (given) places.fresh = false;
   const chosen: Locant[] = [];
   let offered = 0;
+  let sides = false;
   let from = 0;
   for (let index = 0; index < substitution.count; index++) {
     const before = draft.atoms.length;
@@ -52,14 +53,17 @@ export function placeSubstitution(
       // Like groups are not told apart: each goes to the same place as the one before it, or further on.
       const order = [...places.named()];
       const left = substitution.count - index;
-      const room = (sides: boolean) => {
+      const room = () => {
         const open = openPlaces(built, draft, before, free, sides);
         const further = open.filter((atom) => order.indexOf(atom) >= from);
         return withRoom(further, draft, free.order, left);
       };
-      // Octafluorotoluene has more groups than the ring takes.
-      const onParent = room(false);
-      const options = onParent.length > 0 ? onParent : room(true);
+      let options = room();
+      if (options.length === 0 && index === 0) {
+        // Octafluorotoluene has more groups than the ring takes.
+        sides = true;
+        options = room();
+      }
       if (options.length === 0) {
         draft.fail(substitution.range, 'There is no place left on the parent for this group.');
         return false;
