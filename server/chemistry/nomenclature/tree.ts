@@ -74,6 +74,8 @@ export interface StereoWord {
     | 'rel'
     | 'D'
     | 'L'
+    | '+'
+    | '-'
     | 'meso';
   readonly range: TextRange;
   /** The descriptors that were written together, with brackets and hyphen. */

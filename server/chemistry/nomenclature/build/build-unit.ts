@@ -8,8 +8,8 @@ import { buildJoint } from './joints.ts';
 import { properNumbering } from './numbering.ts';
 import { Places } from './places.ts';
 import { placeBonding, placeReplacement } from './replacements.ts';
-import { inSeries, isSeriesWord } from './series.ts';
 import { placeSideChains } from './side-chains.ts';
+import { inSeries, isBothEnantiomers, isSeriesWord, isSign } from './series.ts';
 import type { SkeletonGraph } from './skeleton.ts';
 import { placeSubstitution } from './substitutions.ts';
 import { placeUnsaturations } from './unsaturations.ts';
@@ -73,9 +73,14 @@ export function buildUnit(unit: Unit, draft: Draft, choices: Choices): BuiltUnit
   const unsaid = sibling ? places.atoms : places.chosen;
   if (unsaid.some((atom) => isOverfull(atom, draft))) return undefined;
   if (places.opened && places.given && isMisnumbered(unit, places)) draft.cost += misnumbered;
+  if (isBothEnantiomers(skeleton, unit.stereo)) {
+    const range = { start: unit.parentAt, end: unit.parentAt };
+    draft.loose.push({ atoms, word: { letter: 'rac', range, whole: range } });
+  }
   for (const word of unit.stereo) {
+    if (isSign(word)) continue;
     if (isSeriesWord(word)) {
-      if (skeleton.series === true) continue;
+      if (skeleton.series === true || skeleton.rotation !== undefined) continue;
       return draft.fail(
         word.range,
         `“${word.letter}” does not say the arrangement of this parent. Give R or S.`,

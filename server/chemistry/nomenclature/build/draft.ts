@@ -3,6 +3,7 @@ import { usualValences } from '../../structure/valence-model.ts';
 import type { TextRange } from '../../text.ts';
 import type { Locant, StereoWord } from '../tree.ts';
 import type { StereoElement } from '../../structure/molecule.ts';
+import { OPEN_LIGAND } from './open-skeleton.ts';
 import type { SkeletonGraph } from './skeleton.ts';
 
 export interface DraftAtom {
@@ -93,6 +94,20 @@ export class Draft {
     const bond = this.bonds.push({ from, to, order }) - 1;
     this.neighbours[from]!.push({ atom: to, bond });
     this.neighbours[to]!.push({ atom: from, bond });
+    this.#fillLigand(from, to);
+    this.#fillLigand(to, from);
+  }
+
+  /** A stereocentre that waited for what its group is bound to. */
+  #fillLigand(centre: number, ligand: number): void {
+    const place = this.stereo.findIndex(
+      (element) =>
+        element.kind === 'tetrahedral' && element.centre === centre && element.ligands.includes(OPEN_LIGAND),
+    );
+    const element = this.stereo[place];
+    if (element?.kind !== 'tetrahedral') return;
+    const ligands = element.ligands.map((one) => (one === OPEN_LIGAND ? ligand : one));
+    this.stereo[place] = { ...element, ligands: ligands as unknown as typeof element.ligands };
   }
 
   orderSum(atom: number): number {

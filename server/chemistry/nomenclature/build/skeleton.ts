@@ -26,6 +26,8 @@ export interface SkeletonGraph {
   readonly stereo: readonly StereoElement[];
   /** The stereocentres are those of the L form; without `L-` or `D-` before the name they are open. */
   readonly series?: boolean;
+  /** The stereocentres are those of the enantiomer with this sign; without a sign both enantiomers are meant. */
+  readonly rotation?: '+' | '-';
   /** Not what the rules give, but met: meant only where nothing cheaper can be built. */
   readonly cost?: number;
   /** Written in front of the parent's name to tell it from its siblings: `o-`, `m-`, `p-`. */

@@ -182,7 +182,6 @@ export const parents: readonly ParentLine[] = [
   ['coumarin', 'O=c1ccc2ccccc2o1', '- 2 3 4 4a 5 6 7 8 8a 1'],
   ['thymol', 'Cc1ccc(C(C)C)c(O)c1', ''],
   ['carvacrol', 'Cc1ccc(C(C)C)cc1O', ''],
-  ['camphor', 'CC1(C)C2CCC1(C)C(=O)C2', ''],
   ['ε-caprolactam', 'O=C1CCCCCN1', ''],
   ['caprolactam', 'O=C1CCCCCN1', ''],
   ['furfural', 'O=Cc1ccco1', '- - 2 3 4 5 -'],

@@ -1,5 +1,6 @@
 /** All words of the vocabulary in one trie, so that every word that begins at a place is found in a single walk. */
 import { chain, skeletonFromSmiles, type SkeletonGraph } from '../build/skeleton.ts';
+import { openSkeleton } from '../build/open-skeleton.ts';
 import type { SuffixEntry } from '../tree.ts';
 import { derivativeWords } from '../vocabulary/class-words.ts';
 import { anions } from '../vocabulary/functions.ts';
@@ -19,6 +20,7 @@ import { replacementPrefixes } from '../vocabulary/replacements.ts';
 import { links, linkingToo, ringLinks } from '../vocabulary/links.ts';
 import { namedRing, ringNames } from '../rings/named-rings.ts';
 import { suffixes } from '../vocabulary/suffixes.ts';
+import { terpeneGroups, terpenes } from '../vocabulary/terpenes.ts';
 
 export type Word =
   | { kind: 'multiplier'; count: number; grouped: boolean }
@@ -149,6 +151,7 @@ export function createLexicon(): Lexicon {
     });
   }
   putAminoAcids(put);
+  putTerpenes(put);
   putParents(put);
   for (const line of acids) {
     const skeletons = lazily(() => [withSeries(skeletonFromSmiles(line[2], line[3]))]);
@@ -189,6 +192,19 @@ function putLinks(put: (word: string, value: Word) => void): void {
       skeletons: lazily(() => [chain(size)]),
       links: [0, size - 1],
     });
+}
+
+function putTerpenes(put: (word: string, value: Word) => void): void {
+  const signed = (skeleton: SkeletonGraph | undefined, sign: '+' | '-' | '') =>
+    skeleton && sign !== '' ? { ...skeleton, rotation: sign } : skeleton;
+  for (const [name, smiles, locants, sign] of terpenes) {
+    const skeletons = lazily(() => [signed(skeletonFromSmiles(smiles, locants), sign)]);
+    put(name, { kind: 'parent', skeletons, extensible: false });
+  }
+  for (const [name, smiles, locants, sign] of terpeneGroups) {
+    const skeletons = lazily(() => [signed(openSkeleton(smiles, locants), sign)]);
+    put(name, { kind: 'radical', order: 1, skeletons });
+  }
 }
 
 /** Acids with stereocentres have D and L forms. */

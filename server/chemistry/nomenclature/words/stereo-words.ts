@@ -14,7 +14,7 @@ const single = new RegExp(`^(\\d+[a-z]?'*|[NSP](?=[RSEZ]))?-?(${letters})$`);
 const word =
   /(?:(all)-)?(cis|trans|exo|endo|rac|rel|meso|[EZ]|dl|DL|[DLdl])((?:,(?:cis|trans|E|Z))*)-|\(((?:\+|-|±|\+\/-|\+-|cis|trans|exo|endo|meso|dl|DL|d|l|rac|rel))\)-/y;
 
-/** Descriptors at the offset. The sign of rotation says nothing of structure. */
+/** Descriptors at the offset; the sign of rotation too, which says something only before names that it belongs to. */
 export function stereoAt(text: string, offset: number): Written<StereoWord[]> | undefined {
   return inBrackets(text, offset) ?? asWord(text, offset);
 }
@@ -62,7 +62,10 @@ function asWord(text: string, offset: number): Written<StereoWord[]> | undefined
   const whole = { start: offset, end };
   const range = { start: offset, end: end - 1 };
   const letter = match[2] ?? match[4]!;
-  if (match[4] !== undefined && /^(?:\+|-|d|l)$/.test(letter)) return { value: [], end };
+  if (match[4] !== undefined && /^[+\-dl]$/.test(letter)) {
+    const sign = letter === '+' || letter === 'd' ? '+' : '-';
+    return { value: [{ letter: sign, range, whole }], end };
+  }
   if (/^(?:±|\+\/-|\+-|dl)$/i.test(letter)) return { value: [{ letter: 'rac', range, whole }], end };
   const all = match[1] === undefined ? {} : { all: true };
   const more = match[3] === undefined || match[3] === '' ? [] : match[3].slice(1).split(',');
