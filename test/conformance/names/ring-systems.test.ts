@@ -168,3 +168,37 @@ describe('ring assemblies', () => {
     },
   );
 });
+
+describe('bridged fused systems', () => {
+  meansExactly([
+    ['P-25.4.2.1', '1,4-dihydro-1,4-methanonaphthalene', 'C1C2C=CC1c1ccccc12'],
+    ['P-25.4.2.1', '1,2,3,4-tetrahydro-1,4-methanonaphthalene', 'C1CC2CC1c1ccccc12'],
+    ['P-25.4.2.1', '1,4-dihydro-1,4-epoxynaphthalene', 'C1=CC2OC1c1ccccc12'],
+    ['P-25.4.2.1', '9,10-dihydro-9,10-ethanoanthracene', 'C1CC2c3ccccc3C1c1ccccc12'],
+    ['P-25.4.2.1', '9,10-dihydro-9,10-[1,2]benzenoanthracene', 'c1ccc2c(c1)C1c3ccccc3C2c2ccccc12'],
+    ['P-25.4.2.1', '4a,8a-propanoquinoline', 'C1CC23C=CC=CC2(C1)N=CC=C3'],
+    ['P-25.4.2.1', '1,2,3,4-tetrahydro-1,4-epiminonaphthalene', 'C1CC2NC1c1ccccc12'],
+    ['1979 rules A-34', '3a,4,7,7a-tetrahydro-1H-4,7-methanoindene', 'C1C=CC2C1C1CC2C=C1'],
+    ['1979 rules A-34', '3a,4,7,7a-tetrahydro-4,7-methano-1H-indene', 'C1C=CC2C1C1CC2C=C1'],
+    ['1979 rules A-34', 'octahydro-4,7-methano-1H-indene', 'C1CC2C(C1)C1CC2CC1'],
+    ['from memory', '2,3,4,5-tetrahydro-1H-1,5-methano-3-benzazepine', 'C1NCC2CC1c1ccccc12'],
+    ['from memory', '3a,4,7,7a-tetrahydro-4,7-epoxyisobenzofuran-1,3-dione', 'O=C1OC(=O)C2C1C1OC2C=C1'],
+    // The bridge with chlorine is 10, because numbering begins at bridgehead 8.
+    [
+      'from memory',
+      '1,2,3,4,10,10-hexachloro-1,4,4a,5,8,8a-hexahydro-1,4:5,8-dimethanonaphthalene',
+      'ClC1=C(Cl)C2(Cl)C3C4CC(C=C4)C3C1(Cl)C2(Cl)Cl',
+    ],
+    [
+      'from memory',
+      '1,4,5,6,7,8,8-heptachloro-3a,4,7,7a-tetrahydro-4,7-methano-1H-indene',
+      'ClC1C=CC2C1C1(Cl)C(Cl)=C(Cl)C2(Cl)C1(Cl)Cl',
+    ],
+  ]);
+  test.each([
+    ['a bridgehead that is not there', '1,9-methanonaphthalene'],
+    ['a single ring', '1,4-methanobenzene'],
+  ])('%s: %s', (_, name) => {
+    expect(readName(name).kind).toBe('unknown');
+  });
+});

@@ -1,5 +1,6 @@
 /** Ring names made by rule, one reader for each kind; the only place where they are called from. */
 import type { SkeletonAtom, SkeletonGraph } from '../build/skeleton.ts';
+import { bridgedFusedAt } from '../rings/bridged-fused.ts';
 import { fusionNamesAt } from '../rings/fusion-names.ts';
 import { hantzschWidmanAt } from '../rings/hantzsch-widman.ts';
 import { ringAssembliesAt } from '../rings/ring-assemblies.ts';
@@ -27,6 +28,8 @@ const readers: readonly RingNameReader[] = [
   (_, lower, offset) => fusionNamesAt(lower, offset),
   // P-24.3 to P-24.6
   (_, lower, offset, components) => spiroNamesAt(lower, offset, components),
+  // P-25.4
+  (_, lower, offset, components) => bridgedFusedAt(lower, offset, components),
   // P-28
   (_, lower, offset, components) => ringAssembliesAt(lower, offset, components),
 ];
