@@ -10,10 +10,11 @@ import { arrangedReading } from './arrange.ts';
 import { knownReading } from './known-readings.ts';
 import { isLongestChain } from './build/proper-chain.ts';
 import { improperRemark, properAlkaneName } from './proper-name.ts';
+import { aminoAcids } from './vocabulary/amino-acids.ts';
 import { unknownName } from './unknown.ts';
 import { ItemReader } from './words/items.ts';
 import { createLexicon, type Lexicon } from './words/lexicon.ts';
-import { prepareName, type PreparedName } from './words/prepared.ts';
+import { prepareName, rejoined, type PreparedName } from './words/prepared.ts';
 import { sentences } from './words/sentence.ts';
 
 export interface NameLimits {
@@ -47,6 +48,9 @@ export function vocabularyWords(): readonly string[] {
 /** Structures built for one name at most. */
 const buildLimit = 1000;
 
+/** A group before such a word is mostly that of an ester. */
+const aminoAcidNames: ReadonlySet<string> = new Set(aminoAcids.map(([name]) => name));
+
 /** Names longer than this are not read. */
 const longestName = 1500;
 
@@ -68,19 +72,28 @@ function read(
   depth = 0,
 ): NameReading {
   const tooLong = text.length > longestName;
-  const prepared = prepareName(tooLong ? '' : text);
-  if (prepared.text === '') {
+  const written = prepareName(tooLong ? '' : text);
+  if (written.text === '') {
     const message = tooLong
       ? `This name is too long to be read: names of up to ${String(longestName)} characters are.`
       : 'There is no name here.';
     return { kind: 'unknown', stoppedAt: 0, range: { start: 0, end: text.length }, message, suggestions: [] };
   }
   const readOther = (other: string) => read(other, limits, lexicon, common, depth + 1);
-  const known = knownReading(text, prepared, common, limits, readOther, depth);
+  const known = knownReading(text, written, common, limits, readOther, depth);
   if (known) return known;
-  const reader = new ItemReader(prepared, lexicon, limits.steps ?? 4000);
-  const found = sentences(reader);
-  const { meanings, complete, failure } = meaningsOf(found, Math.min(limits.steps ?? 4000, buildLimit));
+  const attempt = (name: PreparedName) => {
+    const reader = new ItemReader(name, lexicon, limits.steps ?? 4000);
+    return { name, reader, ...meaningsOf(sentences(reader), Math.min(limits.steps ?? 4000, buildLimit)) };
+  };
+  const first = attempt(written);
+  const other =
+    first.meanings.length === 0 && !first.reader.exhausted ? rejoined(written, aminoAcidNames) : undefined;
+  const joined = other && attempt(other);
+  // Putting words together is an assumption already: it holds only when a single compound comes of it.
+  const second =
+    joined?.meanings.length === 1 && joined.complete && !joined.reader.exhausted ? joined : undefined;
+  const { name: prepared, reader, meanings, complete, failure } = second ?? first;
   // What was found before a bound was met is not all that the name can mean: one reading would be a guess.
   const given = reader.exhausted || (!complete && meanings.length < 2);
   if (given || meanings.length === 0) {

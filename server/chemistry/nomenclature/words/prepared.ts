@@ -2,6 +2,7 @@
  * A name made ready for reading: one spelling for dashes, primes and spaces, inverted index names turned round, and for
  * every character the place it came from, so that ranges still point into what was typed.
  */
+import { respellings, wrongSpaces } from './spelling.ts';
 import type { TextRange } from '../../text.ts';
 
 export interface PreparedName {
@@ -90,6 +91,7 @@ const paired = /\b(?:cis|trans|[EZ])-\d{1,2}(?:,(?:cis|trans|[EZ])-\d{1,2})+-/g;
 /** Applies the spellings that change the length: `sulph`, `.alpha.`, `alpha-`, and inverted names. */
 function settle(name: PreparedName): PreparedName {
   let result = name;
+  for (const [pattern, replacement] of respellings) result = replaceAll(result, pattern, replacement);
   if (name.lower.includes('sulph')) result = replaceAll(result, /sulph/gi, () => 'sulf');
   result = replaceAll(
     result,
@@ -128,21 +130,23 @@ function withBondingNumbers(name: PreparedName): PreparedName {
 function replaceAll(
   name: PreparedName,
   pattern: RegExp,
-  replacement: (match: string) => string,
+  replacement: (match: string, at: number) => string,
 ): PreparedName {
   let text = '';
   const origin: number[] = [];
   let last = 0;
+  let found = false;
   for (const match of name.text.matchAll(pattern)) {
+    found = true;
     text += name.text.slice(last, match.index);
     origin.push(...name.origin.slice(last, match.index));
-    for (const character of replacement(match[0])) {
+    for (const character of replacement(match[0], match.index)) {
       text += character;
       origin.push(name.origin[match.index]!);
     }
     last = match.index + match[0].length;
   }
-  if (last === 0) return name;
+  if (!found) return name;
   text += name.text.slice(last);
   for (const place of name.origin.slice(last)) origin.push(place);
   return { text, lower: text.toLowerCase(), origin };
@@ -193,4 +197,11 @@ function segmentsOf(text: string): TextRange[] {
     }
   }
   return found;
+}
+
+/** The name with words put together that were written apart; undefined when there are none. */
+export function rejoined(name: PreparedName, aminoAcids: ReadonlySet<string>): PreparedName | undefined {
+  const spaces = wrongSpaces(name.lower, aminoAcids);
+  if (!spaces) return undefined;
+  return replaceAll(name, / /g, (space, at) => spaces.get(at) ?? space);
 }
