@@ -52,6 +52,8 @@ export function ringBondKey(first: number, second: number): number {
   return first < second ? first * 0x100000 + second : second * 0x100000 + first;
 }
 
+const mostBondsOfMetal = 8;
+
 export class Draft {
   readonly atoms: DraftAtom[] = [];
   readonly bonds: { from: number; to: number; order: number }[] = [];
@@ -75,6 +77,8 @@ export class Draft {
   readonly ringBonds = new Set<number>();
   /** Atoms whose bonding number the name gives (P-14.1). */
   readonly bonded = new Set<number>();
+  /** Metal atoms, which bear no hydrogen, and the numbers of bonds that they can have. */
+  readonly metals = new Map<number, readonly number[]>();
   cost = 0;
   failure: { range: TextRange; message: string } | undefined;
 
@@ -149,6 +153,7 @@ export class Draft {
       }
     }
     skeleton.atoms.forEach((atom, index) => {
+      if (atom.metal) this.metals.set(added[index]!, atom.metal);
       if (atom.bonds !== undefined) this.setBonds(added[index]!, atom.bonds);
       else this.settleCapacity(added[index]!, atom.hydrogens);
     });
@@ -166,6 +171,10 @@ export class Draft {
   /** `more`: bonds that are still to come and must fit. */
   settleCapacity(atom: number, hydrogens?: number, more = 0): void {
     const own = this.atoms[atom]!;
+    if (this.metals.has(atom)) {
+      own.capacity = mostBondsOfMetal;
+      return;
+    }
     const used = this.orderSum(atom) + more;
     own.capacity =
       hydrogens === undefined

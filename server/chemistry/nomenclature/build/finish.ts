@@ -10,7 +10,10 @@ export function finished(draft: Draft, choices: Choices, whole: TextRange): Mole
   if (!placeDoubleBonds(draft, choices, whole)) return undefined;
   const builder = new MoleculeBuilder();
   for (const [index, atom] of draft.atoms.entries()) {
-    const hydrogens = atom.capacity - draft.orderSum(index);
+    const metal = draft.metals.get(index);
+    if (metal && !isFilled(metal, draft.orderSum(index)))
+      return draft.fail(atom.range, 'This metal does not have that number of bonds. Check the groups on it.');
+    const hydrogens = metal ? 0 : atom.capacity - draft.orderSum(index);
     if (hydrogens < 0)
       return draft.fail(atom.range, 'An atom here has more bonds than it can have. Check the locants.');
     builder.addAtom(atom.atomicNumber, {
@@ -23,6 +26,10 @@ export function finished(draft: Draft, choices: Choices, whole: TextRange): Mole
   for (const bond of draft.bonds) builder.addBond(bond.from, bond.to, bond.order as BondOrder);
   builder.stereo.push(...draft.stereo);
   return builder.build();
+}
+
+function isFilled(bonds: readonly number[], used: number): boolean {
+  return bonds.length > 0 ? bonds.includes(used) : used > 0;
 }
 
 function placeDoubleBonds(draft: Draft, choices: Choices, whole: TextRange): boolean {

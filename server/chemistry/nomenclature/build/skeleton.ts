@@ -14,6 +14,8 @@ export interface SkeletonAtom {
   readonly hydrogens?: number;
   /** Bonding number where the name gives another than the usual (λ convention, P-14.1). */
   readonly bonds?: number;
+  /** Numbers of bonds of a metal atom whose groups the name lists; none given where any is possible. */
+  readonly metal?: readonly number[];
 }
 
 export interface SkeletonGraph {
@@ -65,6 +67,12 @@ function carbonSkeleton(size: number, bonds: SkeletonGraph['bonds']): SkeletonGr
 export function ring(size: number): SkeletonGraph {
   const open = chain(size);
   return { ...open, kind: 'ring', bonds: [...open.bonds, { from: 0, to: size - 1, order: 1 }] };
+}
+
+/** A metal atom without hydrogens, which takes as many bonds as the name says, of the numbers given. */
+export function metalSkeleton(symbol: string, bonds: readonly number[]): SkeletonGraph | undefined {
+  const skeleton = skeletonFromSmiles(`[${symbol}]`, symbol);
+  return skeleton && { ...skeleton, atoms: skeleton.atoms.map((atom) => ({ ...atom, metal: bonds })) };
 }
 
 /**

@@ -36,7 +36,8 @@ export function buildGroups(
     for (let copy = 0; copy < radical.count; copy++) {
       const built = buildWord(radical.unit, draft, choices, radical.count);
       if (!built || built.free.length === 0) return undefined;
-      groups.push({ free: built.free, site: radical.site });
+      const other = radical.site?.others?.[copy - 1];
+      groups.push({ free: built.free, site: other ? { element: other } : radical.site });
     }
   }
   return groups;

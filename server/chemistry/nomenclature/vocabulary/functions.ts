@@ -96,7 +96,7 @@ export const anions: readonly (readonly [word: string, smiles: string, locants: 
   ['phosphit', '[O-]P([O-])[O-]', '@ - @ @'],
   ['borat', '[O-]B([O-])[O-]', '@ - @ @'],
   ['phosphonat', '[O-]P(=O)[O-]', '@ P - @'],
-  ['phosphinat', '[O-]P=O', '@ P -'],
+  ['phosphinat', '[O-][PH2]=O', '@ P -'],
   ['orthosilicat', '[O-][Si]([O-])([O-])[O-]', '@ - @ @ @'],
   ['silicat', '[O-][Si]([O-])([O-])[O-]', '@ - @ @ @'],
   ['hypochlorit', '[O-]Cl', '@'],

@@ -1,5 +1,5 @@
 /** All words of the vocabulary in one trie, so that every word that begins at a place is found in a single walk. */
-import { chain, skeletonFromSmiles, type SkeletonGraph } from '../build/skeleton.ts';
+import { chain, metalSkeleton, skeletonFromSmiles, type SkeletonGraph } from '../build/skeleton.ts';
 import { openSkeleton } from '../build/open-skeleton.ts';
 import type { SuffixEntry } from '../tree.ts';
 import { derivativeWords } from '../vocabulary/class-words.ts';
@@ -17,6 +17,9 @@ import {
   simplePrefixes,
 } from '../vocabulary/prefixes.ts';
 import { replacementPrefixes } from '../vocabulary/replacements.ts';
+import { hydrides } from '../vocabulary/hydrides.ts';
+import { metals } from '../vocabulary/metals.ts';
+import { mineralAcids, mineralAnions } from '../vocabulary/mineral-acids.ts';
 import { links, linkingToo, ringLinks } from '../vocabulary/links.ts';
 import { namedRing, ringNames } from '../rings/named-rings.ts';
 import { suffixes } from '../vocabulary/suffixes.ts';
@@ -158,7 +161,11 @@ export function createLexicon(): Lexicon {
     put(line[0], { kind: 'acid', line, form: 'acid', skeletons });
     if (line[1] !== '') put(line[1], { kind: 'acid', line, form: 'other', skeletons });
   }
-  for (const [name, smiles, locants] of anions) {
+  for (const [names, symbol, bonds] of metals) {
+    const skeletons = lazily(() => [metalSkeleton(symbol, bonds)]);
+    for (const name of names.split('|')) put(name, { kind: 'parent', skeletons, extensible: false });
+  }
+  for (const [name, smiles, locants] of [...anions, ...mineralAnions]) {
     put(name, {
       kind: 'parent',
       skeletons: lazily(() => [skeletonFromSmiles(smiles, locants)]),
@@ -248,7 +255,10 @@ const otherNumberingCost = 5;
 function putParents(put: (word: string, value: Word) => void): void {
   const byName = new Map<string, (readonly [string, string, string, string?])[]>();
   const partly = new Set(partlySaturatedRings.map(([name]) => name));
-  for (const line of [...parents, ...partlySaturatedRings, ...ringsWithGroups])
+  const known = new Set(parents.map(([name]) => name));
+  const more = hydrides.filter(([name]) => !known.has(name));
+  const grown = new Set(more.map(([name]) => name));
+  for (const line of [...parents, ...partlySaturatedRings, ...ringsWithGroups, ...more, ...mineralAcids])
     byName.set(line[0], [...(byName.get(line[0]) ?? []), line]);
   const long: Readonly<Record<string, string>> = { 'o-': 'ortho-', 'm-': 'meta-', 'p-': 'para-' };
   for (const [name, lines] of byName) {
@@ -258,7 +268,7 @@ function putParents(put: (word: string, value: Word) => void): void {
         return [skeleton && line[3] !== undefined ? { ...skeleton, mark: line[3] } : skeleton];
       }),
     );
-    const extensible = extensibleParents.has(name) || partly.has(name);
+    const extensible = extensibleParents.has(name) || partly.has(name) || grown.has(name);
     const others = lazily(() =>
       otherNumberings
         .filter((line) => line[0] === name)

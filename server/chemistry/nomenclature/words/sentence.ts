@@ -10,6 +10,8 @@ import { numericalTerm } from '../vocabulary/numbers.ts';
 export interface Site {
   readonly element: 'O' | 'S';
   readonly position?: number;
+  /** `O,S-dimethyl`: the elements of the further groups. */
+  readonly others?: readonly ('O' | 'S')[];
 }
 
 export type Part =
@@ -51,7 +53,7 @@ export type Part =
     };
 
 const sentenceCap = 16;
-const siteWord = /(?:(\d+)-)?([OS])(\d*)-/y;
+const siteWord = /(?:(\d+)-)?([OS])((?:,[OS])*)(\d*)-/y;
 const multiples: readonly (readonly [string, number])[] = [
   ...[2, 3, 4, 5, 6].map((count) => [numericalTerm(count), count] as const),
   ['mono', 1],
@@ -96,13 +98,15 @@ function* partsAt(reader: ItemReader, offset: number): Generator<Part & { end: n
   siteWord.lastIndex = offset;
   const word = siteWord.exec(reader.name.text);
   if (word) {
-    const position = word[1] ?? (word[3] === '' ? undefined : word[3]);
+    const position = word[1] ?? (word[4] === '' ? undefined : word[4]);
+    const others = word[3]!.split(',').slice(1) as Site['element'][];
     const site: Site = {
-      element: word[2] as 'O' | 'S',
+      element: word[2] as Site['element'],
+      ...(others.length > 0 ? { others } : {}),
       ...(position === undefined ? {} : { position: Number(position) }),
     };
     for (const stretch of reader.stretchesAt(siteWord.lastIndex)) {
-      if (stretch.role === 'radical')
+      if (stretch.role === 'radical' && (others.length === 0 || stretch.count === others.length + 1))
         yield { kind: 'stretch', stretch, start: offset, site, end: stretch.end };
     }
   }
