@@ -11,7 +11,9 @@ export function finished(draft: Draft, choices: Choices, whole: TextRange): Mole
   const builder = new MoleculeBuilder();
   for (const [index, atom] of draft.atoms.entries()) {
     const metal = draft.metals.get(index);
-    if (metal && !isFilled(metal, draft.orderSum(index)))
+    // `oxido` on a metal is the ligand of additive names, drawn without charge (Red Book IR-7.1).
+    const charged = draft.neighbours[index]!.some((one) => draft.atoms[one.atom]!.charge !== 0);
+    if (metal && (charged || !isFilled(metal, draft.orderSum(index))))
       return draft.fail(atom.range, 'This metal does not have that number of bonds. Check the groups on it.');
     const hydrogens = metal ? 0 : atom.capacity - draft.orderSum(index);
     if (hydrogens < 0)
