@@ -17,7 +17,7 @@ export const adversarialNames: readonly (readonly [family: string, name: (size: 
   ['hydro', (size) => `${'hydro'.repeat(size)}naphthalene`],
   ['open halogens', (size) => `${'bromochlorofluoroiodo'.repeat(size)}anthracene`],
   ['open groups on a long chain', (size) => `bromochlorofluoroiodo${'methyl'.repeat(size)}icosane`],
-  ['a large open polyene', () => 'octadecatetraenoic acid'],
+  ['a large open polyene', () => 'icosahexaenoic acid'],
   ['a large open polyol', () => 'icosaneheptol'],
   ['dashes of every kind', (size) => '‐‑‒–—−'.repeat(size)],
   ['primes', (size) => `2${"'".repeat(size * 4)}-methylbiphenyl`],

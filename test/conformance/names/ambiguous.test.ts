@@ -206,6 +206,12 @@ describe('constitutions', () => {
     ['heptyne', 3, '1, 2, 3'],
     ['pentadiene', 4, 'published list: 1,2 1,3 1,4 2,3'],
     ['hexadiene', 6, 'published list: 1,2 1,3 1,4 1,5 2,3 2,4'],
+    ['hexatriene', 1, '1,3,5; three that touch each other are never left without locants'],
+    [
+      'octadecatetraenoic acid',
+      715,
+      'four of the sixteen bonds from 2 to 17, no two side by side: 13 over 4',
+    ],
     ['butadiene', 1, 'the trade means buta-1,3-diene (common practice, no source)'],
     ['chloropropane', 2, '1 and 2'],
     ['bromobutane', 2, '1 and 2'],

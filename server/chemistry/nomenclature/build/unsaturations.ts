@@ -36,7 +36,7 @@ export function placeUnsaturations(unit: Unit, places: Places, draft: Draft, cho
     for (let index = 0; index < count; index++) {
       // On a bare ring the first double bond is at position 1.
       const options = bondsOf(places, draft, order).filter(
-        (bond) => bond.position >= from && mayFollow(draft, bond, places),
+        (bond) => bond.position >= from && mayFollow(draft, bond, places, count),
       );
       const first =
         index === 0 && places.alike && unit.endings.every((ending) => ending.locants !== undefined);
@@ -90,12 +90,13 @@ function bondsOf(
 
 /**
  * Multiple bonds side by side are meant only along a chain: small rings hold none, and beside C=O it would be a ketene.
- * `butadiene` by itself is the 1,3 compound (common practice, no source); `pentadiene` is any of four.
+ * `butadiene` by itself is the 1,3 compound (common practice, no source); `pentadiene` is any of four. Three and more that
+ * touch each other are never left without locants.
  */
-function mayFollow(draft: Draft, bond: { from: number; to: number }, places: Places): boolean {
+function mayFollow(draft: Draft, bond: { from: number; to: number }, places: Places, count: number): boolean {
   const beside = [bond.from, bond.to].flatMap((atom) =>
     draft.neighbours[atom]!.filter((one) => draft.bonds[one.bond]!.order > 1),
   );
-  if (places.skeleton.kind !== 'chain' || places.atoms.length < 5) return beside.length === 0;
+  if (places.skeleton.kind !== 'chain' || places.atoms.length < 5 || count > 2) return beside.length === 0;
   return beside.every(({ atom }) => places.atoms.includes(atom));
 }
