@@ -28,6 +28,8 @@ export interface SkeletonGraph {
   readonly stereo: readonly StereoElement[];
   /** The stereocentres are those of the L form; without `L-` or `D-` before the name they are open. */
   readonly series?: boolean;
+  /** A name that takes groups only at places which it gives: hydroxycitronellal is no citronellal with a hydroxy group. */
+  readonly guarded?: boolean;
   /** The stereocentres are those of the enantiomer with this sign; without a sign both enantiomers are meant. */
   readonly rotation?: '+' | '-';
   /** Not what the rules give, but met: meant only where nothing cheaper can be built. */

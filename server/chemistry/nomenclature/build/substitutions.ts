@@ -49,6 +49,10 @@ export function placeSubstitution(
       return false;
     }
     let host = hosts[index];
+    if (!given && places.skeleton.guarded === true) {
+      draft.fail(substitution.range, 'This name takes groups only where their locants are given.');
+      return false;
+    }
     if (!given) {
       // Like groups are not told apart: each goes to the same place as the one before it, or further on.
       const order = [...places.named()];

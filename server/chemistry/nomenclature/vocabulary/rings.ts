@@ -107,7 +107,7 @@ export const rings: readonly RingLine[] = [
   ['acephenanthrylen', 'C1CC2CCCC3C4CCCCC4CC1C23', 'rule', 'm'],
   ['pleiaden', 'C1CCC2CC3CCCC4CCCC(CC2C1)C34', 'rule', 'm'],
   ['hydrindan', 'C1CCC2CCCCC12', '1 2 3 3a 4 5 6 7 7a'],
-  ['pyrrolizin', 'C1CCN2CCCC12', '1 2 3 4 5 6 7 7a', 'm'],
+  ['pyrrolizin', 'C1CCN2CCCC12', '1 2 3 4 5 6 7 7a/8', 'm'],
   ['quinolizin', 'C1CCCN2CCCCC12', '1 2 3 4 5 6 7 8 9 9a', 'm'],
   ['2,6-naphthyridin', 'C1NCCC2CNCCC12', '1 2 3 4 4a 5 6 7 8 8a', 'm'],
   ['2,7-naphthyridin', 'C1NCCC2CCNCC12', '1 2 3 4 4a 5 6 7 8 8a', 'm'],

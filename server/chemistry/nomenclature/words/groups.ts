@@ -41,12 +41,18 @@ export function groupsAt(text: string, lower: string, offset: number, lexicon: L
   const words = wordsAt(lexicon.words, lower, offset);
   const radicalEnds = new Set(words.filter((word) => word.value.kind === 'radical').map((word) => word.end));
   const retained = Math.max(0, ...words.filter((word) => isRetained(word.value)).map((word) => word.end));
+  const parentEnds = new Set(
+    words.filter(({ value, end }) => value.kind === 'parent' && lower[end] === 'e').map(({ end }) => end + 1),
+  );
   // The longest word first: `caproic acid` is of `capro`, not of `capr`.
   const acidEnds = new Set<number>();
   for (const word of words.reverse()) {
     // `thioxanthene` is a ring, not xanthene with `thio`.
     if (word.value.kind === 'radical' && word.value.linkAt !== undefined && word.end < retained) continue;
     let groups = groupsOf(word.value, text, lower, offset, word.end, lexicon);
+    // `fluorenone` is a name of its own, not fluorene with a ketone somewhere.
+    if (word.value.kind === 'ring' || word.value.kind === 'alkane')
+      groups = groups.filter(({ end, unit }) => !parentEnds.has(end) || unit.endings.every(isLocated));
     if (word.value.kind === 'acid') {
       groups = groups.filter((group) => !acidEnds.has(group.end));
       for (const group of groups) acidEnds.add(group.end);
@@ -89,6 +95,8 @@ export function groupsAt(text: string, lower: string, offset: number, lexicon: L
   found.push(...conjunctiveForms(found, text, lower, lexicon, acyclic));
   return found;
 }
+
+const isLocated = (ending: Ending): boolean => ending.locants !== undefined;
 
 function isRetained(word: Word): boolean {
   return word.kind === 'ring' || word.kind === 'parent';

@@ -7,6 +7,8 @@ import { anions } from '../vocabulary/functions.ts';
 import { acids, type AcidLine } from '../vocabulary/acids.ts';
 import { aminoAcids, type AminoAcidLine } from '../vocabulary/amino-acids.ts';
 import { alkaneStem, groupTerm, numericalTerm, numericalTermVariants } from '../vocabulary/numbers.ts';
+import { naturalAcids } from '../vocabulary/natural-acids.ts';
+import { naturalParents } from '../vocabulary/natural-parents.ts';
 import { extensibleParents, otherNumberings, parents } from '../vocabulary/parents.ts';
 import { partlySaturatedRings, ringsWithGroups } from '../vocabulary/partly-saturated-rings.ts';
 import {
@@ -156,7 +158,7 @@ export function createLexicon(): Lexicon {
   putAminoAcids(put);
   putTerpenes(put);
   putParents(put);
-  for (const line of acids) {
+  for (const line of [...acids, ...naturalAcids]) {
     const skeletons = lazily(() => [withSeries(skeletonFromSmiles(line[2], line[3]))]);
     put(line[0], { kind: 'acid', line, form: 'acid', skeletons });
     if (line[1] !== '') put(line[1], { kind: 'acid', line, form: 'other', skeletons });
@@ -203,7 +205,7 @@ function putLinks(put: (word: string, value: Word) => void): void {
 
 function putTerpenes(put: (word: string, value: Word) => void): void {
   const signed = (skeleton: SkeletonGraph | undefined, sign: '+' | '-' | '') =>
-    skeleton && sign !== '' ? { ...skeleton, rotation: sign } : skeleton;
+    skeleton && { ...skeleton, guarded: true, ...(sign === '' ? {} : { rotation: sign }) };
   for (const [name, smiles, locants, sign] of terpenes) {
     const skeletons = lazily(() => [signed(skeletonFromSmiles(smiles, locants), sign)]);
     put(name, { kind: 'parent', skeletons, extensible: false });
@@ -258,8 +260,8 @@ function putParents(put: (word: string, value: Word) => void): void {
   const known = new Set(parents.map(([name]) => name));
   const more = hydrides.filter(([name]) => !known.has(name));
   const grown = new Set(more.map(([name]) => name));
-  for (const line of [...parents, ...partlySaturatedRings, ...ringsWithGroups, ...more, ...mineralAcids])
-    byName.set(line[0], [...(byName.get(line[0]) ?? []), line]);
+  const lists = [parents, naturalParents, partlySaturatedRings, ringsWithGroups, more, mineralAcids];
+  for (const line of lists.flat()) byName.set(line[0], [...(byName.get(line[0]) ?? []), line]);
   const long: Readonly<Record<string, string>> = { 'o-': 'ortho-', 'm-': 'meta-', 'p-': 'para-' };
   for (const [name, lines] of byName) {
     const made = lines.map((line) =>
