@@ -35,6 +35,16 @@ test.each<[source: string, name: string, smiles: string]>([
   ['P-68.3.1.3.2', '4-[(E)-phenyldiazenyl]phenol', 'Oc1ccc(cc1)/N=N/c1ccccc1'],
   ['P-66.3.1', '2-[(E)-N-ethoxy-C-ethylcarbonimidoyl]phenol', 'CC/C(=N\\OCC)c1ccccc1O'],
   ['P-66.1.6.1.1.3', '3-(ethylcarbamoylamino)propanoic acid', 'CCNC(=O)NCCC(=O)O'],
+  // A metal with groups on it, then what else it is bound to.
+  ['P-69.2.2', 'methylmagnesium bromide', 'C[Mg]Br'],
+  ['P-69.2.2', '(4-methoxyphenyl)magnesium bromide', 'COc1ccc([Mg]Br)cc1'],
+  ['P-69.2.2', 'tributyltin chloride', 'CCCC[Sn](Cl)(CCCC)CCCC'],
+  ['P-69.2.2', 'tributyltin hydride', 'CCCC[SnH](CCCC)CCCC'],
+  ['P-69.2.2', 'diisobutylaluminium hydride', 'CC(C)C[AlH]CC(C)C'],
+  ['P-69.2.2', 'ethylaluminium dichloride', 'CC[Al](Cl)Cl'],
+  ['P-69.2.2', 'dibutyltin diacetate', 'CCCC[Sn](CCCC)(OC(C)=O)OC(C)=O'],
+  // Hydrogen goes where there is a double bond to take it up: not to N–H, not to C=O.
+  [practice, 'dihydrouracil', 'O=C1CCNC(=O)N1'],
 ])('%s: %s', (_, name, smiles) => {
   const reading = readName(name);
   if (reading.kind !== 'understood') throw new Error(`${name}: ${reading.message}`);
@@ -46,6 +56,7 @@ test.each<[source: string, name: string, smiles: string]>([
 test('one locant is not enough for two groups on the parent itself', () => {
   expect(readName('2-dimethylpropane').kind).toBe('unknown');
   expect(readName('1-dichlorobenzene').kind).toBe('unknown');
+  expect(readName('methylmagnesium dibromide').kind).toBe('unknown');
 });
 
 test('a salt keeps the charges that its name gives it', () => {

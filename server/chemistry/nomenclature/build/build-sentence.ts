@@ -9,6 +9,7 @@ import { buildAcidOrParent } from './esters.ts';
 import { buildAfterParent, isNeutral } from './after-parent.ts';
 import type { LocatedOxide } from './oxides.ts';
 import { buildFunctionalClass, type FunctionWord } from './functional-class.ts';
+import { buildOrganometallic, isOrganometallic } from './organometallics.ts';
 import { buildSalt, type Ion } from './salts.ts';
 import { addSmiles, type Word } from './words.ts';
 
@@ -101,6 +102,11 @@ function buildWords(words: Sorted, draft: Draft, choices: Choices): boolean {
     return radicals.length + ions === 0 && buildMixedAnhydride(parents[0]!, parents[1]!, draft, choices);
   if (words.classWord !== undefined || words.derivative || words.afters.length > 0)
     return buildAfterParent(words, draft, choices);
+  if (parents.length > 0 && isOrganometallic(parents[0]!.unit) && (functional ?? parents[1])) {
+    const [metal, acid] = parents;
+    if (radicals.length + ions > 0 || parents.length > 2 || (functional && acid)) return false;
+    return buildOrganometallic(metal!, { functional, acid }, draft, choices);
+  }
   if (parents.length > 0 && isNeutral(parents[0]!.unit) && (functional ?? parents[1]) && ions === 0)
     return radicals.length === 0 && buildAfterParent(words, draft, choices);
   if (!functional) return parents.length > 0 && buildAcidOrParent(words, draft, choices);

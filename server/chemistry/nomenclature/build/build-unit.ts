@@ -12,6 +12,7 @@ import { placeSideChains } from './side-chains.ts';
 import { inSeries, isBothEnantiomers, isSeriesWord, isSign } from './series.ts';
 import type { SkeletonGraph } from './skeleton.ts';
 import { placeSubstitution } from './substitutions.ts';
+import { precedes } from '../rings/fused-system.ts';
 import { placeUnsaturations } from './unsaturations.ts';
 
 /** The unit's atoms are added; undefined when the name asks for something that cannot be, which `draft.failure` says. */
@@ -170,7 +171,12 @@ function saturate(unit: Unit, places: Places, draft: Draft, choices: Choices): b
     draft.atoms[atom]!.saturated = true;
   }
   for (const { locants, count, at, range } of unit.hydro) {
-    const ring = places.atoms.filter((atom) => draft.atoms[atom]!.mancude && !draft.atoms[atom]!.saturated);
+    // The usual N–H has its hydrogen already, unless the name puts indicated hydrogen elsewhere.
+    const taken = (atom: number) => unit.indicated.length === 0 && draft.usualHydrogen.includes(atom);
+    const ring = places.atoms.filter(
+      (atom) =>
+        draft.atoms[atom]!.mancude && !draft.atoms[atom]!.saturated && draft.free(atom) > 0 && !taken(atom),
+    );
     if (locants) {
       for (const locant of locants) {
         const atom = places.at(locant);
@@ -199,9 +205,13 @@ function saturate(unit: Unit, places: Places, draft: Draft, choices: Choices): b
         draft.atoms[options[which]!]!.saturated = true;
         chosen.push(places.locantOf(options[which]!) ?? '?');
       }
-      draft.insert(at, `${chosen.join(',')}-`);
+      draft.insert(at, `${inOrder(chosen).join(',')}-`);
       places.opened = true;
     }
   }
   return true;
+}
+
+function inOrder(locants: readonly Locant[]): Locant[] {
+  return [...locants].sort((one, other) => (precedes(one, other) ? -1 : 1));
 }

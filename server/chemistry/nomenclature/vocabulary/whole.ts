@@ -4,6 +4,8 @@
  * Each line: names parted by `|`, in lower case; SMILES.
  */
 export const wholeNames: readonly (readonly [names: string, smiles: string])[] = [
+  ['epa|eicosapentaenoic acid|icosapentaenoic acid', 'CC/C=C\\C/C=C\\C/C=C\\C/C=C\\C/C=C\\CCCC(=O)O'],
+  ['dha|docosahexaenoic acid', 'CC/C=C\\C/C=C\\C/C=C\\C/C=C\\C/C=C\\C/C=C\\CCC(=O)O'],
   ['tetrahydrofuran', 'C1CCOC1'],
   ['n,n-dimethylformamide', 'CN(C)C=O'],
   ['n,n-dimethylacetamide', 'CN(C)C(C)=O'],
