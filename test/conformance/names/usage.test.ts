@@ -43,6 +43,25 @@ test.each<[source: string, name: string, smiles: string]>([
   ['P-69.2.2', 'diisobutylaluminium hydride', 'CC(C)C[AlH]CC(C)C'],
   ['P-69.2.2', 'ethylaluminium dichloride', 'CC[Al](Cl)Cl'],
   ['P-69.2.2', 'dibutyltin diacetate', 'CCCC[Sn](CCCC)(OC(C)=O)OC(C)=O'],
+  // Peroxy acids of acids with retained names, and reagents of the laboratory.
+  ['P-65.1.4.2', '3-chloroperoxybenzoic acid', 'OOC(=O)c1cccc(Cl)c1'],
+  ['P-65.1.4.2', 'tert-butyl perbenzoate', 'CC(C)(C)OOC(=O)c1ccccc1'],
+  ['P-66.4.1.2.1', "N,N'-dicyclohexylcarbodiimide", 'C1CCCCC1N=C=NC1CCCCC1'],
+  ['P-66.4.1.2.1', '1-ethyl-3-(3-dimethylaminopropyl)carbodiimide', 'CCN=C=NCCCN(C)C'],
+  [practice, 'triethyl phosphonoacetate', 'CCOC(=O)CP(=O)(OCC)OCC'],
+  [practice, 'diisopropyl azodicarboxylate', 'CC(C)OC(=O)N=NC(=O)OC(C)C'],
+  [practice, 'diphenyl phosphorazidate', '[N-]=[N+]=NP(=O)(Oc1ccccc1)Oc1ccccc1'],
+  [practice, 'potassium vinyltrifluoroborate', '[K+].C=C[B-](F)(F)F'],
+  [practice, '4-bromophenacyl bromide', 'BrCC(=O)c1ccc(Br)cc1'],
+  [practice, '4-bromobenzotrifluoride', 'FC(F)(F)c1ccc(Br)cc1'],
+  [practice, 'S-methylisothiourea', 'CSC(N)=N'],
+  [practice, '1,1-dimethylbiguanide', 'CN(C)C(=N)NC(N)=N'],
+  [
+    'P-65.6.3.2.2',
+    '3-O-ethyl 5-O-methyl 2,6-dimethyl-1,4-dihydropyridine-3,5-dicarboxylate',
+    'CCOC(=O)C1=C(C)NC(C)=C(C1)C(=O)OC',
+  ],
+  [practice, 'pyridinium dichromate', 'c1cc[nH+]cc1.c1cc[nH+]cc1.[O-][Cr](=O)(=O)O[Cr](=O)(=O)[O-]'],
   // Hydrogen goes where there is a double bond to take it up: not to N–H, not to C=O.
   [practice, 'dihydrouracil', 'O=C1CCNC(=O)N1'],
 ])('%s: %s', (_, name, smiles) => {

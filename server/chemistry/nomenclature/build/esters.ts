@@ -48,7 +48,7 @@ export function buildAcidOrParent(words: AcidWords, draft: Draft, choices: Choic
   const alone = metals.length === 0 && parents.length === 1;
   if (acid.count > 1 && alone && (groups.length !== 1 || valences.length !== acid.count)) return false;
   const alike = radicals.length === 1 && hydrogens + metals.length === 0;
-  let left = esterified(sites, valences, alike, draft, choices);
+  let left = esterified(acid.unit, sites, valences, alike, draft, choices);
   if (!left) return false;
   left = protonated(left, hydrogens, draft, choices);
   // An acid's anion by itself is an ion; half an ester is nothing definite.
@@ -60,15 +60,17 @@ export function buildAcidOrParent(words: AcidWords, draft: Draft, choices: Choic
 
 /** Binds the groups to places of the acid; the answer lists the places left. */
 function esterified(
+  acid: Unit,
   sites: readonly number[],
   valences: readonly { readonly free: Valence; readonly site: Site | undefined }[],
   alike: boolean,
   draft: Draft,
   choices: Choices,
 ): number[] | undefined {
+  const locants = acid.endings.find((ending) => ending.suffix.anion === true)?.locants ?? [];
   let left = [...sites];
   for (const { free, site: said } of valences) {
-    const options = left.filter((site) => fits(site, said, sites, draft));
+    const options = left.filter((site) => fits(site, said, sites, locants, draft));
     if (options.length === 0) return undefined;
     const site = alike ? options[0]! : options[choices.pick(options.length)]!;
     if (!join(draft, site, free)) return undefined;
@@ -124,12 +126,19 @@ function addCounterions(
 }
 
 /** Whether a group said to be on O or S, and at a position, can be on this place; places stand in their order. */
-function fits(place: number, site: Site | undefined, all: readonly number[], draft: Draft): boolean {
+function fits(
+  place: number,
+  site: Site | undefined,
+  all: readonly number[],
+  locants: readonly string[],
+  draft: Draft,
+): boolean {
   if (site === undefined) return true;
   if (draft.atoms[place]!.atomicNumber !== (site.element === 'O' ? 8 : 16)) return false;
-  return (
-    site.position === undefined || all.length < 2 || all.indexOf(place) === (site.position === 1 ? 0 : 1)
-  );
+  if (site.position === undefined || all.length < 2) return true;
+  // `3-O-ethyl … pyridine-3,5-dicarboxylate`; without locants in the acid's name, 1 is its first group.
+  const located = locants.indexOf(String(site.position));
+  return all.indexOf(place) === (located >= 0 ? located : site.position === 1 ? 0 : 1);
 }
 
 /** P-74.1: the negative places have their positive counterparts in the same molecule. */

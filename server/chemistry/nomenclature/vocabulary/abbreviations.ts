@@ -600,7 +600,7 @@ export const abbreviations: readonly (readonly [spellings: string, name: string,
   ['SDS', 'sodium dodecyl sulfate', '[Na+].CCCCCCCCCCCCOS(=O)(=O)[O-]'],
   ['MTPPB', 'methyl(triphenyl)phosphanium bromide', 'C[P+](c1ccccc1)(c1ccccc1)c1ccccc1.[Br-]'],
   // Other reagents
-  ['AIBN', "2,2'-[diazenediyl]bis(2-methylpropanenitrile)", 'CC(C)(C#N)N=NC(C)(C)C#N'],
+  ['AIBN|azobisisobutyronitrile', "2,2'-[diazenediyl]bis(2-methylpropanenitrile)", 'CC(C)(C#N)N=NC(C)(C)C#N'],
   ['ACCN|ACHN', "1,1'-diazenediyldi(cyclohexane-1-carbonitrile)", 'N#CC1(CCCCC1)N=NC1(C#N)CCCCC1'],
   ['DEAD', 'diethyl diazenedicarboxylate', 'CCOC(=O)N=NC(=O)OCC'],
   ['DIAD', 'di(propan-2-yl) diazenedicarboxylate', 'CC(C)OC(=O)N=NC(=O)OC(C)C'],

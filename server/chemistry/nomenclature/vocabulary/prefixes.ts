@@ -85,6 +85,7 @@ export const simplePrefixes: readonly PrefixLine[] = [
   ['4-tolyl', 'c1ccc(C)cc1'],
   ['o-anisyl', 'c1c(OC)cccc1'],
   ['p-anisyl', 'c1ccc(OC)cc1'],
+  ['phenacyl', 'CC(=O)c1ccccc1', "α - - 1' 2' 3'/3 4'/4 5'/5 6'"],
   ['furfuryl', 'Cc1ccco1', 'α 2 3 4 5 -'],
   ['furoyl', 'C(=O)c1ccco1'],
   ['phthalimido', 'N1C(=O)c2ccccc2C1=O'],

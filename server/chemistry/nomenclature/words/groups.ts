@@ -320,6 +320,12 @@ const otherEndings: readonly (readonly [text: string, suffix: SuffixEntry])[] = 
   ['amidine', atCarbon('imidamide', '=N N', { locants: "N' N" })],
 ];
 
+const peroxyEndings: readonly (readonly [text: string, suffix: SuffixEntry])[] = [
+  ['ic acid', atCarbon('peroxoic acid', '=O OO')],
+  ['ate', atCarbon('peroxoate', '=O O[O-]', { anion: true })],
+];
+const endingsByForm = { acid: acidEndings, other: otherEndings, peroxy: peroxyEndings };
+
 /** Everything made from an acid with a retained name. */
 function acidForms(
   word: Extract<Word, { kind: 'acid' }>,
@@ -329,7 +335,7 @@ function acidForms(
 ): Group[] {
   const found: Group[] = [];
   const places = word.line[4].split(' ');
-  for (const [ending, suffix] of word.form === 'acid' ? acidEndings : otherEndings) {
+  for (const [ending, suffix] of endingsByForm[word.form]) {
     if (!lower.startsWith(ending, end)) continue;
     if (ending === 'yl' && !acylWithYl.has(word.line[0])) continue;
     const last = end + ending.length;

@@ -222,7 +222,11 @@ export class ItemReader {
     );
     // `tridecyl` is one group of thirteen carbons, not three of ten.
     const alkyls = lower.startsWith('tri', from) ? this.#groupWordsAt(from) : [];
-    return new Set([...words, ...alkyls].map((one) => one.end));
+    // `dichromate` is one ion, not two of chromate.
+    const parents = lower.startsWith('di', from)
+      ? this.#groupWordsAt(from).filter(({ role, unit }) => role === 'parent' && unit.endings.length === 0)
+      : [];
+    return new Set([...words, ...alkyls, ...parents].map((one) => one.end));
   }
 
   *#groupsAt(

@@ -44,7 +44,7 @@ export type Word =
   | { kind: 'branched'; skeletons: Lazy; oxy: Lazy }
   | { kind: 'ring'; skeletons: Lazy }
   | { kind: 'parent'; skeletons: Lazy; extensible: boolean }
-  | { kind: 'acid'; line: AcidLine; form: 'acid' | 'other'; skeletons: Lazy }
+  | { kind: 'acid'; line: AcidLine; form: 'acid' | 'other' | 'peroxy'; skeletons: Lazy }
   | { kind: 'amino acid'; line: AminoAcidLine; suffix: AminoAcidSuffix; skeletons: Lazy }
   | { kind: 'hydro' }
   | { kind: 'replacement'; atomicNumber: number; charge: number };
@@ -162,6 +162,10 @@ export function createLexicon(): Lexicon {
     const skeletons = lazily(() => [withSeries(skeletonFromSmiles(line[2], line[3]))]);
     put(line[0], { kind: 'acid', line, form: 'acid', skeletons });
     if (line[1] !== '') put(line[1], { kind: 'acid', line, form: 'other', skeletons });
+    // P-65.1.4.2: `peroxybenzoic acid`, formerly `perbenzoic acid`.
+    if (line[4].length === 1)
+      for (const prefix of ['peroxy', 'per'])
+        put(prefix + line[0], { kind: 'acid', line, form: 'peroxy', skeletons });
   }
   for (const [names, symbol, bonds] of metals) {
     const skeletons = lazily(() => [metalSkeleton(symbol, bonds)]);
