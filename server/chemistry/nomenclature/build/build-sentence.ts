@@ -107,7 +107,7 @@ function buildWords(words: Sorted, draft: Draft, choices: Choices): boolean {
     if (radicals.length + ions > 0 || parents.length > 2 || (functional && acid)) return false;
     return buildOrganometallic(metal!, { functional, acid }, draft, choices);
   }
-  if (parents.length > 0 && isNeutral(parents[0]!.unit) && (functional ?? parents[1]) && ions === 0)
+  if (parents.length > 0 && (functional ?? parents[1]) && ions === 0 && isNeutral(parents[0]!.unit))
     return radicals.length === 0 && buildAfterParent(words, draft, choices);
   if (!functional) return parents.length > 0 && buildAcidOrParent(words, draft, choices);
   if (parents.length === 0 && metals.length === 0 && radicals.length > 0)

@@ -104,6 +104,7 @@ export class Draft {
 
   /** A stereocentre that waited for what its group is bound to. */
   #fillLigand(centre: number, ligand: number): void {
+    if (this.stereo.length === 0) return;
     const place = this.stereo.findIndex(
       (element) =>
         element.kind === 'tetrahedral' && element.centre === centre && element.ligands.includes(OPEN_LIGAND),

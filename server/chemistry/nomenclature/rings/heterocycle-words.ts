@@ -49,6 +49,8 @@ const multipliers: readonly (readonly [string, number])[] = [
   ['pent', 5],
 ];
 const mostHeteroatoms = 6;
+const oneOf = (words: readonly (readonly [string, number])[]) => words.map(([word]) => word).join('|');
+const anyPrefix = new RegExp(`(?:${oneOf(multipliers)})(?:${oneOf(prefixes)})`, 'y');
 
 export interface Stem {
   readonly size: number;
@@ -76,6 +78,9 @@ export function eachHeteroatom(
   then: (atoms: readonly number[], at: number) => void,
   atoms: readonly number[] = [],
 ): void {
+  // Asked at every place of a name, and mostly in vain.
+  anyPrefix.lastIndex = from;
+  if (!anyPrefix.test(lower)) return;
   for (const [multiplier, count] of multipliers) {
     if (atoms.length + count > mostHeteroatoms || !lower.startsWith(multiplier, from)) continue;
     for (const [name, atomicNumber] of prefixes) {

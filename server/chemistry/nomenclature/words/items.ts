@@ -122,10 +122,9 @@ export class ItemReader {
     return rows;
   }
 
-  *#itemsAt(offset: number): Generator<{ item: Item; end: number }> {
+  /** Indicated and added hydrogen, and bonding numbers. */
+  *#numberedAt(offset: number): Generator<{ item: Item; end: number }> {
     const { text } = this.name;
-    const stereo = stereoAt(text, offset);
-    if (stereo) yield { item: { kind: 'stereo', words: stereo.value, start: offset }, end: stereo.end };
     const hydrogen = indicatedAt(text, offset);
     if (hydrogen)
       yield { item: { kind: 'indicated', locants: hydrogen.value, start: offset }, end: hydrogen.end };
@@ -133,6 +132,13 @@ export class ItemReader {
     if (added) yield* this.#withAddedHydrogen(offset, added);
     const bonding = bondingAt(text, offset);
     if (bonding) yield { item: { kind: 'bonding', numbers: bonding.value, start: offset }, end: bonding.end };
+  }
+
+  *#itemsAt(offset: number): Generator<{ item: Item; end: number }> {
+    const { text } = this.name;
+    const stereo = stereoAt(text, offset);
+    if (stereo) yield { item: { kind: 'stereo', words: stereo.value, start: offset }, end: stereo.end };
+    if (/[\d(λ]/.test(text[offset]!)) yield* this.#numberedAt(offset);
     const locants = locantsAt(text, offset);
     if (locants) yield* this.#countedAt(offset, locants.end, locants.value);
     yield* this.#countedAt(offset, offset, undefined);

@@ -41,7 +41,7 @@ export function ringNameAt(
   offset: number,
   components: ComponentReader,
 ): RingName[] {
-  const locants = locantsAt(text, offset);
+  const locants = text.includes('λ') ? locantsAt(text, offset) : undefined;
   const bonding = locants?.value.map(withBonding).filter((one) => one.bonds !== undefined) ?? [];
   if (!locants || bonding.length === 0)
     return readers.flatMap((read) => read(text, lower, offset, components));
