@@ -1,5 +1,6 @@
 /** Settles a reading's arrangement in space from the descriptors of its name, and lists what they leave open. */
 import { assignDescriptors, type Refusal } from '../structure/assign-descriptors.ts';
+import { hasHinderedAxis } from '../structure/hindered-axis.ts';
 import { cipDescriptors } from '../structure/cip/descriptors.ts';
 import { atomsOfPlace, type Molecule, withStereo } from '../structure/molecule.ts';
 import { isOwnMirrorImage, mirrorImage } from '../structure/stereo-mirror.ts';
@@ -41,7 +42,9 @@ export function arrangedReading(
     });
   };
   const said = draft && draft.wanted.length + draft.loose.length > 0 ? saidOf(draft, molecule) : undefined;
-  for (const word of said?.placeless ?? [])
+  // The descriptor of a biaryl axis is right where it stands, though the axis is not followed here.
+  const isOfAxis = (word: StereoWord) => /^[RSMP]$/.test(word.letter) && hasHinderedAxis(molecule);
+  for (const word of (said?.placeless ?? []).filter((one) => !isOfAxis(one)))
     remark(word, `${word.letter} has no locant, and there is not exactly one place that it can be about.`);
   const { settled, refused } = assigned(molecule, said?.letters ?? []);
   for (const { word, reason } of refused) remark(word, refusal(word, reason));

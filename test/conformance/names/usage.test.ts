@@ -85,3 +85,15 @@ test('a salt keeps the charges that its name gives it', () => {
   expect(smiles).toContain('[NH+]');
   expect(smiles).toContain('[Cl-]');
 });
+
+test.each([
+  // Three acid groups cannot all end one chain (P-65.1.2.2.2); a cyano group is no end of it.
+  '2-hydroxypropane-1,2,3-tricarboxylic acid',
+  'ethyl 2-cyanoethanoate',
+  // The axis of a biaryl has a descriptor of its own (P-92.1.2.2.1.1).
+  "(R)-1,1'-binaphthalene-2,2'-diol",
+])('nothing is said against %s', (name) => {
+  const reading = readName(name);
+  if (reading.kind !== 'understood') throw new Error(reading.message);
+  expect(reading.remarks).toEqual([]);
+});

@@ -12,7 +12,7 @@ export function isLongestChain(claim: ChainClaim, draft: Draft): boolean {
     for (const { atom, bond } of draft.neighbours[queue[head]!]!) {
       if (draft.atoms[atom]!.atomicNumber !== 6 || carbons.has(atom) || draft.bonds[bond]!.order > 3)
         continue;
-      if (inRing(draft, atom)) continue;
+      if (inRing(draft, atom) || isOfGroup(draft, atom)) continue;
       carbons.add(atom);
       queue.push(atom);
       if (queue.length > 300) return true;
@@ -20,6 +20,16 @@ export function isLongestChain(claim: ChainClaim, draft: Draft): boolean {
   }
   const starts = [...carbons].filter((atom) => carbonNeighbours(draft, atom, carbons).length <= 1);
   return starts.every((start) => longestFrom(start, claim, draft, carbons) <= claim.atoms.length);
+}
+
+/**
+ * The carbon of a carboxy, cyano or like group, which a chain that has such groups already does not take in: propane-1,2,3-
+ * tricarboxylic acid (P-65.1.2.2.2).
+ */
+function isOfGroup(draft: Draft, atom: number): boolean {
+  const hetero = draft.neighbours[atom]!.filter((one) => draft.atoms[one.atom]!.atomicNumber !== 6);
+  const orders = hetero.map(({ bond }) => draft.bonds[bond]!.order);
+  return orders.some((order) => order > 1) && orders.reduce((sum, order) => sum + order, 0) > 2;
 }
 
 function carbonNeighbours(draft: Draft, atom: number, carbons: ReadonlySet<number>): number[] {
