@@ -3,8 +3,9 @@
  * `cyclohexanemethanol` and `1H-indole-3-acetic acid` (1979 rules C-51 to C-53; CAS index names).
  */
 import type { SideChain, Unit } from '../tree.ts';
-import type { Group } from './groups.ts';
-import { wordsAt, type Lexicon } from './lexicon.ts';
+import type { Group } from './group.ts';
+import type { Lexicon } from './lexicon.ts';
+import { wordsAt } from './trie.ts';
 import { locantsAt } from './locants.ts';
 
 const chainStart = /(?:meth|eth|prop|but|pent|hex|acet|propion|butyr)/y;

@@ -4,9 +4,11 @@
  */
 import type { Locant, Unit } from '../tree.ts';
 import type { Item } from './item.ts';
-import { groupsAt, type Group } from './groups.ts';
+import type { Group } from './group.ts';
+import { groupsAt } from './groups.ts';
 import { chainOfLinks } from './joints.ts';
-import { wordsAt, type Lexicon, type Word } from './lexicon.ts';
+import type { Lexicon, Word } from './lexicon.ts';
+import { wordsAt } from './trie.ts';
 import { addedHydrogenAt, bondingAt, indicatedAt, locantsAt } from './locants.ts';
 import type { PreparedName } from './prepared.ts';
 import { stereoAt } from './stereo-words.ts';

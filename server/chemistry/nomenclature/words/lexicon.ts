@@ -2,6 +2,7 @@
 import { chain, metalSkeleton, skeletonFromSmiles, type SkeletonGraph } from '../build/skeleton.ts';
 import { openSkeleton } from '../build/open-skeleton.ts';
 import type { SuffixEntry } from '../tree.ts';
+import { add, emptyTrie, type Trie } from './trie.ts';
 import { derivativeWords } from '../vocabulary/class-words.ts';
 import { anions } from '../vocabulary/functions.ts';
 import { acids, type AcidLine } from '../vocabulary/acids.ts';
@@ -59,33 +60,6 @@ const aminoAcidEndings: readonly (readonly [string, AminoAcidSuffix])[] = [
 
 /** Skeletons are read from their SMILES when first met. */
 export type Lazy = () => readonly SkeletonGraph[];
-
-export interface Trie<T> {
-  readonly next: Map<string, Trie<T>>;
-  values: T[];
-}
-const emptyTrie = <T>(): Trie<T> => ({ next: new Map(), values: [] });
-
-function add<T>(trie: Trie<T>, word: string, value: T): void {
-  let node = trie;
-  for (const character of word) {
-    let next = node.next.get(character);
-    if (!next) node.next.set(character, (next = emptyTrie()));
-    node = next;
-  }
-  node.values.push(value);
-}
-
-/** Every value whose word begins at the offset, the longest word last. */
-export function wordsAt<T>(trie: Trie<T>, text: string, offset: number): { value: T; end: number }[] {
-  const found: { value: T; end: number }[] = [];
-  let node: Trie<T> | undefined = trie;
-  for (let at = offset; node; at++) {
-    for (const value of node.values) found.push({ value, end: at });
-    node = at < text.length ? node.next.get(text[at]!) : undefined;
-  }
-  return found;
-}
 
 function lazily(make: () => readonly (SkeletonGraph | undefined)[]): Lazy {
   let made: readonly SkeletonGraph[] | undefined;

@@ -4,8 +4,9 @@
  */
 import { ring, type SkeletonGraph } from '../build/skeleton.ts';
 import { altered, type Alteration } from '../rings/altered-ring.ts';
-import type { Group } from './groups.ts';
-import { wordsAt, type Lexicon } from './lexicon.ts';
+import type { Group } from './group.ts';
+import type { Lexicon } from './lexicon.ts';
+import { wordsAt } from './trie.ts';
 import { indicatedAt, locantsAt } from './locants.ts';
 
 export interface RingComponent {

@@ -3,7 +3,8 @@
  * characteristic group or free valence (P-33, P-29.2), each with locants and multiplying affix.
  */
 import type { Ending, Locant, SuffixEntry, Unsaturation } from '../tree.ts';
-import { wordsAt, type Lexicon } from './lexicon.ts';
+import type { Lexicon } from './lexicon.ts';
+import { wordsAt } from './trie.ts';
 import { addedHydrogenAt, locantsAt } from './locants.ts';
 
 export interface Tail {
