@@ -88,3 +88,8 @@ test('D and L before anything else say nothing that can be relied on', () => {
   expect(readName('L-2-phenylglycine').kind).toBe('unknown');
   expect(readName('D-butan-2-ol').kind).toBe('unknown');
 });
+
+test('a salt of glutamic acid says how many metal ions it has', () => {
+  expect(readName('sodium L-glutamate').kind).toBe('unknown');
+  expect(readName('disodium L-glutamate').kind).toBe('understood');
+});

@@ -40,7 +40,7 @@ test.each([
   ['(−)-perillyl alcohol', '[(4S)-4-(prop-1-en-2-yl)cyclohex-1-en-1-yl]methanol'],
   ['geraniol', '(2E)-3,7-dimethylocta-2,6-dien-1-ol'],
   ['nerol', '(2Z)-3,7-dimethylocta-2,6-dien-1-ol'],
-  ['farnesol', '(2E,6E)-3,7,11-trimethyldodeca-2,6,10-trien-1-ol'],
+  ['(2E,6E)-farnesol', '(2E,6E)-3,7,11-trimethyldodeca-2,6,10-trien-1-ol'],
   ['geranyl acetate', '(2E)-3,7-dimethylocta-2,6-dien-1-yl acetate'],
   ['neryl acetate', '(2Z)-3,7-dimethylocta-2,6-dien-1-yl acetate'],
   ['(−)-menthyl acetate', '(1R,2S,5R)-5-methyl-2-(propan-2-yl)cyclohexyl acetate'],
@@ -62,6 +62,7 @@ test.each([
   ['(±)-menthol', 2],
   ['bornyl acetate', 2],
   ['linalool', 2],
+  ['farnesol', 4],
 ])('%s leaves %i enantiomers open', (name, count) => {
   expect(only(name).stereoisomers).toHaveLength(count);
 });

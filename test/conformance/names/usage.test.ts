@@ -62,6 +62,18 @@ test.each<[source: string, name: string, smiles: string]>([
     'CCOC(=O)C1=C(C)NC(C)=C(C1)C(=O)OC',
   ],
   [practice, 'pyridinium dichromate', 'c1cc[nH+]cc1.c1cc[nH+]cc1.[O-][Cr](=O)(=O)O[Cr](=O)(=O)[O-]'],
+  // Brackets in brackets, and groups on amino acids and diesters.
+  [practice, '2-[(methylsulfonyl)amino]propanoic acid', 'CC(NS(C)(=O)=O)C(=O)O'],
+  [practice, '4-((tert-butoxycarbonyl)amino)butanoic acid', 'CC(C)(C)OC(=O)NCCCC(=O)O'],
+  [practice, '(tert-butoxycarbonyl)-L-phenylalanine', 'OC(=O)[C@H](Cc1ccccc1)NC(=O)OC(C)(C)C'],
+  [practice, 'methyl (tert-butoxycarbonyl)-L-alaninate', 'COC(=O)[C@H](C)NC(=O)OC(C)(C)C'],
+  [
+    practice,
+    '1-(tert-butyl) 2-methyl (S)-pyrrolidine-1,2-dicarboxylate',
+    'COC(=O)[C@@H]1CCCN1C(=O)OC(C)(C)C',
+  ],
+  [practice, '(carbethoxymethylene)triphenylphosphorane', 'CCOC(=O)C=P(c1ccccc1)(c1ccccc1)c1ccccc1'],
+  [practice, '(triphenylphosphoranylidene)acetaldehyde', 'O=CC=P(c1ccccc1)(c1ccccc1)c1ccccc1'],
   // Hydrogen goes where there is a double bond to take it up: not to N–H, not to C=O.
   [practice, 'dihydrouracil', 'O=C1CCNC(=O)N1'],
 ])('%s: %s', (_, name, smiles) => {

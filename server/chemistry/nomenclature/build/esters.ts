@@ -58,6 +58,8 @@ export function buildAcidOrParent(words: AcidWords, draft: Draft, choices: Choic
   return left.length > 0 && addCounterions(words, left.length, valences.length, draft, choices);
 }
 
+const placedGroup = 3;
+
 /** Binds the groups to places of the acid; the answer lists the places left. */
 function esterified(
   acid: Unit,
@@ -74,6 +76,8 @@ function esterified(
     if (options.length === 0) return undefined;
     const site = alike ? options[0]! : options[choices.pick(options.length)]!;
     if (!join(draft, site, free)) return undefined;
+    // A locant before a group is that of its own substituent where that can be.
+    if (said && said.element === undefined) draft.cost += placedGroup;
     left = left.filter((one) => one !== site);
   }
   return left;
@@ -110,6 +114,8 @@ function addCounterions(
   }
   const [metal] = metals;
   const [base] = bases;
+  // The salts of glutamic acid are sold with one metal or two; the name has to say which.
+  if (acid.unit.residue === true && places > 1 && metal?.count === undefined) return false;
   const given = metal ? metal.count : base && base.count > 1 ? base.count : undefined;
   const charge = metal ? metal.charge : base && makeCation(base, draft, choices);
   if (charge === undefined) return false;
@@ -134,10 +140,12 @@ function fits(
   draft: Draft,
 ): boolean {
   if (site === undefined) return true;
-  if (draft.atoms[place]!.atomicNumber !== (site.element === 'O' ? 8 : 16)) return false;
+  const atomicNumber = site.element === 'S' ? 16 : 8;
+  if (site.element !== undefined && draft.atoms[place]!.atomicNumber !== atomicNumber) return false;
+  const located = locants.indexOf(String(site.position));
+  if (site.element === undefined) return located >= 0 && all.indexOf(place) === located;
   if (site.position === undefined || all.length < 2) return true;
   // `3-O-ethyl … pyridine-3,5-dicarboxylate`; without locants in the acid's name, 1 is its first group.
-  const located = locants.indexOf(String(site.position));
   return all.indexOf(place) === (located >= 0 ? located : site.position === 1 ? 0 : 1);
 }
 

@@ -141,7 +141,10 @@ export function openPlaces(
 ): number[] {
   const { places } = built;
   const carbon = draft.atoms[free.atom]!.atomicNumber === 6;
+  // P-103.3.1: an acyl group before an amino acid is on its nitrogen: Boc-L-alanine written out.
+  const acylates = places.unit.residue === true && isAcyl(draft, free.atom);
   return [...places.named()].filter((atom) => {
+    if (acylates && places.at('N') !== atom) return false;
     if (atom >= before || (places.spent.has(atom) && places.atoms.length > 1)) return false;
     // Greek locants mark side chains (toluene, acetophenone), which a bare prefix does not mean.
     if (!sides && /^[α-ω]/.test(places.locantOf(atom)!)) return false;
@@ -181,4 +184,13 @@ function ownerOf(substitution: Substitution, outer: Owner): Owner {
   const shared = { depth: outer.depth + 1, repeated: outer.repeated || substitution.count > 1 };
   if (substitution.bracketed === true) return { ...shared, at: substitution.unit.range.start };
   return { ...shared, at: substitution.bodyAt, wrapTo: substitution.range.end };
+}
+
+function isAcyl(draft: Draft, atom: number): boolean {
+  return (
+    draft.atoms[atom]!.atomicNumber === 6 &&
+    draft.neighbours[atom]!.some(
+      (one) => draft.bonds[one.bond]!.order === 2 && draft.atoms[one.atom]!.atomicNumber === 8,
+    )
+  );
 }

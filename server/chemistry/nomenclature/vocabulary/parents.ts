@@ -116,6 +116,7 @@ export const parents: readonly ParentLine[] = [
   ['semicarbazid', 'NNC(=O)N', '1 2 3 - 4'],
   ['isothiourea', 'NC(=N)S', "1/N - 3/N' S/2"],
   ['benzotrifluorid', 'FC(F)(F)c1ccccc1', '- - - - 1 2 3 4 5 6'],
+  ['phosphoran', '[PH5]', 'P'],
   ['nitrous amid', 'NN=O', 'N - -'],
   ['nitramid', 'N[N+](=O)[O-]', 'N - - -'],
   ['amphetamin', 'CC(N)Cc1ccccc1', '- α N β 1 2 3 4 5 6'],

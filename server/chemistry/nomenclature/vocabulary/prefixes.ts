@@ -171,6 +171,7 @@ export const linkingPrefixes: readonly (readonly [
   ['stannyl', '[SnH3]', 'Sn', 0],
   ['boranyl', 'B', 'B', 0],
   ['germyl', '[GeH3]', 'Ge', 0],
+  ['phosphoranylidene', '=[PH3]', 'P', 0],
   ['carbonimidoyl', 'C=N', 'C N', 0],
   ['carbamoylamino', 'NC(=O)N', "N - - N'", 3],
   ['carbamoyloxy', 'OC(=O)N', '- - - N', 3],

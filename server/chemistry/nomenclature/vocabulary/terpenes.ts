@@ -27,7 +27,7 @@ export const terpenes: readonly TerpeneLine[] = [
   ['perillaldehyd', 'O=CC1=CC[C@H](CC1)C(C)=C', '', '-'],
   ['geraniol', 'OC/C=C(\\C)CCC=C(C)C', '- 1 2 3 - 4 5 6 7 8 -', ''],
   ['nerol', 'OC/C=C(/C)CCC=C(C)C', '- 1 2 3 - 4 5 6 7 8 -', ''],
-  ['farnesol', 'OC/C=C(\\C)CC/C=C(\\C)CCC=C(C)C', '- 1 2 3 - 4 5 6 7 - 8 9 10 11 12 -', ''],
+  ['farnesol', 'OCC=C(C)CCC=C(C)CCC=C(C)C', '- 1 2 3 - 4 5 6 7 - 8 9 10 11 12 -', ''],
   ['prenol', 'OCC=C(C)C', '- 1 2 3 4 -', ''],
 ];
 
@@ -41,6 +41,6 @@ export const terpeneGroups: readonly TerpeneLine[] = [
   ['citronellyl', '*CC[C@H](C)CCC=C(C)C', '1 2 3 - 4 5 6 7 8 -', '+'],
   ['geranyl', '*C/C=C(\\C)CCC=C(C)C', '1 2 3 - 4 5 6 7 8 -', ''],
   ['neryl', '*C/C=C(/C)CCC=C(C)C', '1 2 3 - 4 5 6 7 8 -', ''],
-  ['farnesyl', '*C/C=C(\\C)CC/C=C(\\C)CCC=C(C)C', '1 2 3 - 4 5 6 7 - 8 9 10 11 12 -', ''],
+  ['farnesyl', '*CC=C(C)CCC=C(C)CCC=C(C)C', '1 2 3 - 4 5 6 7 - 8 9 10 11 12 -', ''],
   ['prenyl', '*CC=C(C)C', '1 2 3 4 -', ''],
 ];

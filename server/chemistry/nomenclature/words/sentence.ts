@@ -8,7 +8,8 @@ import { numericalTerm } from '../vocabulary/numbers.ts';
 
 /** Which place of an acid a group is said to be on: `S-ethyl`, `1-O-butyl` (P-65.6.3.2.2). */
 export interface Site {
-  readonly element: 'O' | 'S';
+  /** Not said in `1-tert-butyl 2-methyl …-1,2-dicarboxylate`. */
+  readonly element?: 'O' | 'S';
   readonly position?: number;
   /** `O,S-dimethyl`: the elements of the further groups. */
   readonly others?: readonly ('O' | 'S')[];
@@ -54,6 +55,9 @@ export type Part =
 
 const sentenceCap = 16;
 const siteWord = /(?:(\d+)-)?([OS])((?:,[OS])*)(\d*)-/y;
+const placeWord = /(\d+)-(?=[(a-z])/y;
+/** `1-tert-butyl 2-methyl …-1,2-dicarboxylate`: two groups, each with its place on the acid. */
+const twoPlaced = /^\d+-\S+ \d+-\S+ \S*di(?:carboxyl|o)ate$/;
 const multiples: readonly (readonly [string, number])[] = [
   ...[2, 3, 4, 5, 6].map((count) => [numericalTerm(count), count] as const),
   ['mono', 1],
@@ -99,15 +103,29 @@ function* partsAt(reader: ItemReader, offset: number): Generator<Part & { end: n
   const word = siteWord.exec(reader.name.text);
   if (word) {
     const position = word[1] ?? (word[4] === '' ? undefined : word[4]);
-    const others = word[3]!.split(',').slice(1) as Site['element'][];
+    const others = word[3]!.split(',').slice(1) as ('O' | 'S')[];
     const site: Site = {
-      element: word[2] as Site['element'],
+      element: word[2] as 'O' | 'S',
       ...(others.length > 0 ? { others } : {}),
       ...(position === undefined ? {} : { position: Number(position) }),
     };
     for (const stretch of reader.stretchesAt(siteWord.lastIndex)) {
       if (stretch.role === 'radical' && (others.length === 0 || stretch.count === others.length + 1))
         yield { kind: 'stretch', stretch, start: offset, site, end: stretch.end };
+    }
+  }
+  placeWord.lastIndex = offset;
+  const place = twoPlaced.test(lower) ? placeWord.exec(reader.name.text) : undefined;
+  if (place) {
+    for (const stretch of reader.stretchesAt(placeWord.lastIndex)) {
+      if (stretch.role === 'radical' && reader.name.text[stretch.end] === ' ')
+        yield {
+          kind: 'stretch',
+          stretch,
+          start: offset,
+          site: { position: Number(place[1]) },
+          end: stretch.end,
+        };
     }
   }
   for (const stretch of reader.stretchesAt(offset)) {

@@ -53,7 +53,9 @@ export function structured(
     if (!base) return undefined;
   }
   const groupings: (readonly Grouping[])[] = [...base.groupings];
-  if (base.linkAt !== undefined) {
+  // `(methoxycarbonyl)` in its brackets has what it joins already.
+  const filled = last.bracketed && base.groupings.length > 0;
+  if (base.linkAt !== undefined && !filled) {
     // Hydro prefixes and located descriptors are about a group before the link; a bare `(E)` is about the whole.
     const belongs = (item: Item) =>
       item.kind !== 'group' &&
